@@ -1,0 +1,12 @@
+package saltspoke.fields;
+
+import java.io.InputStream;
+
+/** A folder (or its copy inside the jar) of verified climate layers with their manifest. */
+public interface DataSet {
+  /** The bands of a raster layer, read at first use and kept. */
+  FieldStack stack(String layerId);
+
+  /** The bytes of a layer's file, unpacked when its name ends in {@code .gz}. */
+  InputStream open(String layerId);
+}

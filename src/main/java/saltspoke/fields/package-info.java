@@ -1,0 +1,2 @@
+/** Gridded fields with their unit and provenance, and the data set that holds them. */
+package saltspoke.fields;

@@ -1,0 +1,2 @@
+/** Finding a place and what lies around it: names, postcodes, elevation, coast, neighbours. */
+package saltspoke.places;

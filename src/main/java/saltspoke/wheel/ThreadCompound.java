@@ -1,0 +1,20 @@
+package saltspoke.wheel;
+
+/** What was put on the spoke thread at building. */
+public enum ThreadCompound {
+  NONE("none"),
+  OIL("oil"),
+  GREASE("grease"),
+  ANTI_SEIZE("anti-seize");
+
+  private final String id;
+
+  ThreadCompound(String id) {
+    this.id = id;
+  }
+
+  /** Name used in answers, options and profile files. */
+  public String id() {
+    return id;
+  }
+}
