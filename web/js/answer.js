@@ -1,7 +1,7 @@
 /** The answer: interval first and large, then why, and what to take away. */
 
 import { Refused, download } from "./api.js";
-import { badge, sureness, timesPicture, yearPicture } from "./charts.js";
+import { badge, timesPicture, yearPicture } from "./charts.js";
 import { byId, h } from "./dom.js";
 import { calledPlace } from "./place.js";
 import { body, isOwnProfile, parameters } from "./question.js";
@@ -11,7 +11,6 @@ import * as words from "./words.js";
 
 const { t } = words;
 const KINDS = ["rim", "nipple", "interface", "spoke"];
-const SHOWN_OTHERS = 6;
 const URGENT_MONTHS = 1.5;
 const OVERDUE_MONTHS = 0.1;
 
@@ -385,8 +384,13 @@ function others(answer, focus) {
     return block("others", t("page-others"), h("p", { class: "hint" }, t("page-working-word")));
   }
   const sameSpoke = answer.others.pairings.filter((pairing) => pairing.spoke === focus.spoke);
-  const best = sameSpoke.slice(0, SHOWN_OTHERS);
-  const rest = sameSpoke.slice(SHOWN_OTHERS);
+  const seen = new Set();
+  const best = sameSpoke.filter((pairing) => {
+    const first = !seen.has(pairing.nipple);
+    seen.add(pairing.nipple);
+    return first || KINDS.every((kind) => pairing[kind] === focus[kind]);
+  });
+  const rest = sameSpoke.filter((pairing) => !best.includes(pairing));
   return block(
     "others",
     t("page-others"),

@@ -6,6 +6,8 @@ import * as words from "./words.js";
 const { t } = words;
 export const CLASSES = ["C1", "C2", "C3", "C4", "C5", "CX"];
 const HORIZON_MONTHS = 240;
+const MOST_LOOKS = 8;
+const LEAST_TICK_GAP = 150;
 const TICKS = [1, 3, 6, 12, 24, 60, 120, 240];
 const COIN_TOSS_BELOW = 0.6;
 
@@ -73,7 +75,7 @@ function scaleOf(pairing) {
 
 function bar(times, pairing, most) {
   const marks = [];
-  for (let at = pairing.firstLookMonths; at <= most && marks.length < 24; at += pairing.everyMonths) {
+  for (let at = pairing.firstLookMonths; at <= most && marks.length < MOST_LOOKS; at += pairing.everyMonths) {
     marks.push(s("line", { x1: place(at, most), x2: place(at, most), y1: 0, y2: 24, class: "look" }));
     if (!(pairing.everyMonths > 0)) {
       break;
@@ -98,6 +100,18 @@ function bar(times, pairing, most) {
   );
 }
 
+/** Ticks whose labels have room, counted from the far end. */
+function labelled(most) {
+  return TICKS.filter((tick) => tick <= most)
+    .reverse()
+    .reduce(
+      (kept, tick) =>
+        kept.length === 0 || place(kept.at(-1), most) - place(tick, most) > LEAST_TICK_GAP ? [...kept, tick] : kept,
+      [],
+    )
+    .filter((tick) => place(tick, most) > LEAST_TICK_GAP);
+}
+
 /** When each state is reached, as spans on one scale. */
 export function timesPicture(pairing) {
   const most = scaleOf(pairing);
@@ -120,7 +134,7 @@ export function timesPicture(pairing) {
   const labels = h(
     "div",
     { class: "axis-labels", "aria-hidden": "true" },
-    TICKS.filter((tick) => tick <= most && place(tick, most) > 120).map((tick) => {
+    labelled(most).map((tick) => {
       const label = h("span", {}, words.shortSpan(tick));
       label.style.setProperty("--at", String(place(tick, most) / 10));
       return label;

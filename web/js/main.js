@@ -14,6 +14,7 @@ import * as words from "./words.js";
 const { t } = words;
 const QUIET_MS = 180;
 const SLOW_MS = 4000;
+const SAME_TOWN_DEG = 0.05;
 const PREFERRED = {
   profile: "all-winter-commuter",
   rim: "carbon-bare",
@@ -91,6 +92,11 @@ function complete(question) {
   return false;
 }
 
+function isElsewhere(place, expected) {
+  const [lat, lon] = expected.split(",").map(Number);
+  return Math.abs(place.latitudeDeg - lat) > SAME_TOWN_DEG || Math.abs(place.longitudeDeg - lon) > SAME_TOWN_DEG;
+}
+
 async function answerOne(index) {
   const question = app.questions[index];
   const answer = app.answers[index];
@@ -120,6 +126,13 @@ async function answerOne(index) {
   try {
     const advice = await fetchFor("advice");
     if (advice === null) {
+      return;
+    }
+    if (answer.expected && isElsewhere(advice.place, answer.expected)) {
+      movePlace(question, { at: answer.expected });
+      answer.expected = null;
+      remember();
+      answerOne(index);
       return;
     }
     answer.advice = advice;
@@ -159,8 +172,14 @@ function changed() {
   answerActive();
 }
 
-function takePlace(place) {
+/**
+ * Takes a place.
+ *
+ * @param expected "lat,lon" of the very town that was chosen, in case its name fits another one too
+ */
+function takePlace(place, expected = null) {
   movePlace(app.question(), place);
+  app.answers[app.active].expected = expected;
   syncPlace();
   changed();
 }

@@ -2,7 +2,6 @@
 
 import { ask } from "./api.js";
 import { byId, debounced, h } from "./dom.js";
-import { movePlace } from "./question.js";
 import * as words from "./words.js";
 
 const { t } = words;
@@ -52,7 +51,7 @@ function choose(index) {
   closeList();
   byId("town").value = place.title;
   tell("");
-  app.takePlace(place.fields);
+  app.takePlace(place.fields, place.at);
 }
 
 function showFound(places) {
@@ -102,10 +101,8 @@ const search = debounced(async (text) => {
         head: place.name,
         rest: [place.regionName, words.country(place.countryCode)].filter(Boolean).join(", "),
         title: placeTitle(place),
-        fields: {
-          at: `${place.latitudeDeg},${place.longitudeDeg}`,
-        },
-        place,
+        fields: { place: [place.name, place.regionName, place.countryName].filter(Boolean).join(", ") },
+        at: `${place.latitudeDeg},${place.longitudeDeg}`,
       })),
     );
     tell(
@@ -271,5 +268,3 @@ export function showPlace(place) {
     }
   }
 }
-
-export { movePlace };

@@ -151,7 +151,7 @@ function months() {
 }
 
 /** One line on a profile, from its own fields. */
-export function profileLine(profile) {
+function profileLine(profile) {
   return t("page-profile-line", {
     hours: words.number(profile.hoursPerWeek, 1),
     storage: t(`page-storage-${profile.storage}`),
@@ -169,33 +169,27 @@ export function drawRides() {
   const moreOpen = byId("rides").querySelector("details")?.open ?? false;
   byId("rides").replaceChildren(
     h(
-      "fieldset",
-      { class: "profiles" },
-      h("legend", { class: "unseen" }, t("page-profile")),
-      app.profiles.map((profile) =>
-        h(
-          "label",
-          {},
-          h("input", {
-            type: "radio",
-            name: "profile",
-            value: profile.name,
-            checked: profile.name === ready.name,
-            onchange: () => {
-              app.question().fields.profile = profile.name;
-              app.question().own = {};
-              drawRides();
-              byId("rides").querySelector("input:checked").focus();
-              app.changed();
-            },
-          }),
-          h("span", { class: "profile-title" }, profileTitle(profile)),
-          profile.name === ready.name
-            ? h("span", { class: "profile-line" }, profileLine(profile))
-            : null,
+      "label",
+      {},
+      h("span", {}, t("page-profile")),
+      h(
+        "select",
+        {
+          id: "profile",
+          onchange: (event) => {
+            app.question().fields.profile = event.target.value;
+            app.question().own = {};
+            drawRides();
+            byId("profile").focus();
+            app.changed();
+          },
+        },
+        app.profiles.map((profile) =>
+          h("option", { value: profile.name, selected: profile.name === ready.name }, profileTitle(profile)),
         ),
       ),
     ),
+    h("p", { class: "hint" }, profileLine(ready)),
     h("p", { id: "own-mark", class: "hint", hidden: true }, t("page-own-profile")),
     h("div", { class: "grid2" }, choice("storage"), choice("rinsing")),
     h(
