@@ -28,10 +28,11 @@ public record FilmLoss(double[] monthlyUm, double galvanicShare, double localSha
         }
         CellCurrents now = rates.at(spec, film.film());
         double um = now.penetrationUmPerYear() * film.hours() / HOURS_PER_YEAR;
-        double sum = now.galvanicUAPerCm2() + now.selfUAPerCm2() + now.localUAPerCm2();
+        double driven = Math.max(0, now.galvanicUAPerCm2());
+        double sum = driven + now.selfUAPerCm2() + now.localUAPerCm2();
         monthly[month.month() - 1] += um;
         if (sum > 0) {
-          galvanic += um * now.galvanicUAPerCm2() / sum;
+          galvanic += um * driven / sum;
           local += um * now.localUAPerCm2() / sum;
           all += um;
         }

@@ -35,9 +35,9 @@ public final class HeadSection {
     return switch (material) {
       case ALUMINIUM_WROUGHT -> 310;
       case ALUMINIUM_HIGH_STRENGTH -> 540;
-      case BRASS -> 420;
+      case BRASS, NICKEL_ALUMINIUM_BRONZE -> 420;
       case CARBON_STEEL -> 450;
-      case STAINLESS -> 700;
+      case STAINLESS, STAINLESS_PH -> 700;
       case TITANIUM -> 900;
       case NICKEL -> 450;
       case ZINC, POLYMER, CARBON_FIBRE, PLATINUM -> 100;

@@ -16,8 +16,9 @@ final class Nobility {
       case ALUMINIUM_HIGH_STRENGTH, ALUMINIUM_WROUGHT -> -0.88;
       case CARBON_STEEL -> -0.66;
       case BRASS -> -0.36;
+      case NICKEL_ALUMINIUM_BRONZE -> -0.2;
       case NICKEL -> -0.15;
-      case STAINLESS -> -0.05;
+      case STAINLESS, STAINLESS_PH -> -0.05;
       case TITANIUM -> 0.01;
       case PLATINUM -> 0.2;
       case CARBON_FIBRE -> 0.25;
@@ -28,8 +29,8 @@ final class Nobility {
   /** Whether a metal dissolves at all in salt water at its own potential or a nobler one. */
   static boolean corrodes(Material material) {
     return switch (material) {
-      case ZINC, ALUMINIUM_HIGH_STRENGTH, ALUMINIUM_WROUGHT, CARBON_STEEL, BRASS, NICKEL -> true;
-      case STAINLESS, TITANIUM, PLATINUM, CARBON_FIBRE, POLYMER -> false;
+      case ZINC, ALUMINIUM_HIGH_STRENGTH, ALUMINIUM_WROUGHT, CARBON_STEEL, BRASS, NICKEL, NICKEL_ALUMINIUM_BRONZE -> true;
+      case STAINLESS, STAINLESS_PH, TITANIUM, PLATINUM, CARBON_FIBRE, POLYMER -> false;
     };
   }
 

@@ -28,9 +28,9 @@ public final class Products {
     return switch (material) {
       case ALUMINIUM_WROUGHT, ALUMINIUM_HIGH_STRENGTH -> 3.2;
       case CARBON_STEEL -> 3.0;
-      case BRASS, NICKEL -> 2.5;
+      case BRASS, NICKEL, NICKEL_ALUMINIUM_BRONZE -> 2.5;
       case ZINC -> 3.0;
-      case STAINLESS, TITANIUM, PLATINUM, CARBON_FIBRE, POLYMER -> 1;
+      case STAINLESS, STAINLESS_PH, TITANIUM, PLATINUM, CARBON_FIBRE, POLYMER -> 1;
     };
   }
 
@@ -49,9 +49,9 @@ public final class Products {
     return switch (material) {
       case ALUMINIUM_WROUGHT, ALUMINIUM_HIGH_STRENGTH -> 30;
       case CARBON_STEEL -> 10;
-      case BRASS, NICKEL -> 15;
+      case BRASS, NICKEL, NICKEL_ALUMINIUM_BRONZE -> 15;
       case ZINC -> 10;
-      case STAINLESS, TITANIUM, PLATINUM, CARBON_FIBRE, POLYMER -> Double.POSITIVE_INFINITY;
+      case STAINLESS, STAINLESS_PH, TITANIUM, PLATINUM, CARBON_FIBRE, POLYMER -> Double.POSITIVE_INFINITY;
     };
   }
 
@@ -63,9 +63,9 @@ public final class Products {
     return switch (material) {
       case ALUMINIUM_WROUGHT, ALUMINIUM_HIGH_STRENGTH -> 2;
       case CARBON_STEEL -> 5;
-      case BRASS -> 0.7;
+      case BRASS, NICKEL_ALUMINIUM_BRONZE -> 0.7;
       case ZINC -> 2;
-      case NICKEL, STAINLESS, TITANIUM, PLATINUM, CARBON_FIBRE, POLYMER ->
+      case NICKEL, STAINLESS, STAINLESS_PH, TITANIUM, PLATINUM, CARBON_FIBRE, POLYMER ->
           Double.POSITIVE_INFINITY;
     };
   }

@@ -24,9 +24,6 @@ public final class SpokeHole {
   /** Metallic path nipple–seat–rim, Ω. ASSUMPTION: pressed seat; far below the film's resistance. */
   static final double SEAT_OHM = 10;
 
-  /** Cathode left for an anode that has none: a sliver that carries no current worth the name. */
-  private static final double NO_CATHODE_SHARE = 1e-6;
-
   private static final Quantiles WHOLE = new Quantiles(1, 1, 1);
 
   private SpokeHole() {}
@@ -255,18 +252,10 @@ public final class SpokeHole {
         ring.skirtMm());
   }
 
+  /** A ring that nothing drives: it is eaten by itself. */
   private static CellSpec alone(Material metal, double radiusMm, double lengthMm, double widthMm) {
     return new CellSpec(
-        metal,
-        Material.STAINLESS,
-        radiusMm,
-        lengthMm,
-        widthMm,
-        0,
-        NO_CATHODE_SHARE,
-        radiusMm + 0.5,
-        SEAT_OHM,
-        0);
+        metal, null, radiusMm, lengthMm, widthMm, 0, 0, radiusMm, SEAT_OHM, 0);
   }
 
   /** Radius of the disc around the hole that has the wet area of the nipple's head. */
