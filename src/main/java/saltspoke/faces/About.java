@@ -24,11 +24,13 @@ public final class About {
     return node;
   }
 
-  public static String text(DataSet d) {
-    return "";
+  /** What {@link #json} says, for reading. */
+  public static String text(DataSet dataSet) {
+    return "Saltspoke " + version() + "\nData: " + dataSet.location();
   }
 
-  public static String dataNotice(DataSet d) {
+  /** Licence and attribution of every layer. */
+  public static String dataNotice(DataSet dataSet) {
     return "";
   }
 }
