@@ -28,10 +28,8 @@ class LookCalendarTest {
 
     // Looks at 2.7, 4.9, … 15.9 months lie before the replacement at 17: seven, and that itself.
     assertEquals(8, events.size());
-    assertEquals(
-        "20270221", events.get(0).getDateTimeStart().getValue(), "82 days on");
-    assertEquals(
-        "Łódź; Mitte, Nord, Łódzkie, Polen", events.get(0).getLocation().getValue());
+    assertEquals("20270221", events.get(0).getDateTimeStart().getValue(), "82 days on");
+    assertEquals("Łódź; Mitte, Nord, Łódzkie, Polen", events.get(0).getLocation().getValue());
     assertEquals(
         events.size(),
         events.stream().map(event -> event.getUid().orElseThrow().getValue()).distinct().count());
