@@ -8,6 +8,7 @@ import java.util.Set;
 import saltspoke.fields.DataSet;
 import saltspoke.fields.FieldStack;
 import saltspoke.places.Place;
+import saltspoke.sources.CsvTable;
 import saltspoke.values.Note;
 import saltspoke.values.Quantiles;
 
@@ -30,7 +31,7 @@ public final class AirModel {
   public static AirModel from(DataSet data, MonthlyClimateSource climate) {
     return new AirModel(
         climate,
-        CountryAir.read(data.rows(CountryAir.LAYER)),
+        CountryAir.read(CsvTable.read(data.open(CountryAir.LAYER), CountryAir.LAYER + ".csv")),
         data.stack("elevation"),
         WindFields.from(data));
   }

@@ -1,8 +1,6 @@
 package saltspoke.fields;
 
 import java.io.InputStream;
-import java.util.List;
-import saltspoke.sources.CsvTable;
 
 /** A folder (or its copy inside the jar) of verified climate layers with their manifest. */
 public interface DataSet {
@@ -11,9 +9,4 @@ public interface DataSet {
 
   /** The bytes of a layer's file, unpacked when its name ends in {@code .gz}. */
   InputStream open(String layerId);
-
-  /** All rows of a layer that is a table. */
-  default List<CsvTable.Row> rows(String layerId) {
-    return CsvTable.read(open(layerId), layerId + ".csv");
-  }
 }
