@@ -9,4 +9,7 @@ public interface DataSet {
 
   /** The bytes of a layer's file, unpacked when its name ends in {@code .gz}. */
   InputStream open(String layerId);
+
+  /** The bytes of a layer's file as they are stored, packed or not. */
+  InputStream openStored(String layerId);
 }

@@ -1,0 +1,26 @@
+package saltspoke.sources;
+
+import java.io.IOException;
+import java.util.List;
+
+/**
+ * Builds one or a few files of the shipped world from source packages. Given the same packages it
+ * writes the same bytes: no clock, no random order, no dependence on the machine.
+ */
+public interface LayerBuilder {
+  /** Short name for progress and messages. */
+  String id();
+
+  /**
+   * Ids of packages that it cannot do without; others it may use when {@link SourcePackages#has}.
+   */
+  List<String> needs();
+
+  /**
+   * Reads from the packages and writes the layer's files. Packages that are opened through {@code
+   * in} are recorded as the sources of every file written to {@code out}.
+   *
+   * @throws IOException when a package cannot be read or a file not be written
+   */
+  void build(SourcePackages in, LayerSink out) throws IOException;
+}
