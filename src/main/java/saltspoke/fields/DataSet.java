@@ -1,6 +1,8 @@
 package saltspoke.fields;
 
 import java.io.InputStream;
+import java.util.List;
+import saltspoke.sources.CsvTable;
 
 /** A folder (or its copy inside the jar) of verified climate layers with their manifest. */
 public interface DataSet {
@@ -12,4 +14,9 @@ public interface DataSet {
 
   /** The bytes of a layer's file as they are stored, packed or not. */
   InputStream openStored(String layerId);
+
+  /** All rows of a layer that is a table. */
+  default List<CsvTable.Row> rows(String layerId) {
+    return CsvTable.read(open(layerId), layerId + ".csv");
+  }
 }
