@@ -2,6 +2,7 @@ package saltspoke.sources;
 
 import java.io.IOException;
 import java.util.List;
+import java.util.Optional;
 
 /**
  * Builds one or a few files of the shipped world from source packages. Given the same packages it
@@ -15,6 +16,14 @@ public interface LayerBuilder {
    * Ids of packages that it cannot do without; others it may use when {@link SourcePackages#has}.
    */
   List<String> needs();
+
+  /**
+   * What the world does without this layer when a needed package is missing, as a sentence for the
+   * person who waits; nothing when the ingest must not go on without it.
+   */
+  default Optional<String> fallBack() {
+    return Optional.empty();
+  }
 
   /**
    * Reads from the packages and writes the layer's files. Packages that are opened through {@code
