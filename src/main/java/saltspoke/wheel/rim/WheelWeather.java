@@ -62,22 +62,33 @@ public final class WheelWeather {
     double openSeat = build.hiddenNipples() ? 0 : a.get(RimAssumption.OPEN_SEAT_SHARE);
     double bedM2 = a.get(RimAssumption.WETTED_BED_M2);
     List<List<KeptAir>> seats = new ArrayList<>();
-    double[][] dissolved = new double[Calendar.MONTHS][];
+    Hysteresis[] hysteresis = new Hysteresis[Calendar.MONTHS];
     for (int m = 0; m < Calendar.MONTHS; m++) {
-      seats.add(SeatAir.at(kept.get(m), salt.months.get(m), conductanceM3PerS, bedM2, openSeat));
-      dissolved[m] = new double[seats.get(m).size()];
+      List<KeptAir> seat =
+          SeatAir.at(kept.get(m), salt.months.get(m), conductanceM3PerS, bedM2, openSeat);
+      seats.add(seat);
+      hysteresis[m] = new Hysteresis(seat, outside[m].temperatureC());
     }
-    double wakesWet = 0;
+    double[] wakesWet = new double[Calendar.MONTHS];
+    double last = 0;
     for (int pass = 0; pass < 2; pass++) {
       for (int m = 0; m < Calendar.MONTHS; m++) {
-        double wettings = wettings(outside[m], rides[m]) / Calendar.days(m);
-        wakesWet = Hysteresis.month(seats.get(m), wettings, wakesWet, dissolved[m]);
+        last = hysteresis[m].wakesWet(wettings(outside[m], rides[m]) / Calendar.days(m), last);
+        wakesWet[m] = last;
       }
     }
     List<WheelYear.Month> months = new ArrayList<>();
     for (int m = 0; m < Calendar.MONTHS; m++) {
       months.add(
-          month(m, outside[m], rides[m], kept.get(m), seats.get(m), dissolved[m], water, salt));
+          month(
+              m,
+              outside[m],
+              rides[m],
+              kept.get(m),
+              seats.get(m),
+              hysteresis[m].dissolved(wakesWet[m]),
+              water,
+              salt));
     }
     return new WheelYear(months, WeatherFlags.of(air, profile, build, rides, water, salt));
   }
