@@ -15,8 +15,8 @@ public final class FrostDays {
   public static final double SALTING_MAXIMUM_C = -5;
 
   /**
-   * How far the mean minimum lies below the mean, over the daily range: fitted on frost days of
-   * CRU CL 2.0 (New et al. 2002), ±0.01.
+   * How far the mean minimum lies below the mean, over the daily range: fitted on frost days of CRU
+   * CL 2.0 (New et al. 2002), ±0.01.
    */
   private static final double MINIMUM_BELOW_MEAN = 0.5033;
 

@@ -30,6 +30,11 @@ final class Hysteresis {
     this.dryingPct = Deliquescence.dryingRhPct(SODIUM, meanC);
   }
 
+  /** Whether sodium chloride goes into solution at this humidity, whatever was before. */
+  static boolean dissolves(double rhPct, double temperatureC) {
+    return rhPct >= Deliquescence.onsetRhPct(SODIUM, temperatureC);
+  }
+
   /**
    * This month's chance of waking wet, 0..1.
    *
