@@ -131,14 +131,19 @@ public final class DataSet {
     }
   }
 
+  /**
+   * The bytes of a layer's file as they are stored, packed or not: for tables of several gzip
+   * members, of which a reader takes one.
+   *
+   * @throws Refusal when there is no such layer
+   */
+  public InputStream openStored(String layerId) {
+    return new ByteArrayInputStream(bytes(manifest.get(layerId).path()));
+  }
+
   /** All rows of a layer that is a table. */
   public List<CsvTable.Row> rows(String layerId) {
     return CsvTable.read(open(layerId), manifest.get(layerId).path());
-  }
-
-  /** The bytes of a layer's file as they are stored, packed or not. */
-  public InputStream openStored(String layerId) {
-    return new ByteArrayInputStream(bytes(manifest.get(layerId).path()));
   }
 
   private FieldStack read(String layerId) {
