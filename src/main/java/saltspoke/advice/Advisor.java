@@ -7,8 +7,8 @@ import saltspoke.atmosphere.AirClimate;
 import saltspoke.values.Note;
 import saltspoke.values.Refusal;
 import saltspoke.wheel.Catalogue;
-import saltspoke.wheel.Pairing;
 import saltspoke.wheel.GalvanicCell;
+import saltspoke.wheel.Pairing;
 import saltspoke.wheel.damage.CellRates;
 import saltspoke.wheel.rim.WheelWeather;
 
@@ -41,8 +41,7 @@ public final class Advisor {
   public Advice advise(AirClimate air, AdviceRequest request) {
     check(request);
     List<Pairing> pairings =
-        catalogue.pairings(
-            request.rim(), request.nipple(), request.between(), request.spoke());
+        catalogue.pairings(request.rim(), request.nipple(), request.between(), request.spoke());
     Workshop shop = open(air, request, DRAWS, WheelRisk.NIPPLE_SCATTER);
     List<Case> cases = new ArrayList<>();
     for (Pairing pairing : pairings) {

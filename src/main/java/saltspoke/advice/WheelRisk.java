@@ -8,11 +8,11 @@ import saltspoke.wheel.damage.Site;
  * The chance that a wheel has reached a state, its worst nipple deciding.
  *
  * <p>In each draw all nipples share the drawn assumptions (that is their correlation) and each has
- * a scatter of its own: nipple j loses exp(σ·z_j) times the median. A nipple is then in a state from
- * the time on at which z_j passes a threshold ζ = min over sites of (ln limit − ln dose)/σ, and a
- * wheel of N nipples is still free of it with chance Φ(ζ)^N. Chances are means over the draws. With
- * the scatter below and a common spread of ln 2 to ln 3 the correlation of ln life between two
- * nipples of a wheel is 0.7 to 0.85.
+ * a scatter of its own: nipple j loses exp(σ·z_j) times the median. A nipple is then in a state
+ * from the time on at which z_j passes a threshold ζ = min over sites of (ln limit − ln dose)/σ,
+ * and a wheel of N nipples is still free of it with chance Φ(ζ)^N. Chances are means over the
+ * draws. With the scatter below and a common spread of ln 2 to ln 3 the correlation of ln life
+ * between two nipples of a wheel is 0.7 to 0.85.
  */
 final class WheelRisk {
   /**
@@ -231,7 +231,9 @@ final class WheelRisk {
     return false;
   }
 
-  /** The 10 % quantile of the time from first attack to seized, months; infinite when none seizes. */
+  /**
+   * The 10 % quantile of the time from first attack to seized, months; infinite when none seizes.
+   */
   double shortWarningMonths() {
     double[] gaps = new double[Draws.COUNT];
     for (int n = 0; n < Draws.COUNT; n++) {

@@ -11,7 +11,9 @@ public enum Assumption {
   ACTIVE_SHARE("active-share", "x/÷ of the catalogue's 10..90 %", 0),
   /** Length of seat worn bare when the wheel is built. Catalogue. */
   SEAT_BARE("seat-bare", "x/÷ of the catalogue's 10..90 %", 0),
-  /** Speed of oxygen reduction on the cathode. Science: 10–40 µA/cm² on carbon, so x/÷ 2 spans it. */
+  /**
+   * Speed of oxygen reduction on the cathode. Science: 10–40 µA/cm² on carbon, so x/÷ 2 spans it.
+   */
   CATHODE_SPEED("cathode-speed", "x/÷ 1.5", Math.log(1.5)),
   /** Attack beyond Faraday's current: galvanic current is under 30 % of the loss outdoors. */
   LOCAL_ATTACK("local-attack", "x/÷ 1.6", Math.log(1.6)),
@@ -63,7 +65,9 @@ public enum Assumption {
     return spread;
   }
 
-  /** One standard deviation of the natural logarithm; 0 where the part or the air brings its own. */
+  /**
+   * One standard deviation of the natural logarithm; 0 where the part or the air brings its own.
+   */
   public double lnSpread() {
     return lnSpread;
   }

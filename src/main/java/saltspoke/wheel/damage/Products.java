@@ -12,8 +12,8 @@ public final class Products {
   public static final double THREAD_GAP_UM = 60;
 
   /**
-   * Room between nipple body and rim hole at the seat that product must fill before the nipple
-   * jams in the rim, µm. ASSUMPTION: half of 4.5 mm hole less 4.0 mm body; same spread.
+   * Room between nipple body and rim hole at the seat that product must fill before the nipple jams
+   * in the rim, µm. ASSUMPTION: half of 4.5 mm hole less 4.0 mm body; same spread.
    */
   public static final double SEAT_GAP_UM = 250;
 
@@ -51,13 +51,14 @@ public final class Products {
       case CARBON_STEEL -> 10;
       case BRASS, NICKEL, NICKEL_ALUMINIUM_BRONZE -> 15;
       case ZINC -> 10;
-      case STAINLESS, STAINLESS_PH, TITANIUM, PLATINUM, CARBON_FIBRE, POLYMER -> Double.POSITIVE_INFINITY;
+      case STAINLESS, STAINLESS_PH, TITANIUM, PLATINUM, CARBON_FIBRE, POLYMER ->
+          Double.POSITIVE_INFINITY;
     };
   }
 
   /**
-   * Uniform loss of an open surface at which it looks attacked, µm: dull brass, bloom on
-   * aluminium, rust. ASSUMPTION, same spread.
+   * Uniform loss of an open surface at which it looks attacked, µm: dull brass, bloom on aluminium,
+   * rust. ASSUMPTION, same spread.
    */
   public static double visibleInOpenUm(Material material) {
     return switch (material) {

@@ -5,8 +5,8 @@ package saltspoke.wheel.damage;
  * service.
  *
  * <p>Damage done in the first three months counts twice: pits grow 1.5 to 2.5 times deeper when
- * exposure starts in winter (Carter and Campbell). Whoever builds into a mild season so gains twice,
- * and more hours of a film never lengthen a life.
+ * exposure starts in winter (Carter and Campbell). Whoever builds into a mild season so gains
+ * twice, and more hours of a film never lengthen a life.
  */
 public final class SeasonalDose implements DoseCurve {
   /** Months of the start that count more. ASSUMPTION: one season. */

@@ -72,8 +72,7 @@ public final class Sites {
     return sites;
   }
 
-  private void add(
-      List<Site> sites, Parts parts, Couple couple, WheelYear year, double wetShare) {
+  private void add(List<Site> sites, Parts parts, Couple couple, WheelYear year, double wetShare) {
     boolean thread = couple.where() == Couple.Where.THREAD;
     double factor = Calibration.RATE * (thread ? access(profile.threadCompound()) : 1);
     FilmLoss bare = loss(year, couple.spec());
@@ -155,8 +154,7 @@ public final class Sites {
       case "nipple" -> parts.nipple().coating();
       case "rim" -> parts.rim().coating();
       case "spoke" -> parts.spoke().coating();
-      default -> new Coating(
-          Coating.Kind.NONE, 0, couple.bareShare(), couple.bareShare());
+      default -> new Coating(Coating.Kind.NONE, 0, couple.bareShare(), couple.bareShare());
     };
   }
 
@@ -198,17 +196,11 @@ public final class Sites {
     double driven = loss.galvanicShare() + loss.localShare();
     double self = 1 - driven;
     set(ln, Assumption.ACTIVE_SHARE, driven * ACTIVE_ELASTICITY * lnSpread(couple.activeShare()));
-    set(
-        ln,
-        Assumption.SEAT_BARE,
-        (self + driven * RING_ELASTICITY) * lnSpread(couple.bareShare()));
+    set(ln, Assumption.SEAT_BARE, (self + driven * RING_ELASTICITY) * lnSpread(couple.bareShare()));
     set(ln, Assumption.CATHODE_SPEED, driven * Assumption.CATHODE_SPEED.lnSpread());
     set(ln, Assumption.LOCAL_ATTACK, loss.localShare() * Assumption.LOCAL_ATTACK.lnSpread());
     set(ln, Assumption.WET_HOURS, Assumption.WET_HOURS.lnSpread());
-    set(
-        ln,
-        Assumption.SALT_STORE,
-        Assumption.SALT_ELASTICITY * Assumption.SALT_STORE.lnSpread());
+    set(ln, Assumption.SALT_STORE, Assumption.SALT_ELASTICITY * Assumption.SALT_STORE.lnSpread());
     set(ln, Assumption.THREAD_ACCESS, thread ? Assumption.THREAD_ACCESS.lnSpread() : 0);
     set(ln, Assumption.CALIBRATION, Assumption.CALIBRATION.lnSpread());
     return ln;
