@@ -19,23 +19,23 @@ public final class Products {
 
   /**
    * Share of the seizing loss at which a thread already turns stiff and shows product at its mouth.
-   * ASSUMPTION 0.3, spread in {@link Assumption#VISIBLE_DEPTH}.
+   * ASSUMPTION 0.25, half its spread in {@link Assumption#VISIBLE_DEPTH}.
    */
-  public static final double STIFF_SHARE = 0.3;
+  public static final double STIFF_SHARE = 0.25;
 
   private Products() {}
 
   /**
    * Volume of product over volume of metal, from molar volumes (computed from densities recalled
-   * from memory): Al(OH)3 32 over 10.0 cm³; iron oxyhydroxide 21 over 7.1; brass in chloride: basic
-   * chlorides of copper and zinc, 3 to 4; zinc hydroxide chloride 3.
+   * from memory): Al(OH)3 32 over 10.0 cm³; iron oxyhydroxide 21 over 7.1; brass in chloride: Cu2(OH)3Cl
+   * 28.3 per copper over 7.1 and Zn5(OH)8Cl2·H2O 33 per zinc over 9.2, together 3.9.
    */
   static double volumeRatio(Material material) {
     return switch (material) {
       case ALUMINIUM_WROUGHT, ALUMINIUM_HIGH_STRENGTH -> 3.2;
       case CARBON_STEEL -> 3.0;
-      case BRASS, NICKEL, NICKEL_ALUMINIUM_BRONZE -> 3.5;
-      case ZINC -> 3.0;
+      case BRASS, NICKEL, NICKEL_ALUMINIUM_BRONZE -> 3.9;
+      case ZINC -> 3.6;
       case STAINLESS, STAINLESS_PH, TITANIUM, PLATINUM, CARBON_FIBRE, POLYMER -> 1;
     };
   }
