@@ -19,13 +19,18 @@ final class FilmBins {
   private static final double LEAST_HOURS = 0.01;
 
   private final SaltMix salt;
+  private final double leastUm;
   private final double[] hours = new double[2 * CLASSES];
   private final double[] rhHours = new double[2 * CLASSES];
   private final double[] degreeHours = new double[2 * CLASSES];
   private final List<FilmHours> liquid = new ArrayList<>();
 
-  FilmBins(SaltMix salt) {
+  /**
+   * @param leastUm films thinner than this are left out as dry
+   */
+  FilmBins(SaltMix salt, double leastUm) {
     this.salt = salt;
+    this.leastUm = leastUm;
   }
 
   /** Hours in air of this kind, with the sodium chloride dissolved or not. */
@@ -62,8 +67,8 @@ final class FilmBins {
     return films;
   }
 
-  private static void add(List<FilmHours> films, Film film, double filmHours) {
-    if (film.thicknessUm() > 0) {
+  private void add(List<FilmHours> films, Film film, double filmHours) {
+    if (film.thicknessUm() >= leastUm) {
       films.add(new FilmHours(film, filmHours));
     }
   }

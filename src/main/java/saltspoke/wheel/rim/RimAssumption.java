@@ -30,9 +30,10 @@ public enum RimAssumption {
   /** Salt that stays behind when the water it is dissolved in drains away. */
   SALT_RETENTION("salt-retention", "1", 0.2, 0.5, 0.8),
   /**
-   * Salt that an hour of fresh rain on a ridden wheel takes from a seat, share of what is there.
+   * Share of the water in an open seat's crevice, and of what is dissolved in it, that an hour of
+   * riding in the wet exchanges for the road's water, fresh or salted.
    */
-  WASHED_PER_RAIN_HOUR("rain-wash", "1/h", 0.003, 0.01, 0.03),
+  WASHED_PER_RAIN_HOUR("rain-wash", "1/h", 0.006, 0.02, 0.06),
   /** Salt that one rinse takes from a seat, share of what is there. */
   WASHED_PER_RINSE("rinse-wash", "1", 0.05, 0.15, 0.4),
   /** Share of that washing which reaches a seat hidden inside the rim. */
@@ -59,6 +60,13 @@ public enum RimAssumption {
   SALT_LIES_DAYS("salt-lies", "d", 1.5, 3, 7),
   /** Chloride that an hour of hard indoor riding drips on a seat. */
   SWEAT_MG_PER_M2_HOUR("sweat", "mg/(m2 h)", 0.5, 2, 8),
+  /** Share of indoor riding in which a seat open to the outside is wet with sweat. */
+  SWEAT_WET_SHARE("sweat-wet", "1", 0.05, 0.15, 0.4),
+  /**
+   * Thinnest brine that counts as a film: less salt lies as separate droplets that carry no current
+   * from nipple to rim.
+   */
+  CONTINUOUS_FILM_UM("continuous-film", "um", 0.3, 1, 2.5),
   /** Length of a ride. */
   RIDE_HOURS("ride-length", "h", 0.5, 1, 2.5),
   /** Share of riding hours in the wet on a day with at least 1 mm of rain. */

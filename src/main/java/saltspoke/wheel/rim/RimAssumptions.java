@@ -25,8 +25,8 @@ public final class RimAssumptions {
 
   /** The same set with one value replaced. */
   public RimAssumptions with(RimAssumption assumption, double value) {
-    if (!(value >= 0 && Double.isFinite(value))) {
-      throw new IllegalArgumentException(assumption.id() + " is a number of at least 0");
+    if (!(value > 0 && Double.isFinite(value))) {
+      throw new IllegalArgumentException(assumption.id() + " is a number above 0");
     }
     double[] copy = values.clone();
     copy[assumption.ordinal()] = value;

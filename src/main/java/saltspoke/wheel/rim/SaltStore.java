@@ -10,11 +10,11 @@ import saltspoke.wheel.WheelBuild;
 
 /**
  * Chloride at the nipple seats by kind, month by month through a settled year. In: sea salt from
- * the air where the wheel is kept and where it is ridden, salted road water that gets into the rim,
- * sweat. Out: with draining water (less what stays behind), washed off by rain on rides and by
- * rinses, and slowly with dust. The store S of a kind follows dS/dt = in − r·S with monthly in and
- * r, solved exactly within each month; the year that repeats itself is found in closed form, since
- * the equation is linear.
+ * the air where the wheel is kept and where it is ridden, salted road water that gets into the rim
+ * and into the crevice of an open seat, sweat. Out: with draining water (less what stays behind),
+ * washed off by rain on rides and by rinses, and slowly with dust. The store S of a kind follows
+ * dS/dt = in − r·S with monthly in and r, solved exactly within each month; the year that repeats
+ * itself is found in closed form, since the equation is linear.
  */
 final class SaltStore {
   /** Chloride's share of sodium chloride's mass (computed from atomic masses). */
@@ -94,15 +94,19 @@ final class SaltStore {
         capture
             * (keptDays * air * shelter(profile.storage(), a)
                 + rides.rideHours() / 24 * riddenAir * a.get(RimAssumption.MOVING_FACTOR));
-    double saltedWaterG =
-        rides.wetRideHours() * rides.saltedShare() * WaterStore.perWetHourG(build, a);
+    double waterGPerM2Hour = WaterStore.perWetHourG(build, a) / a.get(RimAssumption.WETTED_BED_M2);
+    if (!build.hiddenNipples()) {
+      // 1 µm of water is 1 g/m².
+      waterGPerM2Hour +=
+          a.get(RimAssumption.CREVICE_FILM_UM) * a.get(RimAssumption.WASHED_PER_RAIN_HOUR);
+    }
     double road =
         1000
-            * saltedWaterG
-            * rides.brinePct()
-            / 100
-            * CHLORIDE_OF_NACL
-            / a.get(RimAssumption.WETTED_BED_M2);
+            * rides.wetRideHours()
+            * rides.saltedShare()
+            * waterGPerM2Hour
+            * (rides.brinePct() / 100)
+            * CHLORIDE_OF_NACL;
     double sweat =
         rides.trainerHours()
             * a.get(RimAssumption.SWEAT_MG_PER_M2_HOUR)

@@ -98,7 +98,7 @@ public final class WheelWeather {
       WaterStore water,
       SaltStore salt) {
     SaltMix mix = salt.months.get(m);
-    FilmBins bins = new FilmBins(mix);
+    FilmBins bins = new FilmBins(mix, a.get(RimAssumption.CONTINUOUS_FILM_UM));
     double keptHours = Calendar.hours(m) - rides.rideHours();
     double bedM2 = a.get(RimAssumption.WETTED_BED_M2);
     double freeGPerM2 = water.meanWhileWetG(m) / bedM2;
@@ -153,7 +153,8 @@ public final class WheelWeather {
     double rain = profile.storage() == Storage.OPEN ? outside.wetDays() : 0;
     double rainHours = rain * a.get(RimAssumption.RAIN_HOURS_PER_WET_DAY);
     // Wettings fall at random, so the chance of none in the time one lasts is exponential.
-    double lasting = (wettings(outside, rides) * each + rainHours) / keptHours;
+    double sweatHours = rides.trainerHours() * a.get(RimAssumption.SWEAT_WET_SHARE);
+    double lasting = (wettings(outside, rides) * each + rainHours + sweatHours) / keptHours;
     return -Math.expm1(-lasting);
   }
 
