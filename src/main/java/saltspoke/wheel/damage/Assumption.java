@@ -24,6 +24,8 @@ public enum Assumption {
   SALT_STORE("salt-store", "x/÷ 2", Math.log(2)),
   /** Share of the film's attack that reaches the thread past compound and fit. */
   THREAD_ACCESS("thread-access", "x/÷ 1.6", Math.log(1.6)),
+  /** Wear of a tensioned thread per hour of riding. */
+  FRETTING("fretting", "x/÷ 1.7", Math.log(1.7)),
   /** Room that product must fill before a nipple will not turn. */
   SEIZING_GAP("seizing-gap", "x/÷ 1.4", Math.log(1.4)),
   /** Loss at which attack is seen. */

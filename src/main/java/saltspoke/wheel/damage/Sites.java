@@ -79,8 +79,13 @@ public final class Sites {
     double wetShare =
         year.months().stream().mapToDouble(WheelYear.Month::wetHours).sum()
             / FilmLoss.HOURS_PER_YEAR;
+    boolean nippleThread = false;
     for (Couple couple : SpokeHole.couples(parts)) {
       add(sites, parts, couple, year, wetShare);
+      nippleThread |= wornThread(couple);
+    }
+    if (!nippleThread) {
+      dryThread(parts).ifPresent(sites::add);
     }
     openAir(parts).ifPresent(sites::add);
     return sites;
@@ -93,7 +98,9 @@ public final class Sites {
     Maturity maturity = thread ? threadMaturity(profile.threadCompound()) : SEAT;
     FilmLoss bare = loss(year, couple.spec());
     double share = couple.bareShare().median();
-    DoseCurve dose = new SeasonalDose(bare.scaled(factor * share), buildMonth, winter, maturity);
+    double[] monthly = bare.scaled(factor * share);
+    double worn = wornThread(couple) ? addWear(monthly, couple.metal()) : 0;
+    DoseCurve dose = new SeasonalDose(monthly, buildMonth, winter, maturity);
     Coating coating = coatingOf(parts, couple);
     double through = CoatingLife.months(coating, wetShare);
     if (share < 1 && Double.isFinite(through)) {
@@ -108,7 +115,7 @@ public final class Sites {
     double delay = couple.delayMonths(wetShare);
     DoseCurve unshielded = dose;
     dose = dose.after(delay);
-    double[] ln = shifts(couple, bare, thread);
+    double[] ln = shifts(couple, bare, thread, worn);
     set(ln, Assumption.COATING_LIFE, coatingShift(dose, unshielded, through, delay));
     sites.add(
         new Site(
@@ -116,12 +123,56 @@ public final class Sites {
             thread ? "thread" : "seat",
             couple.metal(),
             dose,
-            bare.scaled(factor * share),
+            monthly,
             thread
                 ? seized(parts, couple) * Products.STIFF_SHARE
                 : Products.visibleAtSeatUm(couple.metal()),
             seized(parts, couple),
             lost(parts, couple),
+            ln));
+  }
+
+  private static boolean wornThread(Couple couple) {
+    return couple.where() == Couple.Where.THREAD && couple.part().equals("nipple");
+  }
+
+  /** Adds a thread's wear to its corrosion; gives the share of the sum that is wear. */
+  private double addWear(double[] monthlyUm, Material metal) {
+    double access = access(profile.threadCompound());
+    double[] wear = Fretting.monthlyUm(metal, profile);
+    double worn = 0;
+    double all = 0;
+    for (int m = 0; m < 12; m++) {
+      monthlyUm[m] += access * wear[m];
+      worn += access * wear[m];
+      all += monthlyUm[m];
+    }
+    return all > 0 ? worn / all : 0;
+  }
+
+  /** A thread that does not corrode still wears and galls. */
+  private Optional<Site> dryThread(Parts parts) {
+    Material metal = parts.nipple().material();
+    if (Fretting.relative(metal) == 0) {
+      return Optional.empty();
+    }
+    double[] monthly = new double[12];
+    addWear(monthly, metal);
+    double[] ln = new double[Assumption.values().length];
+    set(ln, Assumption.FRETTING, Assumption.FRETTING.lnSpread());
+    set(ln, Assumption.THREAD_ACCESS, Assumption.THREAD_ACCESS.lnSpread());
+    double seized = Fretting.toFillUm(metal);
+    return Optional.of(
+        new Site(
+            "nipple",
+            "galling",
+            metal,
+            new SeasonalDose(
+                monthly, buildMonth, new double[12], threadMaturity(profile.threadCompound())),
+            monthly,
+            Double.POSITIVE_INFINITY,
+            seized,
+            Double.POSITIVE_INFINITY,
             ln));
   }
 
@@ -154,15 +205,14 @@ public final class Sites {
   }
 
   /**
-   * Share of the film's attack that reaches the thread in the end. ASSUMPTION: all but a fifth on
-   * dry or once oiled threads; what is left of grease and of a filled paste keeps half and two
-   * thirds of it out; spread in {@link Assumption#THREAD_ACCESS}.
+   * Share of the film's attack that reaches the thread in the end. ASSUMPTION: all of it on dry or
+   * once oiled threads; what is left of grease and of a filled paste keeps two and three fifths out; spread in {@link Assumption#THREAD_ACCESS}.
    */
   private static double access(ThreadCompound compound) {
     return switch (compound) {
-      case NONE, OIL -> 0.8;
-      case GREASE -> 0.5;
-      case ANTI_SEIZE -> 0.33;
+      case NONE, OIL -> 1;
+      case GREASE -> 0.6;
+      case ANTI_SEIZE -> 0.4;
     };
   }
 
@@ -248,7 +298,7 @@ public final class Sites {
     return Double.POSITIVE_INFINITY;
   }
 
-  private static double[] shifts(Couple couple, FilmLoss loss, boolean thread) {
+  private static double[] shifts(Couple couple, FilmLoss loss, boolean thread, double worn) {
     double[] ln = new double[Assumption.values().length];
     double driven = loss.galvanicShare() + loss.localShare();
     double self = 1 - driven;
@@ -269,8 +319,12 @@ public final class Sites {
         ln,
         Assumption.SALT_STORE,
         Assumption.SALT_ELASTICITY * Assumption.SALT_STORE.lnSpread());
-    set(ln, Assumption.THREAD_ACCESS, thread ? Assumption.THREAD_ACCESS.lnSpread() : 0);
     set(ln, Assumption.CALIBRATION, Assumption.CALIBRATION.lnSpread());
+    for (int k = 0; k < ln.length; k++) {
+      ln[k] *= 1 - worn;
+    }
+    set(ln, Assumption.FRETTING, worn * Assumption.FRETTING.lnSpread());
+    set(ln, Assumption.THREAD_ACCESS, thread ? Assumption.THREAD_ACCESS.lnSpread() : 0);
     return ln;
   }
 
