@@ -26,7 +26,8 @@ public final class FrancePostcodesBuilder implements LayerBuilder {
     Map<String, GeonamesCities.City> byInsee = new HashMap<>();
     for (GeonamesCities.City city : GeonamesCities.read(in)) {
       if (city.country().equals("FR") && !city.admin4().isEmpty()) {
-        byInsee.merge(city.admin4(), city, (a, b) -> a.population() >= b.population() ? a : b);
+        byInsee.merge(
+            city.admin4(), city, (a, b) -> a.population() >= b.population() ? a : b);
       }
     }
     Map<String, String> regions = PostcodeTable.regionNames(in);
@@ -37,7 +38,8 @@ public final class FrancePostcodesBuilder implements LayerBuilder {
           json,
           row -> {
             String code = row.get("codePostal");
-            municipalities.merge(code, 1, Integer::sum);
+            boolean district = !wholeCity(row.get("codeCommune")).equals(row.get("codeCommune"));
+            municipalities.merge(code, district ? 2 : 1, Integer::sum);
             GeonamesCities.City city = byInsee.get(wholeCity(row.get("codeCommune")));
             if (city != null) {
               best.merge(code, city, (a, b) -> a.population() >= b.population() ? a : b);
