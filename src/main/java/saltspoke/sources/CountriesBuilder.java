@@ -12,9 +12,27 @@ import java.util.TreeMap;
 public final class CountriesBuilder implements LayerBuilder {
   /** Names by code that Natural Earth's regions lack or give with another word than is usual. */
   private static final Map<String, String> NAMES_SET =
-      Map.of("US", "United States", "HK", "Hong Kong", "MO", "Macao", "XK", "Kosovo",
-          "TZ", "Tanzania", "RS", "Serbia", "GF", "French Guiana", "RE", "Réunion",
-          "GP", "Guadeloupe", "MQ", "Martinique");
+      Map.of(
+          "US",
+          "United States",
+          "HK",
+          "Hong Kong",
+          "MO",
+          "Macao",
+          "XK",
+          "Kosovo",
+          "TZ",
+          "Tanzania",
+          "RS",
+          "Serbia",
+          "GF",
+          "French Guiana",
+          "RE",
+          "Réunion",
+          "GP",
+          "Guadeloupe",
+          "MQ",
+          "Martinique");
 
   @Override
   public String id() {

@@ -201,12 +201,23 @@ public record GeoTiffRaster(
         int pixels = Math.min(rowsPerStrip, rows - firstRow) * columns;
         ByteBuffer data =
             unpack((int) offsets[strip], (int) lengths[strip], pixels * perPixel * (bits / 8));
-        int plane = planes ? strip / stripsPerPlane : 0;
-        for (int i = 0; i < pixels; i++) {
+        float[] samples = numbers(data, pixels * perPixel, bits, format);
+        int start = firstRow * columns;
+        if (perPixel == 1) {
+          System.arraycopy(samples, 0, bands[strip / stripsPerPlane], start, pixels);
+        } else {
           for (int b = 0; b < perPixel; b++) {
-            bands[plane + b][firstRow * columns + i] = sample(data, bits, format);
+            pick(samples, b, perPixel, bands[b], start, pixels);
           }
         }
+      }
+    }
+
+    /** Every {@code step}-th sample from {@code first} on. */
+    private static void pick(
+        float[] samples, int first, int step, float[] band, int start, int count) {
+      for (int i = 0, from = first; i < count; i++, from += step) {
+        band[start + i] = samples[from];
       }
     }
 
@@ -236,17 +247,26 @@ public record GeoTiffRaster(
       return ByteBuffer.wrap(plain).order(in.order());
     }
 
-    private static float sample(ByteBuffer data, int bits, int format) {
+    private static float[] numbers(ByteBuffer data, int count, int bits, int format) {
+      float[] numbers = new float[count];
       if (bits == 32 && format == 3) {
-        return data.getFloat();
+        data.asFloatBuffer().get(numbers);
+      } else if (bits == 16 && format != 3) {
+        short[] words = new short[count];
+        data.asShortBuffer().get(words);
+        int mask = format == 2 ? -1 : 0xFFFF;
+        for (int i = 0; i < count; i++) {
+          numbers[i] = words[i] & mask;
+        }
+      } else if (bits == 8 && format == 1) {
+        byte[] octets = data.array();
+        for (int i = 0; i < count; i++) {
+          numbers[i] = octets[i] & 0xFF;
+        }
+      } else {
+        throw new IllegalArgumentException(bits + " bits, sample format " + format);
       }
-      if (bits == 16 && format != 3) {
-        return format == 2 ? data.getShort() : Short.toUnsignedInt(data.getShort());
-      }
-      if (bits == 8 && format == 1) {
-        return Byte.toUnsignedInt(data.get());
-      }
-      throw new IllegalArgumentException(bits + " bits, sample format " + format);
+      return numbers;
     }
   }
 }

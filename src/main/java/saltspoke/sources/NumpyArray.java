@@ -88,6 +88,17 @@ public record NumpyArray(int[] shape, double[] values) {
     return new NumpyArray(shape, values);
   }
 
+  /** Values of a matrix without the outermost rows and columns. */
+  public double[] inner(int margin) {
+    int rows = shape[0] - 2 * margin;
+    int columns = shape[1] - 2 * margin;
+    double[] inner = new double[rows * columns];
+    for (int row = 0; row < rows; row++) {
+      System.arraycopy(values, (row + margin) * shape[1] + margin, inner, row * columns, columns);
+    }
+    return inner;
+  }
+
   private static Refusal refuse(String name, String was, String expected) {
     return Refusal.dataDamaged("not-a-numpy-array", name, was, expected);
   }
