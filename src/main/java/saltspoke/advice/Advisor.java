@@ -8,7 +8,7 @@ import saltspoke.values.Note;
 import saltspoke.values.Refusal;
 import saltspoke.wheel.Catalogue;
 import saltspoke.wheel.Pairing;
-import saltspoke.wheel.GalvanicCell;
+import saltspoke.wheel.CellTables;
 import saltspoke.wheel.damage.CellRates;
 import saltspoke.wheel.rim.WheelWeather;
 
@@ -24,7 +24,10 @@ public final class Advisor {
 
   /** An advisor on a catalogue, with the shipped models of wheel weather and cell. */
   public Advisor(Catalogue catalogue) {
-    this(catalogue, WheelWeather::over, GalvanicCell::solve);
+    this(
+        catalogue,
+        WheelWeather::over,
+        CellRates.tabled(new CellTables(CellTables.USUAL_CAPACITY)));
   }
 
   Advisor(Catalogue catalogue, WheelYears weather, CellRates rates) {

@@ -9,7 +9,7 @@ public class Explore {
     return new AdviceRequest(Profiles.shipped().get(profile), WheelBuild.USUAL, rim,nipple,between,spoke,RiskLevel.USUAL,10,0,Finding.NOT_LOOKED,false);
   }
   static Map<String,CellCurrents> cache=new HashMap<>();
-  static CellRates RATES=GalvanicCell::solve;
+  static CellRates RATES=CellRates.tabled(new CellTables(64));
   public static void main(String[] a){
     Catalogue cat=Catalogue.shipped();
     System.out.println("pairings "+cat.pairings().size());
@@ -40,6 +40,9 @@ public class Explore {
         System.out.printf("   %s/%s %s: %.2f um/a (wet-rate %.0f um/a) visible %.1f seized %.1f lost %.1f%n",s.part(),s.cause(),s.metal(),y,y/Math.max(1,wet)*8766,s.visibleUm(),s.seizedUm(),s.lostUm());}
       System.out.printf("   attack %s  seized %s  lost %s%n   first %.2f every %.2f (%s) repl %s by %s%n",t(p.firstAttackMonths()),t(p.seizedMonths()),t(p.headLossMonths()),p.firstLookMonths(),p.everyMonths(),k.interval().everyLimitedBy(),p.replaceByMonths(),p.limitedBy());
     }
+    if(a.length>0){ AdviceRequest r=req("all-winter-commuter",null,null,null,null); AirClimate air=TestClimates.maritimeSalted();
+      for(int i=0;i<8;i++){ long t0=System.nanoTime(); Workshop shop=adv.open(air,r,Draws.of(Draws.SEED),WheelRisk.NIPPLE_SCATTER); long t1=System.nanoTime(); java.util.List<Case> cs=new ArrayList<>(); for(Pairing p:cat.pairings()) cs.add(shop.of(p)); long t2=System.nanoTime(); for(Case c:cs) Answer.of(c,r); long t3=System.nanoTime(); Advice ad=adv.advise(air,r); long t4=System.nanoTime();
+        System.out.printf("weather %.1f cases %.1f answers %.1f  advise %.1f ms%n",(t1-t0)/1e6,(t2-t1)/1e6,(t3-t2)/1e6,(t4-t3)/1e6);} return; }
     WheelYear y=WheelWeather.over(TestClimates.maritimeSalted(),Profiles.shipped().get("all-winter-commuter"),WheelBuild.USUAL);
     for(int m: new int[]{0,6}) for(WheelYear.FilmHours f:y.months().get(m).films()) System.out.println(m+" "+f);
   }

@@ -50,6 +50,7 @@ public final class SpokeHole {
     boolean toRim = Nobility.nobler(rim.material(), nipple.material());
     double radiusMm = rim.holeDiameterMm() / 2;
     Quantiles active = rim.coating().defectShare();
+    Quantiles edge = rim.edgeBareShare();
     CellSpec whole;
     if (toWasher) {
       // The washer stands between and takes the whole drive: nearest, bare, all of it active.
@@ -66,15 +67,17 @@ public final class SpokeHole {
               SEAT_OHM,
               0);
       active = WHOLE;
+      edge = WHOLE;
     } else if (toRim) {
       whole = againstRim(parts, washer);
     } else {
       whole = alone(nipple.material(), radiusMm, nipple.ringCircumferenceMm(), nipple.ringWidthMm());
       active = WHOLE;
+      edge = WHOLE;
     }
     Quantiles bare = nipple.coating().seatBareShare();
     return Optional.of(
-        new Couple("nipple", Couple.Where.SEAT, bareOf(whole, bare.median()), whole, bare, active, null));
+        new Couple("nipple", Couple.Where.SEAT, bareOf(whole, bare.median()), whole, bare, active, edge, null));
   }
 
   private static CellSpec againstRim(Parts parts, Optional<Material> washer) {
@@ -137,7 +140,7 @@ public final class SpokeHole {
             : alone(rim.material(), radiusMm, lengthMm, rim.ringWidthMm());
     Quantiles bare = rim.coating().seatBareShare();
     return Optional.of(
-        new Couple("rim", Couple.Where.SEAT, bareOf(whole, bare.median()), whole, bare, WHOLE, null));
+        new Couple("rim", Couple.Where.SEAT, bareOf(whole, bare.median()), whole, bare, WHOLE, WHOLE, null));
   }
 
   private static Optional<Couple> washerAtSeat(Parts parts, Material washer) {
@@ -182,8 +185,9 @@ public final class SpokeHole {
       whole = alone(washer, radiusMm, lengthMm, widthMm);
     }
     Quantiles active = toRim ? rim.coating().defectShare() : WHOLE;
+    Quantiles edge = toRim ? rim.edgeBareShare() : WHOLE;
     return Optional.of(
-        new Couple("interface", Couple.Where.SEAT, whole, whole, WHOLE, active, null));
+        new Couple("interface", Couple.Where.SEAT, whole, whole, WHOLE, active, edge, null));
   }
 
   private static void thread(Parts parts, List<Couple> found) {
@@ -234,6 +238,7 @@ public final class SpokeHole {
             bareOf(whole, bare.median()),
             whole,
             bare,
+            WHOLE,
             WHOLE,
             shield));
   }
