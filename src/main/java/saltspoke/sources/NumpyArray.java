@@ -2,6 +2,7 @@ package saltspoke.sources;
 
 import java.io.ByteArrayInputStream;
 import java.io.DataInputStream;
+import java.io.EOFException;
 import java.io.IOException;
 import java.io.InputStream;
 import java.nio.ByteBuffer;
@@ -47,8 +48,21 @@ public record NumpyArray(int[] shape, double[] values) {
     throw refuse(name, "no .npy member", "a ZIP archive of NumPy arrays");
   }
 
-  /** Reads one array. */
+  /**
+   * Reads one array.
+   *
+   * @param name file name for messages
+   * @throws Refusal when the bytes are no array of this kind
+   */
   public static NumpyArray fromNpy(InputStream in, String name) throws IOException {
+    try {
+      return parse(in, name);
+    } catch (EOFException | IllegalArgumentException | ArithmeticException e) {
+      throw refuse(name, String.valueOf(e.getMessage()), "a complete NumPy array");
+    }
+  }
+
+  private static NumpyArray parse(InputStream in, String name) throws IOException {
     DataInputStream data = new DataInputStream(in);
     byte[] magic = data.readNBytes(MAGIC.length);
     if (!Arrays.equals(magic, MAGIC)) {
