@@ -45,8 +45,8 @@ public final class DataSet {
 
   /**
    * The world that the program answers from: the folder named by the system property {@value
-   * #FOLDER_PROPERTY}; else {@value #FOLDER_NAME} beside the running jar, then in
-   * the working directory, when it holds a manifest; else the copy inside the program.
+   * #FOLDER_PROPERTY}; else {@value #FOLDER_NAME} beside the running jar, then in the working
+   * directory, when it holds a manifest; else the copy inside the program.
    *
    * @throws Refusal naming every missing or damaged file
    */
