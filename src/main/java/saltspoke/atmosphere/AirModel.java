@@ -99,10 +99,18 @@ public final class AirModel {
             place.elevationM(),
             rainMmPerYear);
     List<Double> monthly = new ArrayList<>();
+    double calmestHeld = Double.POSITIVE_INFINITY;
     for (MonthClimate month : months) {
+      if (SaltKernel.heldWind(month.windMPerS()) != month.windMPerS()) {
+        calmestHeld = Math.min(calmestHeld, month.windMPerS());
+      }
       monthly.add(model.monthMgPerM2Day(winds.at(place, month)));
     }
+    if (calmestHeld < Double.POSITIVE_INFINITY) {
+      flags.add(SaltKernel.windHeld(calmestHeld));
+    }
     Quantiles annual = SeaSalt.annual(monthly);
+    ChlorideFromSite.distanceFlag(place.sea().distanceKm()).ifPresent(flags::add);
     double scale = 1;
     double lnSpread = SeaSalt.LN_SPREAD;
     if (overrides.chlorideMgPerM2Day().isPresent()) {

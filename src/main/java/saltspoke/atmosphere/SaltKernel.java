@@ -1,5 +1,8 @@
 package saltspoke.atmosphere;
 
+import java.util.Map;
+import saltspoke.values.Note;
+
 /**
  * How much sea salt one stretch of shore brings to a place, by distance: the one home of the sea
  * salt constants, used by the field form ({@link SeaSalt}) and the site form ({@link
@@ -79,7 +82,27 @@ final class SaltKernel {
    */
   private static final double CREST_KM = 0.7;
 
+  /** Calmest and windiest station of the fit, m/s; beyond them the nearer is used, and flagged. */
+  private static final double FITTED_WIND_FROM_M_PER_S = 1.6;
+
+  private static final double FITTED_WIND_TO_M_PER_S = 8.5;
+
   private SaltKernel() {}
+
+  /** A mean wind held within those of the fitted stations, m/s. */
+  static double heldWind(double meanMPerS) {
+    return Math.max(FITTED_WIND_FROM_M_PER_S, Math.min(FITTED_WIND_TO_M_PER_S, meanMPerS));
+  }
+
+  /** What to say when a wind was held. */
+  static Note windHeld(double meanMPerS) {
+    return new Note(
+        "air-salt-wind-held",
+        Map.of(
+            "windMPerS", Math.round(10 * meanMPerS) / 10.0,
+            "from", FITTED_WIND_FROM_M_PER_S,
+            "to", FITTED_WIND_TO_M_PER_S));
+  }
 
   /** Coarse droplets, mg/(m² d) at the reference wind, before shelter. */
   static double coarseMg(double shoreKm, double fetchKm) {

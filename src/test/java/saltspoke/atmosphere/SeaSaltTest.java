@@ -9,6 +9,7 @@ import java.util.List;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 import saltspoke.places.SeaView;
+import saltspoke.sources.CsvTable;
 import saltspoke.values.Quantiles;
 import saltspoke.values.Refusal;
 
@@ -133,5 +134,34 @@ class SeaSaltTest {
     double calm = ChlorideFromSite.predict(5, 1.5, 0, 0.2, 10).median();
     double windy = ChlorideFromSite.predict(5, 5, 1, 0.2, 10).median();
     assertTrue(calm < 0.5 * windy);
+  }
+
+  @Test
+  void spreadOfDirectionsHoldsOnHourlyWinds() {
+    String[] octants = {"n", "ne", "e", "se", "s", "sw", "w", "nw"};
+    double error = 0;
+    double withoutDirection = 0;
+    List<CsvTable.Row> rows = Reference.rows("tmy-winds/octant-shares.csv");
+    for (CsvTable.Row row : rows) {
+      double speed = row.number("mean_speed");
+      WindMonth wind = new WindMonth(speed, row.number("eastward"), row.number("northward"));
+      for (int o = 0; o < octants.length; o++) {
+        double counted = row.number(octants[o]);
+        error += Math.abs(octant(wind, o) - counted);
+        withoutDirection += Math.abs(octant(WindMonth.fromAllSides(speed), o) - counted);
+      }
+    }
+    int n = rows.size() * octants.length;
+    assertTrue(error / n < 0.04, "mean error of an octant's share: " + error / n);
+    assertTrue(error < 0.8 * withoutDirection, error + " against " + withoutDirection);
+  }
+
+  private static double octant(WindMonth wind, int index) {
+    SectorWind sectors = new SectorWind(wind);
+    double share = 0;
+    for (int i = 0; i < 9; i++) {
+      share += Math.toRadians(5) * sectors.carriedPerRadian(45 * index - 20 + 5 * i, 3, 0, 5);
+    }
+    return share;
   }
 }
