@@ -94,7 +94,7 @@ public final class AirModel {
     SeaSalt model =
         new SeaSalt(
             place.sea(),
-            SaltPaths.crestsAbovePlaceM(place, elevation),
+            SaltPaths.crestsAboveLowAirM(place, elevation),
             SaltPaths.roughness(setting, place.sea().distanceKm()),
             place.elevationM(),
             rainMmPerYear);

@@ -77,8 +77,8 @@ final class SaltKernel {
   private static final double FINE_FETCH_KM = 50;
 
   /**
-   * ASSUMPTION: a crest that stands this much above place and sea lets 37 % of the salt over, km;
-   * spread 0.4–1.2.
+   * ASSUMPTION: a crest that stands this much above the low marine air lets 37 % of the salt over,
+   * km; spread 0.4–1.2.
    */
   private static final double CREST_KM = 0.7;
 
@@ -129,8 +129,8 @@ final class SaltKernel {
   }
 
   /** Share that a crest between sea and place lets over, 0..1. */
-  static double overCrest(double crestAbovePlaceM) {
-    return Math.exp(-Math.max(0, crestAbovePlaceM) / 1000 / CREST_KM);
+  static double overCrest(double crestAboveLowAirM) {
+    return Math.exp(-Math.max(0, crestAboveLowAirM) / 1000 / CREST_KM);
   }
 
   private static double washout(double rainMmPerYear) {

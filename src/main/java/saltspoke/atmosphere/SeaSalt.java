@@ -38,19 +38,19 @@ public final class SeaSalt {
 
   /**
    * @param sea shore, fetch and salinity in 36 directions
-   * @param crestAbovePlaceM per direction, how far land between shore and place rises above the
-   *     place, m, ≥ 0
+   * @param crestAboveLowAirM per direction, how far land up to the shore rises above the low marine
+   *     air, m, ≥ 0
    * @param roughness 0 open water … 0.5 town or forest
    * @param elevationM height of the place, m
    * @param rainMmPerYear rain that washes salt out on the way, mm
    */
   public SeaSalt(
       SeaView sea,
-      double[] crestAbovePlaceM,
+      double[] crestAboveLowAirM,
       double roughness,
       double elevationM,
       double rainMmPerYear) {
-    if (crestAbovePlaceM.length != SeaView.DIRECTIONS) {
+    if (crestAboveLowAirM.length != SeaView.DIRECTIONS) {
       throw new IllegalArgumentException("crests are given for 36 directions");
     }
     double shelter = SaltKernel.shelter(roughness, elevationM);
@@ -60,7 +60,7 @@ public final class SeaSalt {
       if (Double.isInfinite(shoreKm)) {
         continue;
       }
-      double reaching = sea.salinityRatio()[k] * SaltKernel.overCrest(crestAbovePlaceM[k]);
+      double reaching = sea.salinityRatio()[k] * SaltKernel.overCrest(crestAboveLowAirM[k]);
       double fetchKm = sea.fetchKm()[k];
       coarseMg[k] = HALF_PLANE * shelter * reaching * SaltKernel.coarseMg(shoreKm, fetchKm);
       fineMg[k] =
