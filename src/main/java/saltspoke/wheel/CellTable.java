@@ -72,9 +72,7 @@ public final class CellTable {
     private final boolean dry;
     private final AnodeLaw anode;
     private final CathodeLaw cathode;
-    private final double oxygenFactor;
-    private final double limitUAPerCm2;
-    private final double sheetMicroS;
+    private final FilmFactors factors;
     private final double[] anodeOut = new double[2];
     private final double[] cathodeOut = new double[2];
     private final double[] areaOut = new double[2];
@@ -85,12 +83,13 @@ public final class CellTable {
     private InFilm(Film film) {
       this.film = film;
       dry = !(film.thicknessUm() > 0) || spec.anode() == Material.POLYMER;
-      oxygenFactor = Kinetics.oxygenFactor(film);
-      limitUAPerCm2 = dry ? 0 : ThinFilm.oxygenLimitUAPerCm2(film) / oxygenFactor;
-      sheetMicroS = ThinFilm.sheetMicroS(film) / (oxygenFactor * skirtFactor);
-      anode = dry ? null : new AnodeLaw(anodeKinetics, film);
-      cathode = dry || strip == null ? null : new CathodeLaw(cathodeKinetics, limitUAPerCm2);
-      startV = dry ? 0 : anodeKinetics.startV(film);
+      factors = dry ? null : FilmFactors.of(film);
+      anode = dry ? null : new AnodeLaw(anodeKinetics, factors);
+      cathode =
+          dry || strip == null
+              ? null
+              : new CathodeLaw(cathodeKinetics, factors.scaledLimitUAPerCm2());
+      startV = dry ? 0 : anodeKinetics.startV(factors.chlorideMolPerKg());
     }
 
     CellCurrents currents(double ringWidthMm, double cathodeScale) {
@@ -99,7 +98,7 @@ public final class CellTable {
         return GalvanicCell.NOTHING;
       }
       StripTable.Place place =
-          strip == null ? null : StripTable.Place.of(limitUAPerCm2, sheetMicroS / cathodeScale);
+          strip == null ? null : place(cathodeScale);
       double cathodeV = solve(ringCm2, place, cathodeScale);
       double currentUA = place == null ? 0 : cathodeCurrent(place, cathodeScale, cathodeV);
       double anodeV = cathodeV - currentUA * 1e-6 * spec.contactResistanceOhm();
@@ -156,10 +155,16 @@ public final class CellTable {
       return v;
     }
 
+    private StripTable.Place place(double cathodeScale) {
+      return StripTable.Place.of(
+          factors.scaledLimitUAPerCm2(),
+          factors.sheetMicroS() / (factors.oxygen() * skirtFactor * cathodeScale));
+    }
+
     private double cathodeCurrent(StripTable.Place place, double cathodeScale, double v) {
       cathode.at(v, cathodeOut);
       strip.lnArea(place, v, areaOut);
-      return cathodeScale * skirtFactor * oxygenFactor * Math.exp(areaOut[0]) * cathodeOut[0];
+      return cathodeScale * skirtFactor * factors.oxygen() * Math.exp(areaOut[0]) * cathodeOut[0];
     }
   }
 }

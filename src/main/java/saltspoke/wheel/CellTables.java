@@ -50,6 +50,11 @@ public final class CellTables {
     }
   }
 
+  /** Currents of a cell in a film, off the table: {@link GalvanicCell#solve} for many questions. */
+  public CellCurrents at(CellSpec spec, Film film) {
+    return table(spec).currents(film, spec.ringWidthMm(), 1);
+  }
+
   /** Tables held now. */
   public int size() {
     synchronized (tables) {

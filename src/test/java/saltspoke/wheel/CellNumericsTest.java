@@ -78,7 +78,7 @@ class CellNumericsTest {
     Film film = CellFixtures.rain();
     CellCurrents c = GalvanicCell.solve(CellFixtures.nippleOnCarbon(0.05), film);
     double[] out = new double[2];
-    new AnodeLaw(Kinetics.of(Material.ALUMINIUM_WROUGHT), film).at(c.couplePotentialVSce(), out);
+    new AnodeLaw(Kinetics.of(Material.ALUMINIUM_WROUGHT), FilmFactors.of(film)).at(c.couplePotentialVSce(), out);
     assertEquals(out[0], c.galvanicUAPerCm2(), 1e-6 * out[0]);
   }
 
