@@ -60,8 +60,7 @@ public final class GalvanicCell {
       return currents(kinetics, anode, film, restV, 0, spec.ringAreaCm2(), 0);
     }
     double factor = cathodeScale * skirtFactor(spec.skirtMm()) * factors.oxygen();
-    CathodeLaw law =
-        new CathodeLaw(Kinetics.of(spec.cathode()), factors.scaledLimitUAPerCm2());
+    CathodeLaw law = new CathodeLaw(Kinetics.of(spec.cathode()), factors.scaledLimitUAPerCm2());
     FilmStrip strip =
         FilmStrip.joined(
             StripGrid.of(spec, cells),

@@ -41,8 +41,7 @@ public class CellBench {
 
   public CellBench() {
     for (int i = 0; i < FILMS; i++) {
-      films.add(
-          ThinFilm.inEquilibrium(new SaltMix(100, 600, 100, 0), 50 + 0.45 * i, 15 - 0.2 * i));
+      films.add(ThinFilm.inEquilibrium(new SaltMix(100, 600, 100, 0), 50 + 0.45 * i, 15 - 0.2 * i));
     }
   }
 

@@ -161,7 +161,9 @@ class CellPublishedTest {
   void potentialsInFlowingSeaWater() {
     for (CsvTable.Row row : Reference.rows("astm-g82-laque/potentials.csv")) {
       Material metal = Material.valueOf(row.text("material"));
-      double restV = new AnodeLaw(Kinetics.of(metal), FilmFactors.of(CellFixtures.sea(FLOWING_WATER_UM))).restV();
+      double restV =
+          new AnodeLaw(Kinetics.of(metal), FilmFactors.of(CellFixtures.sea(FLOWING_WATER_UM)))
+              .restV();
       assertTrue(
           restV >= row.number("low_v") - 0.005 && restV <= row.number("high_v") + 0.005,
           row.where() + " " + metal + " rests at " + restV);
