@@ -6,6 +6,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Random;
+import java.util.stream.IntStream;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 
@@ -159,5 +160,21 @@ class CellNumericsTest {
     }
     assertEquals(2, tables.size());
     assertEquals(first, tables.table(spec).rate(CellFixtures.shed(80), 0.3, 1), 0);
+  }
+
+  /** Many threads on one cold table get the bits that one thread gets. */
+  @Test
+  void tableServesManyThreads() {
+    CellSpec spec = CellFixtures.nippleOnCarbon(0.02);
+    CellTables shared = new CellTables(1);
+    CellTables own = new CellTables(1);
+    double[] together =
+        IntStream.range(0, 400)
+            .parallel()
+            .mapToDouble(i -> shared.at(spec, CellFixtures.shed(76 + 0.05 * i)).reachMm())
+            .toArray();
+    for (int i = 0; i < together.length; i++) {
+      assertEquals(own.at(spec, CellFixtures.shed(76 + 0.05 * i)).reachMm(), together[i], 0);
+    }
   }
 }
