@@ -73,7 +73,7 @@ public final class Answers {
 
   /** The air at the place of a question. */
   public AirClimate air(PlaceQuestion question) {
-    return airModel.get().at(place(question), new AirOverrides(question.setting()));
+    return airModel.get().at(place(question), AirOverrides.of(question.setting().orElse(null)));
   }
 
   /** Reads both parts of a wheel question and answers it; the profile is named in it. */

@@ -146,8 +146,12 @@ public final class PlaceDirectory {
             .map(gazetteer::hit)
             .filter(h -> h.name().equalsIgnoreCase(chosen.name()) && h.lat() != chosen.lat())
             .limit(3)
-            .map(h -> h.name() + ", " + (h.regionName().isEmpty() ? "" : h.regionName() + ", ")
-                + h.countryName())
+            .map(
+                h ->
+                    h.name()
+                        + ", "
+                        + (h.regionName().isEmpty() ? "" : h.regionName() + ", ")
+                        + h.countryName())
             .toList();
     return others.isEmpty()
         ? Optional.empty()

@@ -1,6 +1,7 @@
 package saltspoke.sources;
 
 import java.io.IOException;
+import java.io.InputStream;
 import java.io.OutputStream;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
@@ -9,16 +10,17 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import org.locationtech.jts.geom.Coordinate;
-import org.locationtech.jts.simplify.DouglasPeuckerSimplifier;
 import org.locationtech.jts.geom.GeometryFactory;
+import org.locationtech.jts.simplify.DouglasPeuckerSimplifier;
 
 /**
  * Builds the coast: land polygons cut at the lines of a 2° grid, in a fine form (as the source has
  * them, about 0.2 km) gathered by 10° tiles, and a coarse form for what is far away. Lakes are
  * land, the Caspian is sea.
  *
- * <p>A row of either table is one bin with its land as well-known text. Rings run counter-clockwise,
- * so that land lies on the left of every edge; edges along a bin's border are cuts and no coast.
+ * <p>A row of either table is one bin with its land as well-known text. Rings run
+ * counter-clockwise, so that land lies on the left of every edge; edges along a bin's border are
+ * cuts and no coast.
  */
 public final class CoastBuilder implements LayerBuilder {
   private static final String PACKAGE = "gmt-gshhg-high";
@@ -50,7 +52,9 @@ public final class CoastBuilder implements LayerBuilder {
     String attribution = in.get(PACKAGE).declared().attribution();
     TiledTableWriter fine = new TiledTableWriter(HEADER);
     StringBuilder coarse = new StringBuilder(HEADER).append('\n');
-    for (GshhgBins.Bin bin : bins) {
+    FreshWaters freshWaters = new FreshWaters();
+    for (GshhgBins.Bin plain : bins) {
+      GshhgBins.Bin bin = freshWaters.addTo(plain);
       fine.row(bin.southDeg(), bin.westDeg(), row(bin, bin.rings(), "%.4f"));
       List<double[]> rings = coarse(bin);
       if (!rings.isEmpty()) {
@@ -68,7 +72,10 @@ public final class CoastBuilder implements LayerBuilder {
             List.of(),
             LICENCE,
             attribution,
-            "changed: level 1 closed per bin, Caspian cut out as sea, coordinates to 0.0001°"));
+            "changed: level 1 closed per bin, Caspian cut out as sea, lakes behind dams added to"
+                + " the land, coordinates to 0.0001°"));
+    licence(out, "lgpl-3.0", "GNU Lesser General Public License 3, for this folder", attribution);
+    licence(out, "gpl-3.0", "GNU General Public License 3, which it builds on", attribution);
     try (OutputStream stream =
         out.file(
             new LayerFile(
@@ -83,6 +90,25 @@ public final class CoastBuilder implements LayerBuilder {
                 "changed: as the fine coast, then Douglas-Peucker to 1.2 km, islands under 5 km"
                     + " across left out"))) {
       stream.write(coarse.toString().getBytes(StandardCharsets.UTF_8));
+    }
+  }
+
+  private static void licence(LayerSink out, String name, String title, String attribution)
+      throws IOException {
+    LayerFile file =
+        new LayerFile(
+            "coast-" + name.substring(0, name.indexOf('-')),
+            "coast-gshhg/" + name + ".txt",
+            title,
+            "",
+            "",
+            List.of(),
+            LICENCE,
+            attribution,
+            "");
+    try (OutputStream stream = out.file(file);
+        InputStream text = CoastBuilder.class.getResourceAsStream(name + ".txt")) {
+      text.transferTo(stream);
     }
   }
 
@@ -138,7 +164,9 @@ public final class CoastBuilder implements LayerBuilder {
     return rings;
   }
 
-  /** Simplifies the parts of a ring that are coast and leaves its cuts along the bin as they are. */
+  /**
+   * Simplifies the parts of a ring that are coast and leaves its cuts along the bin as they are.
+   */
   private record RingSimplifier(GshhgBins.Bin bin) {
     double[] simplify(double[] ring) {
       int n = ring.length / 2 - 1;
@@ -232,7 +260,8 @@ public final class CoastBuilder implements LayerBuilder {
       int at = 0;
       for (Coordinate c : kept) {
         while (scaled[at] != c && !(scaled[at].x == c.x && scaled[at].y == c.y)) {
-          if (out.size() > 0 && distance(out.get(out.size() - 1), points.get(at)) > COARSE_LONGEST_DEG) {
+          if (out.size() > 0
+              && distance(out.get(out.size() - 1), points.get(at)) > COARSE_LONGEST_DEG) {
             out.add(points.get(at));
           }
           at++;

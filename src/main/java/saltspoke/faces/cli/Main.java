@@ -20,6 +20,7 @@ import saltspoke.values.Refusal;
       PlacesCommand.class,
       PairingsCommand.class,
       ServeCommand.class,
+      IngestCommand.class,
       AboutCommand.class,
       HelpCommand.class
     },

@@ -54,13 +54,15 @@ final class PlacesCommand implements Callable<Integer> {
       out.println(
           String.format(
               Locale.ROOT,
-              "%s, %s, %s   %.4f,%.4f   %.0f m   population %,.0f",
+              "%s, %s, %s   %.4f,%.4f   %s   population %,d",
               hit.name(),
               hit.regionName(),
               hit.countryName(),
-              hit.latitudeDeg(),
-              hit.longitudeDeg(),
-              hit.elevationM(),
+              hit.lat(),
+              hit.lon(),
+              hit.elevationM().isPresent()
+                  ? Math.round(hit.elevationM().getAsDouble()) + " m"
+                  : "height unknown",
               hit.population()));
     }
     return ExitCode.DONE;

@@ -18,9 +18,12 @@ public final class PlacesJson {
       entry.put("regionName", hit.regionName());
       entry.put("countryCode", hit.countryCode());
       entry.put("countryName", hit.countryName());
-      Json.number(entry, "latitudeDeg", hit.latitudeDeg());
-      Json.number(entry, "longitudeDeg", hit.longitudeDeg());
-      Json.number(entry, "elevationM", hit.elevationM());
+      Json.number(entry, "latitudeDeg", hit.lat());
+      Json.number(entry, "longitudeDeg", hit.lon());
+      Json.numberOrNull(
+          entry,
+          "elevationM",
+          hit.elevationM().isPresent() ? hit.elevationM().getAsDouble() : null);
       Json.number(entry, "population", hit.population());
     }
     return node;
