@@ -1,7 +1,11 @@
 package saltspoke.wheel;
 
+import java.util.Collections;
+import java.util.LinkedHashMap;
+import java.util.Map;
 import java.util.SortedSet;
 import java.util.TreeSet;
+import saltspoke.values.Refusal;
 
 /**
  * How a bicycle is ridden, washed and kept.
@@ -37,7 +41,42 @@ public record RidingProfile(
     boolean drainHoles,
     ThreadCompound threadCompound,
     Sealant sealant) {
+  /** Share of wet rides that stands for "from the climate". */
+  public static final double FROM_CLIMATE = -1;
+
   public RidingProfile {
-    months = java.util.Collections.unmodifiableSortedSet(new TreeSet<>(months));
+    Map<String, Object> given = new LinkedHashMap<>();
+    given.put("name", name);
+    given.put("title", title);
+    given.put("months", months);
+    given.put("saltedRoads", saltedRoads);
+    given.put("storage", storage);
+    given.put("rinsing", rinsing);
+    given.put("threadCompound", threadCompound);
+    given.put("sealant", sealant);
+    given.forEach(
+        (field, value) -> {
+          if (value == null) {
+            throw Refusal.wrongUse("missing-field", field, "", "a value; see any ready profile");
+          }
+        });
+    if (!name.matches("[a-z0-9]+(-[a-z0-9]+)*") || name.length() > 60) {
+      throw Refusal.wrongUse(
+          "bad-name", "name", name, "up to 60 lower-case letters, digits and single hyphens");
+    }
+    if (title.isBlank() || title.length() > 120) {
+      throw Refusal.wrongUse("bad-title", "title", title, "1 to 120 characters");
+    }
+    for (Integer month : months) {
+      Choice.within("months", month == null ? Double.NaN : month, 1, 12, "");
+    }
+    Choice.within("hoursPerWeek", hoursPerWeek, 0, 60, " h");
+    if (wetRideShare < 0) {
+      wetRideShare = FROM_CLIMATE;
+    }
+    Choice.within("wetRideShare", wetRideShare, -1, 1, ", negative for \"from the climate\"");
+    Choice.within("seaRideShare", seaRideShare, 0, 1, "");
+    Choice.within("trainerHoursPerWeek", trainerHoursPerWeek, 0, 30, " h");
+    months = Collections.unmodifiableSortedSet(new TreeSet<>(months));
   }
 }

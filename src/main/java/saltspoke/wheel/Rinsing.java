@@ -17,4 +17,9 @@ public enum Rinsing {
   public String id() {
     return id;
   }
+
+  /** The choice of that name; refused with the allowed names when there is none. */
+  public static Rinsing of(String id) {
+    return Choice.of("rinsing", id, values(), Rinsing::id);
+  }
 }

@@ -16,4 +16,9 @@ public enum SaltedRoads {
   public String id() {
     return id;
   }
+
+  /** The choice of that name; refused with the allowed names when there is none. */
+  public static SaltedRoads of(String id) {
+    return Choice.of("saltedRoads", id, values(), SaltedRoads::id);
+  }
 }

@@ -16,4 +16,9 @@ public enum Sealant {
   public String id() {
     return id;
   }
+
+  /** The choice of that name; refused with the allowed names when there is none. */
+  public static Sealant of(String id) {
+    return Choice.of("sealant", id, values(), Sealant::id);
+  }
 }

@@ -17,4 +17,9 @@ public enum Storage {
   public String id() {
     return id;
   }
+
+  /** The choice of that name; refused with the allowed names when there is none. */
+  public static Storage of(String id) {
+    return Choice.of("storage", id, values(), Storage::id);
+  }
 }

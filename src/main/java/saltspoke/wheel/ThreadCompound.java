@@ -17,4 +17,9 @@ public enum ThreadCompound {
   public String id() {
     return id;
   }
+
+  /** The choice of that name; refused with the allowed names when there is none. */
+  public static ThreadCompound of(String id) {
+    return Choice.of("threadCompound", id, values(), ThreadCompound::id);
+  }
 }

@@ -10,6 +10,11 @@ package saltspoke.wheel;
  */
 public record WheelBuild(
     int spokeCount, double tensionN, boolean tapeSound, boolean hiddenNipples) {
+  public WheelBuild {
+    Choice.within("spokeCount", spokeCount, 12, 48, "");
+    Choice.within("tensionN", tensionN, 300, 2000, " N");
+  }
+
   /** A common build: 28 spokes at 1100 N (common practice), sound tape, nipples outside. */
   public static final WheelBuild USUAL = new WheelBuild(28, 1100, true, false);
 }

@@ -1,0 +1,40 @@
+package saltspoke.advice;
+
+import java.util.List;
+import saltspoke.wheel.Pairing;
+import saltspoke.wheel.damage.Parts;
+import saltspoke.wheel.damage.Site;
+
+/**
+ * One pairing worked out under one request.
+ *
+ * @param sites its ways of going bad
+ * @param risk chances over time
+ * @param look kind of look that shows it
+ * @param interval the rule's answer
+ */
+record Case(
+    Pairing pairing,
+    Parts parts,
+    List<Site> sites,
+    WheelRisk risk,
+    LookKind look,
+    Interval interval) {
+
+  /** The site that brings a state about first; null when none can. */
+  Site leader(State state) {
+    int i = risk.leader(state);
+    return i < 0 ? null : sites.get(i);
+  }
+
+  /** The site that decides the interval: what seizes first, else what is lost, else what shows. */
+  Site limiting() {
+    for (State state : new State[] {State.SEIZED, State.LOST, State.ATTACKED}) {
+      Site site = leader(state);
+      if (site != null) {
+        return site;
+      }
+    }
+    return null;
+  }
+}

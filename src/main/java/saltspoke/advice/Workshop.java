@@ -1,0 +1,79 @@
+package saltspoke.advice;
+
+import java.util.List;
+import saltspoke.atmosphere.AirClimate;
+import saltspoke.wheel.Catalogue;
+import saltspoke.wheel.Pairing;
+import saltspoke.wheel.RidingProfile;
+import saltspoke.wheel.WheelBuild;
+import saltspoke.wheel.WheelYear;
+import saltspoke.wheel.damage.CellRates;
+import saltspoke.wheel.damage.Parts;
+import saltspoke.wheel.damage.Site;
+import saltspoke.wheel.damage.Sites;
+
+/**
+ * Works out pairings under one air, one profile and one build; what pairings share is worked out
+ * once. Serves one thread.
+ */
+final class Workshop {
+  private final Catalogue catalogue;
+  private final AdviceRequest request;
+  private final WheelYear year;
+  private final Sites sites;
+  private final Draws draws;
+  private final double scatter;
+
+  Workshop(
+      Catalogue catalogue,
+      AirClimate air,
+      AdviceRequest request,
+      WheelYears weather,
+      CellRates rates,
+      Draws draws,
+      double scatter) {
+    this.catalogue = catalogue;
+    this.request = request;
+    this.draws = draws;
+    this.scatter = scatter;
+    RidingProfile profile = request.profile();
+    WheelBuild build = request.build();
+    this.year = weather.over(air, profile, build);
+    this.sites = new Sites(air, profile, build, request.buildMonth(), rates);
+  }
+
+  WheelYear year() {
+    return year;
+  }
+
+  /** The pairing with its chances and its interval. */
+  Case of(Pairing pairing) {
+    Parts parts =
+        new Parts(
+            catalogue.rim(pairing.rim()),
+            catalogue.nipple(pairing.nipple()),
+            catalogue.between(pairing.between()),
+            catalogue.spoke(pairing.spoke()));
+    List<Site> found = sites.of(parts, year);
+    WheelRisk risk =
+        new WheelRisk(found, request.build().spokeCount(), draws, scatter, false);
+    int leader = Math.max(risk.leader(State.SEIZED), risk.leader(State.LOST));
+    LookKind look =
+        LookKind.of(
+            request.build().hiddenNipples(), leader < 0 ? "nipple" : found.get(leader).part());
+    History history =
+        request.ageMonths() <= 0
+            ? History.NEW
+            : new History(
+                request.ageMonths(), request.lastFinding(), look.finds(State.ATTACKED));
+    Interval interval =
+        Interval.of(
+            risk,
+            risk.steady(found),
+            history,
+            RiskLimits.of(request.risk()),
+            look,
+            request.practiceLimits());
+    return new Case(pairing, parts, found, risk, look, interval);
+  }
+}

@@ -1,0 +1,52 @@
+package saltspoke.wheel.damage;
+
+import saltspoke.wheel.CellCurrents;
+import saltspoke.wheel.CellSpec;
+import saltspoke.wheel.WheelYear;
+
+/**
+ * What one cell loses to the films of one year, as mean depth over its bare ring.
+ *
+ * @param monthlyUm loss in January to December, µm
+ * @param galvanicShare share of the loss that is galvanic current, 0..1
+ * @param localShare share that is local attack beyond it, 0..1
+ */
+public record FilmLoss(double[] monthlyUm, double galvanicShare, double localShare) {
+  /** Hours of a year, as the cell's rates count it. */
+  static final double HOURS_PER_YEAR = 8766;
+
+  /** Adds up the year's films. */
+  public static FilmLoss over(WheelYear year, CellSpec spec, CellRates rates) {
+    double[] monthly = new double[12];
+    double galvanic = 0;
+    double local = 0;
+    double all = 0;
+    for (WheelYear.Month month : year.months()) {
+      for (WheelYear.FilmHours film : month.films()) {
+        if (film.hours() <= 0 || film.film().thicknessUm() <= 0) {
+          continue;
+        }
+        CellCurrents now = rates.at(spec, film.film());
+        double um = now.penetrationUmPerYear() * film.hours() / HOURS_PER_YEAR;
+        double driven = Math.max(0, now.galvanicUAPerCm2());
+        double sum = driven + now.selfUAPerCm2() + now.localUAPerCm2();
+        monthly[month.month() - 1] += um;
+        if (sum > 0) {
+          galvanic += um * driven / sum;
+          local += um * now.localUAPerCm2() / sum;
+          all += um;
+        }
+      }
+    }
+    return new FilmLoss(monthly, all > 0 ? galvanic / all : 0, all > 0 ? local / all : 0);
+  }
+
+  /** The same loss times a factor, month by month. */
+  double[] scaled(double factor) {
+    double[] scaled = new double[12];
+    for (int i = 0; i < 12; i++) {
+      scaled[i] = monthlyUm[i] * factor;
+    }
+    return scaled;
+  }
+}
