@@ -3,6 +3,7 @@ package saltspoke.places;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import net.sf.geographiclib.Geodesic;
@@ -75,16 +76,23 @@ final class PlaceAssembly {
     Point point = new Point(latitudeDeg, longitudeDeg);
     if (!coast.isLand(latitudeDeg, longitudeDeg)) {
       Coast.Shore shore = coast.nearest(latitudeDeg, longitudeDeg);
-      if (shore.distanceKm() > PlaceDirectory.SHORE_REACH_KM) {
+      if (shore.distanceKm() <= PlaceDirectory.SHORE_REACH_KM) {
+        point = movedTo(shore, flags);
+      } else if (nearestTown(point, PlaceDirectory.SHORE_REACH_KM).isPresent()) {
+        flags.add(Note.of("place-missing-from-coast", "distanceKm", shore.distanceKm()));
+      } else {
         throw new Refusal(
             Refusal.Kind.OUT_OF_RANGE,
             "at-sea",
             "at",
             String.format(
-                "%s,%s, %.1f km from land", latitudeDeg, longitudeDeg, shore.distanceKm()),
+                Locale.ROOT,
+                "%s,%s, %.1f km from land",
+                latitudeDeg,
+                longitudeDeg,
+                shore.distanceKm()),
             "a point on land, or at most 2 km off the shore");
       }
-      point = movedTo(shore, flags);
     }
     Named named =
         nearestTown(point, NAMING_REACH_KM)

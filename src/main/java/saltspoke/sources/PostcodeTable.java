@@ -42,7 +42,7 @@ final class PostcodeTable {
             text.append(
                 String.format(
                     Locale.ROOT,
-                    "%s,%s,%s,%.3f,%.3f,%s%n",
+                    "%s,%s,%s,%.3f,%.3f,%s\n",
                     code,
                     GazetteerBuilder.cell(r.name),
                     GazetteerBuilder.cell(r.region),
@@ -50,7 +50,7 @@ final class PostcodeTable {
                     r.lon,
                     r.approximate ? "yes" : "no")));
     try (OutputStream stream = out.file(file)) {
-      stream.write(text.toString().replace("\r\n", "\n").getBytes(StandardCharsets.UTF_8));
+      stream.write(text.toString().getBytes(StandardCharsets.UTF_8));
     }
   }
 

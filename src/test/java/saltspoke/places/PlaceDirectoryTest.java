@@ -144,6 +144,14 @@ class PlaceDirectoryTest {
   }
 
   @Test
+  void atollsThatTheCoastMapLacksAreBelieved() {
+    Place male = PLACES.at(4.1752, 73.5092, PlaceOverrides.NONE);
+    assertEquals("place-missing-from-coast", male.flags().get(0).code());
+    assertEquals(0, male.sea().distanceKm());
+    assertEquals("MV", male.countryCode());
+  }
+
+  @Test
   void coordinatesLearnTheirCountryAndNeighbours() {
     Place place = PLACES.at(47.37, 8.54, PlaceOverrides.NONE);
     assertEquals("CH", place.countryCode());
