@@ -39,7 +39,9 @@ final class Evidence {
     return lnWeight;
   }
 
-  /** Chance, given the finding, that the wheel is still free of a state whose threshold is now z. */
+  /**
+   * Chance, given the finding, that the wheel is still free of a state whose threshold is now z.
+   */
   double freeShare(State state, double z) {
     double missed = 1 - history.chanceToSee();
     double lnJoint =
@@ -51,8 +53,7 @@ final class Evidence {
                   lnAll(Math.min(z, zeta[1]), nipples),
                   missed);
           case POWDER ->
-              lnLess(
-                  lnAll(Math.min(z, zeta[1]), nipples), lnAll(Math.min(z, zeta[0]), nipples));
+              lnLess(lnAll(Math.min(z, zeta[1]), nipples), lnAll(Math.min(z, zeta[0]), nipples));
           case ONE_STIFF -> lnJointStiff(state, z);
         };
     return Math.min(1, Math.exp(lnJoint - lnWeight));

@@ -8,11 +8,11 @@ import saltspoke.wheel.damage.Site;
  * The chance that a wheel has reached a state, its worst nipple deciding.
  *
  * <p>In each draw all nipples share the drawn assumptions (that is their correlation) and each has
- * a scatter of its own: nipple j loses exp(σ·z_j) times the median. A nipple is then in a state from
- * the time on at which z_j passes a threshold ζ = min over sites of (ln limit − ln dose)/σ, and a
- * wheel of N nipples is still free of it with chance Φ(ζ)^N. Chances are means over the draws. With
- * the scatter below and a common spread of ln 2 to ln 3 the correlation of ln life between two
- * nipples of a wheel is 0.7 to 0.85.
+ * a scatter of its own: nipple j loses exp(σ·z_j) times the median. A nipple is then in a state
+ * from the time on at which z_j passes a threshold ζ = min over sites of (ln limit − ln dose)/σ,
+ * and a wheel of N nipples is still free of it with chance Φ(ζ)^N. Chances are means over the
+ * draws. With the scatter below and a common spread of ln 2 to ln 3 the correlation of ln life
+ * between two nipples of a wheel is 0.7 to 0.85.
  */
 final class WheelRisk {
   /**
@@ -91,7 +91,7 @@ final class WheelRisk {
           double limit = limit(sites.get(i), state);
           found[state.ordinal()][i][n] =
               Double.isFinite(limit)
-                  ? (Math.log(limit) + limitShift(state, z) - moved) / scatter
+                  ? (Math.log(limit) + limitShift(sites.get(i), state, z) - moved) / scatter
                   : Double.POSITIVE_INFINITY;
         }
       }
@@ -107,14 +107,15 @@ final class WheelRisk {
     };
   }
 
-  private static double limitShift(State state, double[] z) {
-    Assumption of =
-        switch (state) {
-          case ATTACKED -> Assumption.VISIBLE_DEPTH;
-          case SEIZED -> Assumption.SEIZING_GAP;
-          case LOST -> Assumption.HEAD_MARGIN;
-        };
-    return z[of.ordinal()] * of.lnSpread();
+  /** What shows at a thread is part of what seizes it, so both limits move together there. */
+  private static double limitShift(Site site, State state, double[] z) {
+    double gap = z[Assumption.SEIZING_GAP.ordinal()] * Assumption.SEIZING_GAP.lnSpread();
+    double visible = z[Assumption.VISIBLE_DEPTH.ordinal()] * Assumption.VISIBLE_DEPTH.lnSpread();
+    return switch (state) {
+      case ATTACKED -> site.cause().equals("thread") ? gap + visible / 2 : visible;
+      case SEIZED -> gap;
+      case LOST -> z[Assumption.HEAD_MARGIN.ordinal()] * Assumption.HEAD_MARGIN.lnSpread();
+    };
   }
 
   /** Whether any site can bring the state about. */
@@ -231,7 +232,9 @@ final class WheelRisk {
     return false;
   }
 
-  /** The 10 % quantile of the time from first attack to seized, months; infinite when none seizes. */
+  /**
+   * The 10 % quantile of the time from first attack to seized, months; infinite when none seizes.
+   */
   double shortWarningMonths() {
     double[] gaps = new double[Draws.COUNT];
     for (int n = 0; n < Draws.COUNT; n++) {

@@ -55,8 +55,7 @@ final class Workshop {
             catalogue.between(pairing.between()),
             catalogue.spoke(pairing.spoke()));
     List<Site> found = sites.of(parts, year);
-    WheelRisk risk =
-        new WheelRisk(found, request.build().spokeCount(), draws, scatter, false);
+    WheelRisk risk = new WheelRisk(found, request.build().spokeCount(), draws, scatter, false);
     int leader = Math.max(risk.leader(State.SEIZED), risk.leader(State.LOST));
     LookKind look =
         LookKind.of(
@@ -64,8 +63,7 @@ final class Workshop {
     History history =
         request.ageMonths() <= 0
             ? History.NEW
-            : new History(
-                request.ageMonths(), request.lastFinding(), look.finds(State.ATTACKED));
+            : new History(request.ageMonths(), request.lastFinding(), look.finds(State.ATTACKED));
     Interval interval =
         Interval.of(
             risk,

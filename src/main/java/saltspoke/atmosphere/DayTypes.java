@@ -15,11 +15,13 @@ import java.util.List;
  * <p>The form is this program's own assumption. Its three numbers and {@link
  * DiurnalCycle#SECOND_HARMONIC} were fitted together by least squares on the hours above 33, 75 and
  * 80 % of 16 hourly typical years (United States, Britain, Spain, Brazil, India, Australia). Fitted
- * on one half of them, the other half's wet hours a year come out with a median absolute error of
- * 7 % and 10 %.
+ * on one half of them, the other half's wet hours a year come out with a median absolute error of 7
+ * % and 10 %.
  */
 public final class DayTypes {
-  /** Spread of ln saturation ratio between days in fully dry air, fitted (0.6 and 1.1 on halves). */
+  /**
+   * Spread of ln saturation ratio between days in fully dry air, fitted (0.6 and 1.1 on halves).
+   */
   private static final double HUMIDITY_SPREAD = 0.7639;
 
   /** Power of (1 − RH) by which that spread shrinks in moist air, fitted (1.1 and 1.5). */
@@ -67,8 +69,7 @@ public final class DayTypes {
                 + Math.sqrt(1 - MILD_WHEN_MOIST * MILD_WHEN_MOIST) * WARMTH[w];
         meanC[k] = temperatureC + daySpreadC * warmth;
         rangeC[k] = diurnalRangeC * Math.exp(-RANGE_SHRINK * MOISTNESS[m]) / rangeScale;
-        vapour[k] =
-            SaturationPressure.overWaterHpa(meanC[k]) * Math.exp(spread * MOISTNESS[m]);
+        vapour[k] = SaturationPressure.overWaterHpa(meanC[k]) * Math.exp(spread * MOISTNESS[m]);
       }
     }
     double level = level(target, meanC, rangeC, vapour);

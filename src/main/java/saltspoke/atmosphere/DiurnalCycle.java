@@ -1,10 +1,10 @@
 package saltspoke.atmosphere;
 
 /**
- * The day–night cycle of temperature. Its form is a cosine with a second harmonic, so that the night
- * is longer than the warm afternoon; it peaks at 15 h and is lowest at 6 h local time (common
- * practice for land), falling for 15 hours and rising for 9. The second harmonic is fitted on hourly
- * years (see {@link DayTypes}).
+ * The day–night cycle of temperature. Its form is a cosine with a second harmonic, so that the
+ * night is longer than the warm afternoon; it peaks at 15 h and is lowest at 6 h local time (common
+ * practice for land), falling for 15 hours and rising for 9. The second harmonic is fitted on
+ * hourly years (see {@link DayTypes}).
  */
 public final class DiurnalCycle {
   /** Second harmonic over the first, dimensionless; fitted on 16 hourly years, ±0.08. */

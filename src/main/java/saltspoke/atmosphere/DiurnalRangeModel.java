@@ -3,7 +3,8 @@ package saltspoke.atmosphere;
 /**
  * Mean daily range of temperature (mean maximum less mean minimum) from humidity, rain, warmth,
  * season, latitude, elevation and nearness of a windy sea. ln of the range is linear; least squares
- * with a ridge of 0.001 on 1500 stations of CRU CL 2.0 (New et al. 2002). Mean absolute error 1.5 K.
+ * with a ridge of 0.001 on 1500 stations of CRU CL 2.0 (New et al. 2002). Mean absolute error 1.5
+ * K.
  */
 final class DiurnalRangeModel {
   private static final double[] COEFFICIENTS = {

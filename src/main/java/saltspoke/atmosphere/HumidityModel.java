@@ -64,7 +64,9 @@ final class HumidityModel {
   /** Least vapour pressure of the harmonic over saturation; it can fall below 0 in dry winters. */
   private static final double LEAST_RATIO = 0.02;
 
-  /** Height over which the vapour pressure falls to 1/e for the harmonic, km (from memory, 2.0–2.5). */
+  /**
+   * Height over which the vapour pressure falls to 1/e for the harmonic, km (from memory, 2.0–2.5).
+   */
   private static final double HARMONIC_SCALE_KM = 2.3;
 
   /** Gas constant in ρ = 216.7 e/T, g K/(m³ hPa) (ITU-R P.453). */
@@ -103,16 +105,14 @@ final class HumidityModel {
               + Math.log((grid + ZERO_C_K) / DENSITY_FACTOR)
               + s.mapAboveKmUnheld() / at.scaleHeightKm();
       double harmonic =
-          Math.max(
-              at.seasonalVapourHpa()[m], LEAST_RATIO * SaturationPressure.overWaterHpa(grid));
+          Math.max(at.seasonalVapourHpa()[m], LEAST_RATIO * SaturationPressure.overWaterHpa(grid));
       double lnSeasonal = Math.log(harmonic) + s.aroundAboveKmUnheld() / HARMONIC_SCALE_KM;
       ranked[m] = Site.hold(lnRanked - lnSaturation, DRIEST_LN_RATIO, MOISTEST_LN_RATIO);
       seasonal[m] = Site.hold(lnSeasonal - lnSaturation, DRIEST_LN_RATIO, MOISTEST_LN_RATIO);
       rankedMean += ranked[m] / months;
       seasonalMean += seasonal[m] / months;
     }
-    double spread =
-        lnDensity[PlaceFields.EXCEEDED_10] - lnDensity[PlaceFields.EXCEEDED_90];
+    double spread = lnDensity[PlaceFields.EXCEEDED_10] - lnDensity[PlaceFields.EXCEEDED_90];
     YearShape year = YearShape.of(temperatureC, at.rainMm());
     double[] result = new double[months];
     for (int m = 0; m < months; m++) {

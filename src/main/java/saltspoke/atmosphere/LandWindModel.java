@@ -2,9 +2,9 @@ package saltspoke.atmosphere;
 
 /**
  * Monthly mean wind speed at 10 m on land, from the marine wind (COADS) of the nearest waters, the
- * distance to the sea, latitude, season, relief and rain (which stands for roughness). Least squares
- * with a ridge of 0.001 on 1500 stations of CRU CL 2.0 (New et al. 2002); mean absolute error 0.75
- * m/s, about as much as the shelter of single stations differs.
+ * distance to the sea, latitude, season, relief and rain (which stands for roughness). Least
+ * squares with a ridge of 0.001 on 1500 stations of CRU CL 2.0 (New et al. 2002); mean absolute
+ * error 0.75 m/s, about as much as the shelter of single stations differs.
  */
 final class LandWindModel {
   private static final double[] COEFFICIENTS = {
@@ -39,20 +39,20 @@ final class LandWindModel {
       double spring = s.spring(m);
       double t = year.warmth(m);
       double rangeC = diurnalRangeC[m];
-    double[] terms = {
-      1,
-      near200 * sea,
-      s.latitude(),
-      sea,
-      spring,
-      s.mapAboveKm(),
-      yearRain,
-      season,
-      rangeC / 10,
-      t,
-      near15 * sea,
-      s.latitude() * s.latitude()
-    };
+      double[] terms = {
+        1,
+        near200 * sea,
+        s.latitude(),
+        sea,
+        spring,
+        s.mapAboveKm(),
+        yearRain,
+        season,
+        rangeC / 10,
+        t,
+        near15 * sea,
+        s.latitude() * s.latitude()
+      };
       result[m] = Math.max(LEAST_M_PER_S, Site.dot(COEFFICIENTS, terms));
     }
     return result;

@@ -9,8 +9,8 @@ import saltspoke.places.Place;
 import saltspoke.values.Note;
 
 /**
- * The monthly climate of any place on land, from the shipped fields. Immutable; safe for use by many
- * threads.
+ * The monthly climate of any place on land, from the shipped fields. Immutable; safe for use by
+ * many threads.
  */
 public final class MonthlyClimate {
   private final PlaceFields fields;
@@ -31,10 +31,7 @@ public final class MonthlyClimate {
   /** January to December at a place. */
   public List<MonthClimate> at(Place place) {
     return at(
-        place.latitudeDeg(),
-        place.longitudeDeg(),
-        place.elevationM(),
-        place.sea().distanceKm());
+        place.latitudeDeg(), place.longitudeDeg(), place.elevationM(), place.sea().distanceKm());
   }
 
   /**

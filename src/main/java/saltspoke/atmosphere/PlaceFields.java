@@ -73,9 +73,7 @@ final class PlaceFields {
             Math.max(
                     0,
                     elevation.sample(
-                        0,
-                        latitudeDeg + i * AROUND_STEP_DEG,
-                        longitudeDeg + j * AROUND_STEP_DEG))
+                        0, latitudeDeg + i * AROUND_STEP_DEG, longitudeDeg + j * AROUND_STEP_DEG))
                 / 9;
       }
     }
@@ -92,7 +90,10 @@ final class PlaceFields {
         sample(marineWind, latitudeDeg, longitudeDeg));
   }
 
-  /** Phase of the season in a month: cosine (first index 0) and sine, largest in the northern January. */
+  /**
+   * Phase of the season in a month: cosine (first index 0) and sine, largest in the northern
+   * January.
+   */
   static double[] season(int month) {
     double phase = 2 * Math.PI * (MID_MONTH_DAY[month] - MID_MONTH_DAY[0]) / 365.25;
     return new double[] {Math.cos(phase), Math.sin(phase)};
@@ -107,9 +108,9 @@ final class PlaceFields {
   }
 
   /**
-   * Months from mean a1, amplitude a2 and day of minimum a3 of the year's harmonic (ITU-R P.834):
-   * e = a1 − a2·cos(2π(d − a3)/365.25). Taken at the grid's points, since a day of the year cannot
-   * be interpolated.
+   * Months from mean a1, amplitude a2 and day of minimum a3 of the year's harmonic (ITU-R P.834): e
+   * = a1 − a2·cos(2π(d − a3)/365.25). Taken at the grid's points, since a day of the year cannot be
+   * interpolated.
    */
   private static FieldStack seasons(FieldStack harmonic) {
     Grid grid = harmonic.band(0).grid();

@@ -198,7 +198,8 @@ final class CoastBin {
     rings[ringCount] = n;
     lon = Arrays.copyOf(lon, n);
     lat = Arrays.copyOf(lat, n);
-    return new Shape(lon, lat, Arrays.copyOf(rings, ringCount + 1), chunks(lon, lat, rings, ringCount));
+    return new Shape(
+        lon, lat, Arrays.copyOf(rings, ringCount + 1), chunks(lon, lat, rings, ringCount));
   }
 
   private int[] chunks(float[] lon, float[] lat, int[] rings, int ringCount) {

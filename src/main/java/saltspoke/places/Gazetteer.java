@@ -110,7 +110,8 @@ final class Gazetteer {
   List<Town> near(double latitudeDeg, double longitudeDeg, double reachKm) {
     double high = reachKm / 111.0;
     double wide =
-        Math.min(180, high / Math.max(0.02, Math.cos(Math.toRadians(Math.abs(latitudeDeg) + high))));
+        Math.min(
+            180, high / Math.max(0.02, Math.cos(Math.toRadians(Math.abs(latitudeDeg) + high))));
     List<Town> near = new ArrayList<>();
     int step = TiledTable.TILE_DEG;
     double south = Math.floor(Math.max(-90, latitudeDeg - high) / step) * step;

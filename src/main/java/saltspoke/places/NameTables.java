@@ -11,8 +11,24 @@ final class NameTables {
   /** Everyday names that the tables lack, folded. */
   private static final Map<String, String> EVERYDAY =
       Map.of(
-          "uk", "GB", "great britain", "GB", "usa", "US", "america", "US", "czech republic", "CZ",
-          "holland", "NL", "uae", "AE", "macedonia", "MK", "burma", "MM");
+          "uk",
+          "GB",
+          "great britain",
+          "GB",
+          "usa",
+          "US",
+          "america",
+          "US",
+          "czech republic",
+          "CZ",
+          "holland",
+          "NL",
+          "uae",
+          "AE",
+          "macedonia",
+          "MK",
+          "burma",
+          "MM");
 
   private final DataSet data;
   private Map<String, String> regions;
@@ -55,8 +71,7 @@ final class NameTables {
 
   private Map<String, String> read(String layer, String key) {
     Map<String, String> read = new HashMap<>();
-    CsvTable.forEach(
-        data.open(layer), layer, row -> read.put(row.text(key), row.text("name")));
+    CsvTable.forEach(data.open(layer), layer, row -> read.put(row.text(key), row.text("name")));
     return read;
   }
 }

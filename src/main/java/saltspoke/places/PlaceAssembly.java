@@ -120,8 +120,7 @@ final class PlaceAssembly {
     SeaView sea = coast.view(point.latitudeDeg, point.longitudeDeg);
     if (overrides.seaDistanceKm().isPresent()) {
       double given = overrides.seaDistanceKm().getAsDouble();
-      flags.add(
-          Note.of("place-sea-distance-given", "givenKm", given, "mapKm", sea.distanceKm()));
+      flags.add(Note.of("place-sea-distance-given", "givenKm", given, "mapKm", sea.distanceKm()));
       sea = sea.movedTo(given);
     }
     return new Place(
@@ -152,8 +151,7 @@ final class PlaceAssembly {
     }
     FieldStack grid = data.stack("elevation");
     double height = grid.sample(0, point.latitudeDeg, point.longitudeDeg);
-    flags.add(
-        Note.of("place-elevation-from-grid", "stepDeg", grid.band(0).grid().stepLatDeg()));
+    flags.add(Note.of("place-elevation-from-grid", "stepDeg", grid.band(0).grid().stepLatDeg()));
     return Double.isNaN(height) ? 0 : height;
   }
 

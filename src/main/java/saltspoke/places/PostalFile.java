@@ -96,8 +96,7 @@ final class PostalFile {
                 p ->
                     Math.abs(p.latitudeDeg - latitude) > WIDE_DEG
                         || Math.abs(p.longitudeDeg - longitude) > WIDE_DEG);
-    return new PostalPoint(
-        places.get(0).name, places.get(0).region, latitude, longitude, wide);
+    return new PostalPoint(places.get(0).name, places.get(0).region, latitude, longitude, wide);
   }
 
   private static double median(double[] sorted) {

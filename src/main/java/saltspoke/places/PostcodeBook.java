@@ -16,7 +16,9 @@ import saltspoke.values.Refusal;
 
 /** Postcodes of the countries that ship, and of postal files that a user adds. */
 final class PostcodeBook {
-  /** Countries with a shipped table and the number of digits of their codes (postal authorities). */
+  /**
+   * Countries with a shipped table and the number of digits of their codes (postal authorities).
+   */
   private static final Map<String, Integer> DIGITS =
       new TreeMap<>(Map.of("US", 5, "IN", 6, "FR", 5, "IT", 5, "DE", 5));
 
@@ -62,7 +64,10 @@ final class PostcodeBook {
     }
     if (!DIGITS.containsKey(country) && !added.containsKey(country)) {
       throw Refusal.notFound(
-          "unknown-country", "country", shorten(countryCode), "one of " + known + "; else " + INSTEAD);
+          "unknown-country",
+          "country",
+          shorten(countryCode),
+          "one of " + known + "; else " + INSTEAD);
     }
     String tidy = tidy(code, country);
     if (tidy.isEmpty()) {

@@ -101,8 +101,7 @@ final class TiledTable {
           row ->
               read.put(
                   tileOf(row.number("tile_south_deg"), row.number("tile_west_deg")),
-                  new Member(
-                      (long) row.number("offset_bytes"), (int) row.number("length_bytes"))));
+                  new Member((long) row.number("offset_bytes"), (int) row.number("length_bytes"))));
       index = read;
     }
     return index;

@@ -50,7 +50,9 @@ final class Vantage {
     return Math.sqrt(dx * dx + dy * dy + dz * dz);
   }
 
-  /** Length of the arc over a chord, m; within 0.4 % of the geodesic (the ellipsoid's flattening). */
+  /**
+   * Length of the arc over a chord, m; within 0.4 % of the geodesic (the ellipsoid's flattening).
+   */
   static double arcM(double chordM) {
     return 2 * MEAN_RADIUS_M * Math.asin(Math.min(1, chordM / (2 * MEAN_RADIUS_M)));
   }

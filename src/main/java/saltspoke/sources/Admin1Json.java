@@ -10,12 +10,13 @@ import java.util.List;
 import java.util.Map;
 import java.util.function.BiConsumer;
 
-/** Streams the features of a GeoJSON collection of polygons: their properties and their polygons. */
+/**
+ * Streams the features of a GeoJSON collection of polygons: their properties and their polygons.
+ */
 final class Admin1Json {
   private Admin1Json() {}
 
-  static void forEach(
-      InputStream in, BiConsumer<Map<String, String>, List<List<double[]>>> action)
+  static void forEach(InputStream in, BiConsumer<Map<String, String>, List<List<double[]>>> action)
       throws IOException {
     try (JsonParser parser = new JsonFactory().createParser(in)) {
       parser.nextToken();
@@ -65,9 +66,10 @@ final class Admin1Json {
     }
   }
 
-  /** Descends to the rings: a ring is an array of arrays of numbers, a polygon an array of rings. */
-  private static void collect(JsonParser parser, List<List<double[]>> polygons)
-      throws IOException {
+  /**
+   * Descends to the rings: a ring is an array of arrays of numbers, a polygon an array of rings.
+   */
+  private static void collect(JsonParser parser, List<List<double[]>> polygons) throws IOException {
     int depth = 1;
     List<Double> ring = new ArrayList<>();
     List<double[]> rings = new ArrayList<>();

@@ -10,16 +10,17 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import org.locationtech.jts.geom.Coordinate;
-import org.locationtech.jts.simplify.DouglasPeuckerSimplifier;
 import org.locationtech.jts.geom.GeometryFactory;
+import org.locationtech.jts.simplify.DouglasPeuckerSimplifier;
 
 /**
  * Builds the coast: land polygons cut at the lines of a 2° grid, in a fine form (as the source has
  * them, about 0.2 km) gathered by 10° tiles, and a coarse form for what is far away. Lakes are
  * land, the Caspian is sea.
  *
- * <p>A row of either table is one bin with its land as well-known text. Rings run counter-clockwise,
- * so that land lies on the left of every edge; edges along a bin's border are cuts and no coast.
+ * <p>A row of either table is one bin with its land as well-known text. Rings run
+ * counter-clockwise, so that land lies on the left of every edge; edges along a bin's border are
+ * cuts and no coast.
  */
 public final class CoastBuilder implements LayerBuilder {
   private static final String PACKAGE = "gmt-gshhg-high";
@@ -163,7 +164,9 @@ public final class CoastBuilder implements LayerBuilder {
     return rings;
   }
 
-  /** Simplifies the parts of a ring that are coast and leaves its cuts along the bin as they are. */
+  /**
+   * Simplifies the parts of a ring that are coast and leaves its cuts along the bin as they are.
+   */
   private record RingSimplifier(GshhgBins.Bin bin) {
     double[] simplify(double[] ring) {
       int n = ring.length / 2 - 1;
@@ -257,7 +260,8 @@ public final class CoastBuilder implements LayerBuilder {
       int at = 0;
       for (Coordinate c : kept) {
         while (scaled[at] != c && !(scaled[at].x == c.x && scaled[at].y == c.y)) {
-          if (out.size() > 0 && distance(out.get(out.size() - 1), points.get(at)) > COARSE_LONGEST_DEG) {
+          if (out.size() > 0
+              && distance(out.get(out.size() - 1), points.get(at)) > COARSE_LONGEST_DEG) {
             out.add(points.get(at));
           }
           at++;

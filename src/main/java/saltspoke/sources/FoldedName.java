@@ -59,7 +59,11 @@ public final class FoldedName {
     } else if (Character.getType(c) != Character.NON_SPACING_MARK
         && out.length() > 0
         && out.charAt(out.length() - 1) != ' '
-        && c != '\'' && c != '\u2019' && c != '\u02bb' && c != '\u2018' && c != '`') {
+        && c != '\''
+        && c != '\u2019'
+        && c != '\u02bb'
+        && c != '\u2018'
+        && c != '`') {
       out.append(' ');
     }
   }

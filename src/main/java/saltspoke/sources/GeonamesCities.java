@@ -11,8 +11,8 @@ import java.util.Set;
 /**
  * Reads the GeoNames city table: tab-separated UTF-8 without a header, 19 columns in the order of
  * the GeoNames readme (geonameid, name, asciiname, alternatenames, latitude, longitude, feature
- * class, feature code, country code, cc2, admin1–admin4 codes, population, elevation, dem, timezone,
- * modification date).
+ * class, feature code, country code, cc2, admin1–admin4 codes, population, elevation, dem,
+ * timezone, modification date).
  */
 final class GeonamesCities {
   /** Sections of towns, abandoned places and settlements, which would show a town twice. */

@@ -204,7 +204,9 @@ final class GshhgBins {
       return ring.stream().mapToDouble(Double::doubleValue).toArray();
     }
 
-    /** The first entry counter-clockwise from an exit that is still free, or the ring's own start. */
+    /**
+     * The first entry counter-clockwise from an exit that is still free, or the ring's own start.
+     */
     private static int nextEntry(double[] entries, boolean[] used, double exit, int start) {
       int from = Arrays.binarySearch(entries, exit);
       from = from < 0 ? -from - 1 : from;

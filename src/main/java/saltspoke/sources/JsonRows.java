@@ -22,7 +22,9 @@ final class JsonRows {
 
   private JsonRows() {}
 
-  /** Calls back with the scalar members of each object in the first array; nested ones are skipped. */
+  /**
+   * Calls back with the scalar members of each object in the first array; nested ones are skipped.
+   */
   static void forEach(InputStream in, Consumer<Map<String, String>> action) throws IOException {
     int c = in.read();
     while (c >= 0 && c != '[') {

@@ -106,9 +106,7 @@ final class TopoJson {
 
   @SuppressWarnings("unchecked")
   private static List<List<List<Integer>>> polygons(Object nested, boolean multi) {
-    return multi
-        ? (List<List<List<Integer>>>) nested
-        : List.of((List<List<Integer>>) nested);
+    return multi ? (List<List<List<Integer>>>) nested : List.of((List<List<Integer>>) nested);
   }
 
   private static Object nested(JsonParser parser) throws IOException {

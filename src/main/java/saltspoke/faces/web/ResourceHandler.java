@@ -45,7 +45,7 @@ final class ResourceHandler extends Handler.Abstract {
         return true;
       }
       String body = method.equals("POST") ? body(request) : "";
-      Ask ask = new Ask(method, Request.getPathInContext(request), Ask.queryOf(request), body);
+      Ask ask = new Ask(method, request.getHttpURI().getDecodedPath(), Ask.queryOf(request), body);
       Reply reply = resource.apply(ask);
       write(response, HttpStatus.OK_200, reply, callback);
     } catch (Refusal refusal) {
@@ -57,7 +57,8 @@ final class ResourceHandler extends Handler.Abstract {
           error("too-large", "body", "", "at most " + MOST_BODY_BYTES + " bytes"),
           callback);
     } catch (RuntimeException e) {
-      System.err.println("saltspoke: a bug while answering " + Request.getPathInContext(request));
+      System.err.println(
+          "saltspoke: a bug while answering " + request.getHttpURI().getDecodedPath());
       e.printStackTrace();
       write(
           response,
