@@ -62,8 +62,7 @@ final class Coast {
       search = fine;
     } else {
       NearestShore fine = new NearestShore(from);
-      fine.offer(
-          fineBins(search.latitudeDeg(), search.longitudeDeg(), COARSE_ERROR_M));
+      fine.offer(fineBins(search.latitudeDeg(), search.longitudeDeg(), COARSE_ERROR_M));
       if (fine.bestM() < search.bestM() + COARSE_ERROR_M) {
         search = fine;
       }
@@ -194,7 +193,8 @@ final class Coast {
   }
 
   private static int columnsBetween(double westDeg, double eastDeg) {
-    return Math.min(180, (int) ((floorToBin(eastDeg) - floorToBin(westDeg)) / CoastBin.SIZE_DEG) + 1);
+    return Math.min(
+        180, (int) ((floorToBin(eastDeg) - floorToBin(westDeg)) / CoastBin.SIZE_DEG) + 1);
   }
 
   private static double floorToBin(double deg) {

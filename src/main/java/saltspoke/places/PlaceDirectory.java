@@ -152,11 +152,7 @@ public final class PlaceDirectory {
         ? Optional.empty()
         : Optional.of(
             Note.of(
-                "place-namesakes",
-                "chosen",
-                inFull(chosen),
-                "others",
-                String.join("; ", others)));
+                "place-namesakes", "chosen", inFull(chosen), "others", String.join("; ", others)));
   }
 
   private static String inFull(PlaceHit hit) {

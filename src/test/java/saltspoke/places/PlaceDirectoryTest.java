@@ -97,7 +97,8 @@ class PlaceDirectoryTest {
   void aPostcodeWithoutATableNamesWhatCanBeGivenInstead() {
     Refusal country = refusal(() -> PLACES.byPostcode("SW1A 1AA", "GB", PlaceOverrides.NONE));
     assertEquals(Refusal.Kind.NOT_FOUND, country.kind());
-    for (String word : List.of("DE", "FR", "IN", "IT", "US", "town", "coordinates", "postal file")) {
+    for (String word :
+        List.of("DE", "FR", "IN", "IT", "US", "town", "coordinates", "postal file")) {
       assertTrue(country.allowed().contains(word), word);
     }
     Refusal code = refusal(() -> PLACES.byPostcode("99999", "US", PlaceOverrides.NONE));
@@ -169,8 +170,10 @@ class PlaceDirectoryTest {
     assertEquals(3, place.sea().distanceKm());
     assertEquals("place-sea-distance-given", place.flags().get(0).code());
     assertThrows(
-        Refusal.class, () -> new PlaceOverrides(OptionalDouble.of(Double.NaN), OptionalDouble.empty()));
-    assertThrows(Refusal.class, () -> new PlaceOverrides(OptionalDouble.empty(), OptionalDouble.of(-1)));
+        Refusal.class,
+        () -> new PlaceOverrides(OptionalDouble.of(Double.NaN), OptionalDouble.empty()));
+    assertThrows(
+        Refusal.class, () -> new PlaceOverrides(OptionalDouble.empty(), OptionalDouble.of(-1)));
   }
 
   @Test

@@ -48,10 +48,34 @@ class SeaDistanceTest {
   @ParameterizedTest
   @ValueSource(
       strings = {
-        "Rotterdam, NL", "Antwerp", "Bremerhaven", "Gdańsk", "Liverpool, GB", "Marseille", "Genoa",
-        "Naples, IT", "Piraeus", "Odesa", "Durban", "Mombasa", "Mumbai", "Yokohama", "Busan",
-        "Singapore", "Sydney, AU", "Auckland", "Valparaíso", "Santos", "Halifax, CA", "Bergen, NO",
-        "Esbjerg", "Le Havre", "Brest, FR", "Cuxhaven", "Reykjavík", "Aberdeen, GB"
+        "Rotterdam, NL",
+        "Antwerp",
+        "Bremerhaven",
+        "Gdańsk",
+        "Liverpool, GB",
+        "Marseille",
+        "Genoa",
+        "Naples, IT",
+        "Piraeus",
+        "Odesa",
+        "Durban",
+        "Mombasa",
+        "Mumbai",
+        "Yokohama",
+        "Busan",
+        "Singapore",
+        "Sydney, AU",
+        "Auckland",
+        "Valparaíso",
+        "Santos",
+        "Halifax, CA",
+        "Bergen, NO",
+        "Esbjerg",
+        "Le Havre",
+        "Brest, FR",
+        "Cuxhaven",
+        "Reykjavík",
+        "Aberdeen, GB"
       })
   @Tag("law")
   void harbourTownsAreOnLand(String town) {
@@ -106,7 +130,8 @@ class SeaDistanceTest {
     double before = World.COAST.nearest(47.0, 2.0).distanceKm();
     for (int i = 1; i <= 300; i++) {
       double now = World.COAST.nearest(47.0, 2.0 - 0.02 * i).distanceKm();
-      // 0.02° of longitude at 47° is 1.52 km; coarse and fine coast may differ by 1.2 km at the seam.
+      // 0.02° of longitude at 47° is 1.52 km; coarse and fine coast may differ by 1.2 km at the
+      // seam.
       assertTrue(Math.abs(now - before) <= 1.52 + 1.2 + 0.01, "at " + (2.0 - 0.02 * i));
       before = now;
     }
