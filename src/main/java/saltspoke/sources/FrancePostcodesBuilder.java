@@ -26,8 +26,7 @@ public final class FrancePostcodesBuilder implements LayerBuilder {
     Map<String, GeonamesCities.City> byInsee = new HashMap<>();
     for (GeonamesCities.City city : GeonamesCities.read(in)) {
       if (city.country().equals("FR") && !city.admin4().isEmpty()) {
-        byInsee.merge(
-            city.admin4(), city, (a, b) -> a.population() >= b.population() ? a : b);
+        byInsee.merge(city.admin4(), city, (a, b) -> a.population() >= b.population() ? a : b);
       }
     }
     Map<String, String> regions = PostcodeTable.regionNames(in);

@@ -55,9 +55,9 @@ public final class ItalyPostcodesBuilder implements LayerBuilder {
                 regions.getOrDefault("IT." + city.admin1(), ""),
                 city.latitudeDeg(),
                 city.longitudeDeg(),
-                municipalities.get(code) > 1
-                    || codesOfTown.get(city.name() + city.admin2()) > 1));
-    out.note("Italy: " + table.size() + " of " + municipalities.size() + " postcodes have a point.");
+                municipalities.get(code) > 1 || codesOfTown.get(city.name() + city.admin2()) > 1));
+    out.note(
+        "Italy: " + table.size() + " of " + municipalities.size() + " postcodes have a point.");
     table.write(
         out,
         PostcodeTable.about(

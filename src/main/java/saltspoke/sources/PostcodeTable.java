@@ -29,8 +29,7 @@ final class PostcodeTable {
     return rows.size();
   }
 
-  void put(
-      String code, String name, String region, double lat, double lon, boolean approximate) {
+  void put(String code, String name, String region, double lat, double lon, boolean approximate) {
     rows.put(code, new Row(name, region, lat, lon, approximate));
   }
 

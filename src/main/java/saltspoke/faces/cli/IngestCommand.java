@@ -70,7 +70,8 @@ final class IngestCommand implements Runnable {
                   });
       spec.commandLine()
           .getOut()
-          .printf("%d files from %d packages in %s%n",
+          .printf(
+              "%d files from %d packages in %s%n",
               manifest.files().size(), manifest.sources().size(), target);
       return ExitCode.DONE;
     }
