@@ -38,6 +38,7 @@ record Interval(
     double horizon = RiskLimits.HORIZON_MONTHS;
     double seized = risk.monthsTo(State.SEIZED, limits.seized(), history, horizon);
     double lost = risk.monthsTo(State.LOST, limits.lost(), history, horizon);
+    double replace = risk.monthsTo(State.LOST, limits.replace(), history, horizon);
     double first = Math.min(Math.min(seized, lost), horizon);
     String limitedBy =
         first >= horizon ? "horizon" : seized <= lost ? "seized-risk" : "head-loss-risk";
@@ -70,7 +71,7 @@ record Interval(
     }
     every = Math.max(every, SiteTable.FIRST_MONTHS);
     if (!practiceLimits) {
-      return new Interval(first, every, first, every, lost, limitedBy, everyBy);
+      return new Interval(first, every, first, every, replace, limitedBy, everyBy);
     }
     double heldFirst = hold(first);
     double heldEvery = hold(every);
@@ -79,7 +80,7 @@ record Interval(
         every,
         heldFirst,
         heldEvery,
-        lost,
+        replace,
         bound(first, heldFirst, limitedBy),
         bound(every, heldEvery, everyBy));
   }

@@ -91,7 +91,7 @@ final class WheelRisk {
           double limit = limit(sites.get(i), state);
           found[state.ordinal()][i][n] =
               Double.isFinite(limit)
-                  ? (Math.log(limit) + limitShift(state, z) - moved) / scatter
+                  ? (Math.log(limit) + limitShift(sites.get(i), state, z) - moved) / scatter
                   : Double.POSITIVE_INFINITY;
         }
       }
@@ -107,14 +107,15 @@ final class WheelRisk {
     };
   }
 
-  private static double limitShift(State state, double[] z) {
-    Assumption of =
-        switch (state) {
-          case ATTACKED -> Assumption.VISIBLE_DEPTH;
-          case SEIZED -> Assumption.SEIZING_GAP;
-          case LOST -> Assumption.HEAD_MARGIN;
-        };
-    return z[of.ordinal()] * of.lnSpread();
+  /** What shows at a thread is part of what seizes it, so both limits move together there. */
+  private static double limitShift(Site site, State state, double[] z) {
+    double gap = z[Assumption.SEIZING_GAP.ordinal()] * Assumption.SEIZING_GAP.lnSpread();
+    double visible = z[Assumption.VISIBLE_DEPTH.ordinal()] * Assumption.VISIBLE_DEPTH.lnSpread();
+    return switch (state) {
+      case ATTACKED -> site.cause().equals("thread") ? gap + visible / 2 : visible;
+      case SEIZED -> gap;
+      case LOST -> z[Assumption.HEAD_MARGIN.ordinal()] * Assumption.HEAD_MARGIN.lnSpread();
+    };
   }
 
   /** Whether any site can bring the state about. */

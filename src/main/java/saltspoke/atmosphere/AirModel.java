@@ -8,18 +8,19 @@ import java.util.Set;
 import saltspoke.fields.DataSet;
 import saltspoke.fields.FieldStack;
 import saltspoke.places.Place;
+import saltspoke.sources.CsvTable;
 import saltspoke.values.Note;
 import saltspoke.values.Quantiles;
 
 /** The whole answer about the outside air of a place, from a data set and a monthly climate. */
 public final class AirModel {
-  private final MonthlyClimateSource climate;
+  private final MonthlyClimate climate;
   private final CountryAir countries;
   private final FieldStack elevation;
   private final WindFields winds;
 
   private AirModel(
-      MonthlyClimateSource climate, CountryAir countries, FieldStack elevation, WindFields winds) {
+      MonthlyClimate climate, CountryAir countries, FieldStack elevation, WindFields winds) {
     this.climate = climate;
     this.countries = countries;
     this.elevation = elevation;
@@ -32,24 +33,11 @@ public final class AirModel {
   /** One standard deviation of the modelled annual mean humidity, points (judged on stations). */
   private static final double HUMIDITY_SPREAD_PCT = 5.0;
 
-  /** Over a data set: its own monthly climate, winds, elevation and country table. */
+  /** Over the layers of a data set. */
   public static AirModel from(DataSet data) {
-    MonthlyClimate climate = MonthlyClimate.from(data);
-    return from(
-        data,
-        place ->
-            new ClimateYear(
-                climate.at(place).stream().map(month -> month.withChloride(0)).toList(),
-                TEMPERATURE_SPREAD_K,
-                HUMIDITY_SPREAD_PCT,
-                climate.notes(place)));
-  }
-
-  /** Over a data set's winds, elevation and country table, with a monthly climate. */
-  public static AirModel from(DataSet data, MonthlyClimateSource climate) {
     return new AirModel(
-        climate,
-        CountryAir.read(data.rows(CountryAir.LAYER)),
+        MonthlyClimate.from(data),
+        CountryAir.read(CsvTable.read(data.open(CountryAir.LAYER), CountryAir.LAYER + ".csv")),
         data.stack("elevation"),
         WindFields.from(data));
   }
@@ -57,19 +45,18 @@ public final class AirModel {
   /** The air at a place. */
   public AirClimate at(Place place, AirOverrides overrides) {
     Set<Note> flags = new LinkedHashSet<>();
-    ClimateYear weather = climate.at(place);
-    flags.addAll(weather.flags());
+    flags.addAll(climate.notes(place));
     Optional<CountryAir.Country> country = countries.find(place.countryCode());
     Setting setting = overrides.setting().orElseGet(() -> Settings.guess(place.surroundings()));
 
-    Salt salt = salt(place, setting, weather.months(), overrides, flags);
+    Salt salt = salt(place, setting, climate.at(place), overrides, flags);
     Sulfur sulfur = sulfur(setting, country, overrides, flags);
     AnnualAir annual = annual(salt.months());
     Exposure exposure = exposure(annual, sulfur, salt, overrides, flags);
     InputSpread spread =
         new InputSpread(
-            overrides.temperatureC().isPresent() ? 0 : weather.temperatureSpreadK(),
-            overrides.relativeHumidityPct().isPresent() ? 0 : weather.relativeHumiditySpreadPct(),
+            overrides.temperatureC().isPresent() ? 0 : TEMPERATURE_SPREAD_K,
+            overrides.relativeHumidityPct().isPresent() ? 0 : HUMIDITY_SPREAD_PCT,
             sulfur.lnSpread(),
             salt.lnSpread());
     List<MetalCorrosivity> corrosivity = Corrosion.assess(exposure, spread);
@@ -100,7 +87,7 @@ public final class AirModel {
   private Salt salt(
       Place place,
       Setting setting,
-      List<MonthAir> months,
+      List<MonthClimate> months,
       AirOverrides overrides,
       Set<Note> flags) {
     SeaSalt model =
@@ -109,9 +96,9 @@ public final class AirModel {
             SaltPaths.crestsAbovePlaceM(place, elevation),
             SaltPaths.roughness(setting, place.sea().distanceKm()),
             place.elevationM());
-    double rainMmPerYear = months.stream().mapToDouble(MonthAir::rainMm).sum();
+    double rainMmPerYear = months.stream().mapToDouble(MonthClimate::rainMm).sum();
     List<Double> monthly = new ArrayList<>();
-    for (MonthAir month : months) {
+    for (MonthClimate month : months) {
       monthly.add(model.monthMgPerM2Day(winds.at(place, month), rainMmPerYear));
     }
     Quantiles annual = SeaSalt.annual(monthly);

@@ -122,7 +122,7 @@ final class LossDistribution {
   private double cdf(double lnLoss) {
     double sum = 0;
     for (int i = 0; i < lnUm.length; i++) {
-      sum += weight[i] * NormalLaw.cdf((lnLoss - lnUm[i]) / lnSpread);
+      sum += weight[i] * Normal.below((lnLoss - lnUm[i]) / lnSpread);
     }
     return Math.min(1, sum);
   }

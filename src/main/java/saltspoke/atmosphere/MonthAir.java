@@ -42,25 +42,4 @@ public record MonthAir(
   public MonthAir {
     dayTypes = List.copyOf(dayTypes);
   }
-
-  /** The same month with another chloride deposition, mg/(m² d). */
-  public MonthAir withChloride(double mgPerM2Day) {
-    return new MonthAir(
-        month,
-        temperatureC,
-        relativeHumidityPct,
-        vapourPressureHpa,
-        diurnalRangeC,
-        wetHours,
-        hoursAbove33Pct,
-        hoursAbove75Pct,
-        hoursBelow0C,
-        rainMm,
-        wetDays,
-        windMPerS,
-        nearFreezingDays,
-        frostDays,
-        mgPerM2Day,
-        dayTypes);
-  }
 }

@@ -71,8 +71,8 @@ public record MonthMeans(
         rainMm[m],
         WetDays.of(rainMm[m], t, days),
         windMPerS[m],
-        days * FrostDays.nearFreezingShare(t, range, mean, season),
-        days * FrostDays.frostShare(t, range, mean, season),
+        days * FrostDays.nearFreezingShare(t, range, spread),
+        days * FrostDays.frostShare(t, range, spread),
         types);
   }
 }

@@ -1,16 +1,11 @@
 package saltspoke.atmosphere;
 
-/** The error function and the standard normal distribution. */
+/** The complementary error function, with small relative error also far out in its tail. */
 final class NormalLaw {
   /** Standard normal quantile of 90 %. */
   static final double Z90 = 1.2815515655446004;
 
   private NormalLaw() {}
-
-  /** Share of a standard normal quantity at or below {@code z}. */
-  static double cdf(double z) {
-    return 0.5 * erfc(-z / Math.sqrt(2));
-  }
 
   /**
    * Complementary error function; relative error below 1.2e-7 everywhere (Press et al., Numerical

@@ -68,7 +68,7 @@ public final class SeaSalt {
       double fine = SaltKernel.fineMg(shoreKm, fetchKm, rainMmPerYear);
       carried += reaching * fine * fineShare(sectors, k * SECTOR_DEG) / FINE_UNIT;
       double coarse = SaltKernel.coarseMg(shoreKm, fetchKm);
-      if (coarse > 1e-3) {
+      if (coarse > 1e-6) {
         carried += reaching * coarse * coarseShare(sectors, k * SECTOR_DEG) / COARSE_UNIT;
       }
       background += reaching * SaltKernel.backgroundMg(shoreKm, rainMmPerYear);

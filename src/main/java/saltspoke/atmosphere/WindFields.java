@@ -31,7 +31,7 @@ final class WindFields {
         data.stack("wind-direction-monthly-u"), data.stack("wind-direction-monthly-v"));
   }
 
-  WindMonth at(Place place, MonthAir month) {
+  WindMonth at(Place place, MonthClimate month) {
     double speed = Math.max(CALMEST_M_PER_S, month.windMPerS());
     int band = month.month() - 1;
     double u = eastward.sample(band, place.latitudeDeg(), place.longitudeDeg());

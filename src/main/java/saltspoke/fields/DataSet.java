@@ -122,18 +122,17 @@ public final class DataSet {
    * @throws Refusal when there is no such layer
    */
   public InputStream open(String layerId) {
+    InputStream stored = openStored(layerId);
     String path = manifest.get(layerId).path();
-    InputStream bytes = new ByteArrayInputStream(bytes(path));
     try {
-      return path.endsWith(".gz") ? new GZIPInputStream(bytes, 1 << 16) : bytes;
+      return path.endsWith(".gz") ? new GZIPInputStream(stored, 1 << 16) : stored;
     } catch (IOException e) {
       throw Refusal.dataDamaged("damaged-data", home.name(), path, MEND);
     }
   }
 
   /**
-   * The bytes of a layer's file as they are stored, packed or not: for tables of several gzip
-   * members, of which a reader takes one.
+   * The bytes of a layer's file as they are stored, packed or not.
    *
    * @throws Refusal when there is no such layer
    */
@@ -143,7 +142,7 @@ public final class DataSet {
 
   /** All rows of a layer that is a table. */
   public List<CsvTable.Row> rows(String layerId) {
-    return CsvTable.read(open(layerId), manifest.get(layerId).path());
+    return CsvTable.read(open(layerId), layerId + ".csv");
   }
 
   private FieldStack read(String layerId) {

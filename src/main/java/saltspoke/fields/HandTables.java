@@ -13,9 +13,9 @@ import saltspoke.values.Refusal;
 
 /**
  * Tables kept by hand in the folder {@code tables} of the data folder. Each says what it is in
- * {@code # key: words} lines on top: {@code title}, {@code licence} and {@code attribution} must
- * stand there, {@code unit}, {@code period} and {@code remark} may. The layer id is the file's name
- * without {@code .csv}.
+ * {@code # key: words} lines on top: {@code title}, {@code licence} (or {@code license}) and {@code
+ * attribution} must stand there, {@code unit}, {@code period} and {@code note} may, the last more
+ * than once. The layer id is the file's name without {@code .csv}.
  */
 final class HandTables {
   static final String FOLDER = "tables";
@@ -60,7 +60,7 @@ final class HandTables {
         List.of(),
         head.get("licence"),
         head.get("attribution"),
-        head.getOrDefault("remark", ""),
+        head.getOrDefault("note", ""),
         Checksum.of(file),
         Files.size(file));
   }
@@ -73,7 +73,11 @@ final class HandTables {
       }
       int colon = line.indexOf(':');
       if (colon > 0) {
-        head.putIfAbsent(line.substring(1, colon).trim(), line.substring(colon + 1).trim());
+        String key = line.substring(1, colon).trim();
+        head.merge(
+            key.equals("license") ? "licence" : key,
+            line.substring(colon + 1).trim(),
+            (first, next) -> first + "; " + next);
       }
     }
     return head;

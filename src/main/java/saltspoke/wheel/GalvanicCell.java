@@ -26,7 +26,7 @@ public final class GalvanicCell {
   /** Cells on each part of the film; halving them moves the current by under 0.2 %. */
   static final int CELLS = 40;
 
-  private static final CellCurrents NOTHING = new CellCurrents(0, 0, 0, 0, 0, 0, 0);
+  static final CellCurrents NOTHING = new CellCurrents(0, 0, 0, 0, 0, 0, 0);
 
   private GalvanicCell() {}
 
@@ -104,9 +104,15 @@ public final class GalvanicCell {
       double ringAreaCm2,
       double reachMm) {
     double galvanic = currentUA / ringAreaCm2;
-    double self = anode.cathodicUAPerCm2(anodeV);
+    double[] cathodic = new double[2];
+    anode.cathodic(anodeV, cathodic);
+    double self = cathodic[0];
     double local = localUAPerCm2(kinetics, film, galvanic);
-    double total = Math.max(0, galvanic + self) + local;
+    double total = galvanic + self + local;
+    if (galvanic < 0) {
+      anode.dissolution(anodeV, cathodic);
+      total = cathodic[0];
+    }
     return new CellCurrents(
         currentUA, galvanic, self, local, anodeV, reachMm, total * kinetics.umPerYearPerUAPerCm2());
   }

@@ -173,6 +173,11 @@ record Kinetics(
         + pitPerDecadeV * Math.log10(Math.max(chlorideMolPerKg, CLEANEST_CHLORIDE_MOL_PER_KG));
   }
 
+  /** Where a search for the potential of this metal as an anode may start, V(SCE). */
+  double startV(Film film) {
+    return active.atReference() > 0 ? active.referenceV() : pitV(film.chlorideMolPerKg());
+  }
+
   /** Arrhenius factor of all charge-transfer currents against 25 °C. */
   static double temperatureFactor(double temperatureC) {
     return Math.exp(-ACTIVATION_J_PER_MOL / 8.314462 * (1 / (temperatureC + 273.15) - 1 / 298.15));

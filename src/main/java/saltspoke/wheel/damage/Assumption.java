@@ -12,9 +12,10 @@ public enum Assumption {
   /** Length of seat worn bare when the wheel is built. Catalogue. */
   SEAT_BARE("seat-bare", "x/÷ of the catalogue's 10..90 %", 0),
   /**
-   * Speed of oxygen reduction on the cathode. Science: 10–40 µA/cm² on carbon, so x/÷ 2 spans it.
+   * Speed of oxygen reduction on the cathode. Published figures for carbon span 10–40 µA/cm²; what
+   * is left after the calibration is the difference between rims and nipples.
    */
-  CATHODE_SPEED("cathode-speed", "x/÷ 1.5", Math.log(1.5)),
+  CATHODE_SPEED("cathode-speed", "x/÷ 1.3", Math.log(1.3)),
   /** Attack beyond Faraday's current: galvanic current is under 30 % of the loss outdoors. */
   LOCAL_ATTACK("local-attack", "x/÷ 1.6", Math.log(1.6)),
   /** Hours in which the seat is wet. */
@@ -23,6 +24,8 @@ public enum Assumption {
   SALT_STORE("salt-store", "x/÷ 2", Math.log(2)),
   /** Share of the film's attack that reaches the thread past compound and fit. */
   THREAD_ACCESS("thread-access", "x/÷ 1.6", Math.log(1.6)),
+  /** Wear of a tensioned thread per hour of riding. */
+  FRETTING("fretting", "x/÷ 1.7", Math.log(1.7)),
   /** Room that product must fill before a nipple will not turn. */
   SEIZING_GAP("seizing-gap", "x/÷ 1.4", Math.log(1.4)),
   /** Loss at which attack is seen. */
@@ -40,10 +43,10 @@ public enum Assumption {
 
   /**
    * Change of ln rate per change of ln salt at the seat. More salt makes the film thicker and wet
-   * for longer, but past a few g/m² it only thickens brine. ASSUMPTION 0.3, measured on the shipped
-   * models at 0.1 to 0.6.
+   * for longer, but past a few g/m² it only thickens brine. Computed with the wheel's weather and the
+   * cell for aluminium on carbon: 0.35 to 0.4.
    */
-  public static final double SALT_ELASTICITY = 0.3;
+  public static final double SALT_ELASTICITY = 0.4;
 
   private final String id;
   private final String spread;
@@ -65,9 +68,7 @@ public enum Assumption {
     return spread;
   }
 
-  /**
-   * One standard deviation of the natural logarithm; 0 where the part or the air brings its own.
-   */
+  /** One standard deviation of the natural logarithm; 0 where the part or the air brings its own. */
   public double lnSpread() {
     return lnSpread;
   }

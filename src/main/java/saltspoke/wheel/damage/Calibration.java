@@ -8,7 +8,7 @@ public final class Calibration {
    * judged on the other two. It stands for what the cell's steady film leaves out: a new wheel's
    * films cover only part of the seat, and salt crusts choke them.
    */
-  public static final double RATE = 1.0;
+  public static final double RATE = 0.38;
 
   private Calibration() {}
 }

@@ -13,7 +13,8 @@ import saltspoke.wheel.Material;
  * @param spec the cell as built, over the ring that is bare then
  * @param wholeRing the cell once the coating is gone
  * @param bareShare share of the ring's length that is bare as built
- * @param activeShare of the cathode, for its spread only
+ * @param activeShare of the cathode's surface, for its spread only
+ * @param edgeShare bare share of the cut hole wall, for its spread only
  * @param shield coating of the other part that is eaten first, so that this couple starts only once
  *     it is gone; {@code null} for none
  */
@@ -24,6 +25,7 @@ public record Couple(
     CellSpec wholeRing,
     Quantiles bareShare,
     Quantiles activeShare,
+    Quantiles edgeShare,
     Coating shield) {
 
   /** Places at a spoke hole. */

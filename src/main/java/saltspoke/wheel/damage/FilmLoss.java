@@ -1,7 +1,9 @@
 package saltspoke.wheel.damage;
 
+import java.util.function.Function;
 import saltspoke.wheel.CellCurrents;
 import saltspoke.wheel.CellSpec;
+import saltspoke.wheel.Film;
 import saltspoke.wheel.WheelYear;
 
 /**
@@ -17,6 +19,7 @@ public record FilmLoss(double[] monthlyUm, double galvanicShare, double localSha
 
   /** Adds up the year's films. */
   public static FilmLoss over(WheelYear year, CellSpec spec, CellRates rates) {
+    Function<Film, CellCurrents> cell = rates.of(spec);
     double[] monthly = new double[12];
     double galvanic = 0;
     double local = 0;
@@ -26,7 +29,7 @@ public record FilmLoss(double[] monthlyUm, double galvanicShare, double localSha
         if (film.hours() <= 0 || film.film().thicknessUm() <= 0) {
           continue;
         }
-        CellCurrents now = rates.at(spec, film.film());
+        CellCurrents now = cell.apply(film.film());
         double um = now.penetrationUmPerYear() * film.hours() / HOURS_PER_YEAR;
         double driven = Math.max(0, now.galvanicUAPerCm2());
         double sum = driven + now.selfUAPerCm2() + now.localUAPerCm2();

@@ -6,30 +6,36 @@ import saltspoke.wheel.Material;
 public final class Products {
   /**
    * Radial room between the flanks of spoke and nipple thread that product must fill before the
-   * nipple will not turn, µm. ASSUMPTION from the pitch of 0.454 mm: about an eighth of it; spread
-   * in {@link Assumption#SEIZING_GAP}.
+   * nipple will not turn, µm. ASSUMPTION 40: an eleventh of the pitch of 0.454 mm, as fits of fine
+   * threads leave; spread in {@link Assumption#SEIZING_GAP}.
    */
-  public static final double THREAD_GAP_UM = 60;
+  public static final double THREAD_GAP_UM = 40;
 
   /**
-   * Room between nipple body and rim hole at the seat that product must fill before the nipple jams
-   * in the rim, µm. ASSUMPTION: half of 4.5 mm hole less 4.0 mm body; same spread.
+   * Share of the room between nipple body and rim hole that product must fill before the nipple
+   * jams in the rim: powder packs loosely. ASSUMPTION 0.5, same spread.
    */
-  public static final double SEAT_GAP_UM = 250;
+  public static final double SEAT_FILL = 0.5;
+
+  /**
+   * Share of the seizing loss at which a thread already turns stiff and shows product at its mouth.
+   * ASSUMPTION 0.25, half its spread in {@link Assumption#VISIBLE_DEPTH}.
+   */
+  public static final double STIFF_SHARE = 0.25;
 
   private Products() {}
 
   /**
    * Volume of product over volume of metal, from molar volumes (computed from densities recalled
-   * from memory): Al(OH)3 32 over 10.0 cm³; iron oxyhydroxide 21 over 7.1; brass between cuprous
-   * oxide 1.7 and the basic chlorides of copper and zinc about 4; zinc hydroxide chloride 3.
+   * from memory): Al(OH)3 32 over 10.0 cm³; iron oxyhydroxide 21 over 7.1; brass in chloride: Cu2(OH)3Cl
+   * 28.3 per copper over 7.1 and Zn5(OH)8Cl2·H2O 33 per zinc over 9.2, together 3.9.
    */
   static double volumeRatio(Material material) {
     return switch (material) {
       case ALUMINIUM_WROUGHT, ALUMINIUM_HIGH_STRENGTH -> 3.2;
       case CARBON_STEEL -> 3.0;
-      case BRASS, NICKEL, NICKEL_ALUMINIUM_BRONZE -> 2.5;
-      case ZINC -> 3.0;
+      case BRASS, NICKEL, NICKEL_ALUMINIUM_BRONZE -> 3.9;
+      case ZINC -> 3.6;
       case STAINLESS, STAINLESS_PH, TITANIUM, PLATINUM, CARBON_FIBRE, POLYMER -> 1;
     };
   }
@@ -51,14 +57,13 @@ public final class Products {
       case CARBON_STEEL -> 10;
       case BRASS, NICKEL, NICKEL_ALUMINIUM_BRONZE -> 15;
       case ZINC -> 10;
-      case STAINLESS, STAINLESS_PH, TITANIUM, PLATINUM, CARBON_FIBRE, POLYMER ->
-          Double.POSITIVE_INFINITY;
+      case STAINLESS, STAINLESS_PH, TITANIUM, PLATINUM, CARBON_FIBRE, POLYMER -> Double.POSITIVE_INFINITY;
     };
   }
 
   /**
-   * Uniform loss of an open surface at which it looks attacked, µm: dull brass, bloom on aluminium,
-   * rust. ASSUMPTION, same spread.
+   * Uniform loss of an open surface at which it looks attacked, µm: dull brass, bloom on
+   * aluminium, rust. ASSUMPTION, same spread.
    */
   public static double visibleInOpenUm(Material material) {
     return switch (material) {

@@ -2,47 +2,62 @@ package saltspoke.wheel.damage;
 
 /**
  * The loss of a settled year, month by month, repeated from the month in which the wheel goes into
- * service.
+ * service, while the wheel matures.
  *
- * <p>Damage done in the first three months counts twice: pits grow 1.5 to 2.5 times deeper when
- * exposure starts in winter (Carter and Campbell). Whoever builds into a mild season so gains
- * twice, and more hours of a film never lengthen a life.
+ * <p>Damage of winter months in the first year counts more: pits grow 1.5 to 2.5 times deeper when
+ * exposure starts in winter (Carter and Campbell). The weight of a month does not depend on the
+ * damage in it, so that more hours of a film never lengthen a life.
  */
-public final class SeasonalDose implements DoseCurve {
-  /** Months of the start that count more. ASSUMPTION: one season. */
-  static final double START_MONTHS = 3;
+final class SeasonalDose implements DoseCurve {
+  /** Longest time it is asked for, months; it goes on straight beyond. */
+  private static final int MONTHS = 480;
 
-  /** Extra weight of the start: middle of the published 1.5 to 2.5, less one. */
-  static final double START_EXTRA = 1;
+  /** Months of the start in which winter weighs more. ASSUMPTION: one season. */
+  private static final int START_MONTHS = 3;
 
-  private final double[] sumUm = new double[13];
+  /** Extra weight of the coldest month then: middle of the published 1.5 to 2.5, less one. */
+  private static final double WINTER_EXTRA = 1;
+
+  private final double[] pieceUm = new double[MONTHS + 1];
+  private final double[] sumUm = new double[MONTHS + 1];
+  private final Maturity maturity;
+  private final double meanUm;
 
   /**
-   * @param monthlyUm loss in January to December, µm
+   * @param monthlyUm loss in January to December of a settled year, µm
    * @param buildMonth month of going into service, 1..12
+   * @param winter weight of winter in each calendar month, 0..1
+   * @param maturity how the wheel grows into the settled year
    */
-  public SeasonalDose(double[] monthlyUm, int buildMonth) {
-    for (int i = 0; i < 12; i++) {
-      sumUm[i + 1] = sumUm[i] + monthlyUm[(buildMonth - 1 + i) % 12];
+  SeasonalDose(double[] monthlyUm, int buildMonth, double[] winter, Maturity maturity) {
+    this.maturity = maturity;
+    double year = 0;
+    for (double um : monthlyUm) {
+      year += um;
+    }
+    meanUm = year / 12;
+    double before = 0;
+    for (int i = 0; i <= MONTHS; i++) {
+      int calendar = (buildMonth - 1 + i) % 12;
+      double extra = i < START_MONTHS ? WINTER_EXTRA * winter[calendar] : 0;
+      pieceUm[i] = monthlyUm[calendar] * (1 + extra);
+      if (i < MONTHS) {
+        double after = maturity.settledMonths(i + 1);
+        sumUm[i + 1] = sumUm[i] + pieceUm[i] * (after - before);
+        before = after;
+      }
     }
   }
 
   @Override
   public double um(double months) {
-    return plainUm(months) + START_EXTRA * plainUm(Math.min(months, START_MONTHS));
+    int whole = Math.min((int) months, MONTHS);
+    return sumUm[whole]
+        + pieceUm[whole] * (maturity.settledMonths(months) - maturity.settledMonths(whole));
   }
 
   @Override
   public DoseCurve steady() {
-    double perMonthUm = sumUm[12] / 12;
-    return months -> months * perMonthUm;
-  }
-
-  private double plainUm(double months) {
-    double years = Math.floor(months / 12);
-    double rest = months - 12 * years;
-    int whole = (int) rest;
-    double part = rest - whole;
-    return years * sumUm[12] + sumUm[whole] + part * (sumUm[whole + 1] - sumUm[whole]);
+    return months -> meanUm * maturity.settledMonths(months);
   }
 }

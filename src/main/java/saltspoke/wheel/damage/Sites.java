@@ -9,6 +9,7 @@ import java.util.Optional;
 import saltspoke.atmosphere.AirClimate;
 import saltspoke.atmosphere.Metal;
 import saltspoke.atmosphere.MetalCorrosivity;
+import saltspoke.atmosphere.MonthAir;
 import saltspoke.values.Quantiles;
 import saltspoke.wheel.CellSpec;
 import saltspoke.wheel.Coating;
@@ -28,14 +29,17 @@ public final class Sites {
   private static final double Z90 = 1.2815515655446004;
 
   /**
-   * How the galvanic current answers to the cathode's active share: part of it comes from the cut
-   * hole wall, part from a ring whose reach shrinks as its activity grows (current ~ square root
-   * where ohmic loss limits). ASSUMPTION 0.7 between 0.5 and 1.
+   * Change of ln current per change of ln active share of the rim's surface: most of the current
+   * comes from the cut wall of the hole. Computed with the cell for aluminium on bare carbon in a
+   * salted shed: 0.07.
    */
-  private static final double ACTIVE_ELASTICITY = 0.7;
+  private static final double ACTIVE_ELASTICITY = 0.07;
 
-  /** How the current answers to the length of bare ring: the cathode limits it, so little. */
-  private static final double RING_ELASTICITY = 0.3;
+  /** The same for the bare share of the hole's cut wall: 0.5. */
+  private static final double EDGE_ELASTICITY = 0.5;
+
+  /** The same for the length of the bare ring: 0.2. */
+  private static final double RING_ELASTICITY = 0.2;
 
   /** Loss of the rim bed over its thickness at which it cracks at the hole. ASSUMPTION. */
   private static final double BED_SHARE = 0.5;
@@ -43,11 +47,20 @@ public final class Sites {
   /** Tensile strength of spoke wire, MPa, common practice. */
   private static final double WIRE_MPA = 1000;
 
+  private static final Maturity SEAT = new Maturity(0);
+  private static final Maturity OILED = new Maturity(9);
+  private static final Maturity GREASED = new Maturity(24);
+  private static final Maturity PASTED = new Maturity(48);
+
+  /** Half-range of monthly temperature from which on a climate has a full winter, K. ASSUMPTION. */
+  private static final double WINTER_HALF_RANGE_K = 5;
+
   private final AirClimate air;
   private final RidingProfile profile;
   private final WheelBuild build;
   private final int buildMonth;
   private final CellRates rates;
+  private final double[] winter;
   private final Map<WheelYear, Map<CellSpec, FilmLoss>> losses = new HashMap<>();
 
   public Sites(
@@ -57,6 +70,7 @@ public final class Sites {
     this.build = build;
     this.buildMonth = buildMonth;
     this.rates = rates;
+    this.winter = winter(air);
   }
 
   /** All sites of a pairing. */
@@ -65,19 +79,28 @@ public final class Sites {
     double wetShare =
         year.months().stream().mapToDouble(WheelYear.Month::wetHours).sum()
             / FilmLoss.HOURS_PER_YEAR;
+    boolean nippleThread = false;
     for (Couple couple : SpokeHole.couples(parts)) {
       add(sites, parts, couple, year, wetShare);
+      nippleThread |= wornThread(couple);
+    }
+    if (!nippleThread) {
+      dryThread(parts).ifPresent(sites::add);
     }
     openAir(parts).ifPresent(sites::add);
     return sites;
   }
 
-  private void add(List<Site> sites, Parts parts, Couple couple, WheelYear year, double wetShare) {
+  private void add(
+      List<Site> sites, Parts parts, Couple couple, WheelYear year, double wetShare) {
     boolean thread = couple.where() == Couple.Where.THREAD;
     double factor = Calibration.RATE * (thread ? access(profile.threadCompound()) : 1);
+    Maturity maturity = thread ? threadMaturity(profile.threadCompound()) : SEAT;
     FilmLoss bare = loss(year, couple.spec());
     double share = couple.bareShare().median();
-    DoseCurve dose = new SeasonalDose(bare.scaled(factor * share), buildMonth);
+    double[] monthly = bare.scaled(factor * share);
+    double worn = wornThread(couple) ? addWear(monthly, couple.metal()) : 0;
+    DoseCurve dose = new SeasonalDose(monthly, buildMonth, winter, maturity);
     Coating coating = coatingOf(parts, couple);
     double through = CoatingLife.months(coating, wetShare);
     if (share < 1 && Double.isFinite(through)) {
@@ -87,12 +110,12 @@ public final class Sites {
       for (int i = 0; i < 12; i++) {
         more[i] = Math.max(0, more[i] - less[i]);
       }
-      dose = dose.plus(new SeasonalDose(more, buildMonth).after(through));
+      dose = dose.plus(new SeasonalDose(more, buildMonth, winter, maturity).after(through));
     }
     double delay = couple.delayMonths(wetShare);
     DoseCurve unshielded = dose;
     dose = dose.after(delay);
-    double[] ln = shifts(couple, bare, thread);
+    double[] ln = shifts(couple, bare, thread, worn);
     set(ln, Assumption.COATING_LIFE, coatingShift(dose, unshielded, through, delay));
     sites.add(
         new Site(
@@ -100,10 +123,56 @@ public final class Sites {
             thread ? "thread" : "seat",
             couple.metal(),
             dose,
-            bare.scaled(factor * share),
-            thread ? Double.POSITIVE_INFINITY : Products.visibleAtSeatUm(couple.metal()),
-            seized(couple),
+            monthly,
+            thread
+                ? seized(parts, couple) * Products.STIFF_SHARE
+                : Products.visibleAtSeatUm(couple.metal()),
+            seized(parts, couple),
             lost(parts, couple),
+            ln));
+  }
+
+  private static boolean wornThread(Couple couple) {
+    return couple.where() == Couple.Where.THREAD && couple.part().equals("nipple");
+  }
+
+  /** Adds a thread's wear to its corrosion; gives the share of the sum that is wear. */
+  private double addWear(double[] monthlyUm, Material metal) {
+    double access = access(profile.threadCompound());
+    double[] wear = Fretting.monthlyUm(metal, profile);
+    double worn = 0;
+    double all = 0;
+    for (int m = 0; m < 12; m++) {
+      monthlyUm[m] += access * wear[m];
+      worn += access * wear[m];
+      all += monthlyUm[m];
+    }
+    return all > 0 ? worn / all : 0;
+  }
+
+  /** A thread that does not corrode still wears and galls. */
+  private Optional<Site> dryThread(Parts parts) {
+    Material metal = parts.nipple().material();
+    if (Fretting.relative(metal) == 0) {
+      return Optional.empty();
+    }
+    double[] monthly = new double[12];
+    addWear(monthly, metal);
+    double[] ln = new double[Assumption.values().length];
+    set(ln, Assumption.FRETTING, Assumption.FRETTING.lnSpread());
+    set(ln, Assumption.THREAD_ACCESS, Assumption.THREAD_ACCESS.lnSpread());
+    double seized = Fretting.toFillUm(metal);
+    return Optional.of(
+        new Site(
+            "nipple",
+            "galling",
+            metal,
+            new SeasonalDose(
+                monthly, buildMonth, new double[12], threadMaturity(profile.threadCompound())),
+            monthly,
+            Double.POSITIVE_INFINITY,
+            seized,
+            Double.POSITIVE_INFINITY,
             ln));
   }
 
@@ -136,17 +205,43 @@ public final class Sites {
   }
 
   /**
-   * Share of the seat's attack that reaches the thread. ASSUMPTION: bare metal threads leave two
-   * fifths of the mouth open to the film, oil washes out, grease keeps most of it out, a paste with
-   * metal or ceramic filler nearly all; spread in {@link Assumption#THREAD_ACCESS}.
+   * Share of the film's attack that reaches the thread in the end. ASSUMPTION: all of it on dry or
+   * once oiled threads; what is left of grease and of a filled paste keeps two and three fifths out; spread in {@link Assumption#THREAD_ACCESS}.
    */
-  static double access(ThreadCompound compound) {
+  private static double access(ThreadCompound compound) {
     return switch (compound) {
-      case NONE -> 0.4;
-      case OIL -> 0.3;
-      case GREASE -> 0.15;
-      case ANTI_SEIZE -> 0.1;
+      case NONE, OIL -> 1;
+      case GREASE -> 0.6;
+      case ANTI_SEIZE -> 0.4;
     };
+  }
+
+  /** Months in which a compound washes out of the thread. ASSUMPTION, x/÷ 2, same entry. */
+  private static Maturity threadMaturity(ThreadCompound compound) {
+    return switch (compound) {
+      case NONE -> SEAT;
+      case OIL -> OILED;
+      case GREASE -> GREASED;
+      case ANTI_SEIZE -> PASTED;
+    };
+  }
+
+  /** Weight of winter in each month: 1 in the coldest, 0 in the warmest, less without seasons. */
+  private static double[] winter(AirClimate air) {
+    double coldest = Double.POSITIVE_INFINITY;
+    double warmest = Double.NEGATIVE_INFINITY;
+    for (MonthAir month : air.months()) {
+      coldest = Math.min(coldest, month.temperatureC());
+      warmest = Math.max(warmest, month.temperatureC());
+    }
+    double range = warmest - coldest;
+    double full = Math.min(1, range / (2 * WINTER_HALF_RANGE_K));
+    double[] weights = new double[12];
+    for (MonthAir month : air.months()) {
+      weights[month.month() - 1] =
+          range > 0 ? full * (warmest - month.temperatureC()) / range : 0;
+    }
+    return weights;
   }
 
   private static Coating coatingOf(Parts parts, Couple couple) {
@@ -154,17 +249,29 @@ public final class Sites {
       case "nipple" -> parts.nipple().coating();
       case "rim" -> parts.rim().coating();
       case "spoke" -> parts.spoke().coating();
-      default -> new Coating(Coating.Kind.NONE, 0, couple.bareShare(), couple.bareShare());
+      default -> new Coating(
+          Coating.Kind.NONE, 0, couple.bareShare(), couple.bareShare());
     };
   }
 
-  private static double seized(Couple couple) {
+  private static double seized(Parts parts, Couple couple) {
     if (couple.where() == Couple.Where.THREAD) {
       return couple.metal() == Material.ZINC
           ? Double.POSITIVE_INFINITY
           : Products.metalToFillUm(couple.metal(), Products.THREAD_GAP_UM);
     }
-    return Products.metalToFillUm(couple.metal(), Products.SEAT_GAP_UM);
+    return Products.metalToFillUm(couple.metal(), seatGapUm(parts, couple));
+  }
+
+  /** Room round the nipple's body in the rim hole over the area of the ring that feeds it, µm. */
+  private static double seatGapUm(Parts parts, Couple couple) {
+    double holeMm = parts.rim().holeDiameterMm();
+    double bodyMm = parts.nipple().bodyDiameterMm();
+    double roomMm3 =
+        Math.PI / 4 * (holeMm * holeMm - bodyMm * bodyMm) * parts.rim().bedThicknessMm();
+    double ringMm2 =
+        couple.wholeRing().ringCircumferenceMm() * couple.wholeRing().ringWidthMm();
+    return 1000 * Products.SEAT_FILL * roomMm3 / ringMm2;
   }
 
   private double lost(Parts parts, Couple couple) {
@@ -191,18 +298,33 @@ public final class Sites {
     return Double.POSITIVE_INFINITY;
   }
 
-  private static double[] shifts(Couple couple, FilmLoss loss, boolean thread) {
+  private static double[] shifts(Couple couple, FilmLoss loss, boolean thread, double worn) {
     double[] ln = new double[Assumption.values().length];
     double driven = loss.galvanicShare() + loss.localShare();
     double self = 1 - driven;
-    set(ln, Assumption.ACTIVE_SHARE, driven * ACTIVE_ELASTICITY * lnSpread(couple.activeShare()));
-    set(ln, Assumption.SEAT_BARE, (self + driven * RING_ELASTICITY) * lnSpread(couple.bareShare()));
+    set(
+        ln,
+        Assumption.ACTIVE_SHARE,
+        driven
+            * (ACTIVE_ELASTICITY * lnSpread(couple.activeShare())
+                + EDGE_ELASTICITY * lnSpread(couple.edgeShare())));
+    set(
+        ln,
+        Assumption.SEAT_BARE,
+        (self + driven * RING_ELASTICITY) * lnSpread(couple.bareShare()));
     set(ln, Assumption.CATHODE_SPEED, driven * Assumption.CATHODE_SPEED.lnSpread());
     set(ln, Assumption.LOCAL_ATTACK, loss.localShare() * Assumption.LOCAL_ATTACK.lnSpread());
     set(ln, Assumption.WET_HOURS, Assumption.WET_HOURS.lnSpread());
-    set(ln, Assumption.SALT_STORE, Assumption.SALT_ELASTICITY * Assumption.SALT_STORE.lnSpread());
-    set(ln, Assumption.THREAD_ACCESS, thread ? Assumption.THREAD_ACCESS.lnSpread() : 0);
+    set(
+        ln,
+        Assumption.SALT_STORE,
+        Assumption.SALT_ELASTICITY * Assumption.SALT_STORE.lnSpread());
     set(ln, Assumption.CALIBRATION, Assumption.CALIBRATION.lnSpread());
+    for (int k = 0; k < ln.length; k++) {
+      ln[k] *= 1 - worn;
+    }
+    set(ln, Assumption.FRETTING, worn * Assumption.FRETTING.lnSpread());
+    set(ln, Assumption.THREAD_ACCESS, thread ? Assumption.THREAD_ACCESS.lnSpread() : 0);
     return ln;
   }
 
