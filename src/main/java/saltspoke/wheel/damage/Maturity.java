@@ -33,8 +33,7 @@ final class Maturity {
     for (int i = 1; i < POINTS; i++) {
       double a = months(i - 1);
       double b = months(i);
-      integral[i] =
-          integral[i - 1] + (b - a) / 6 * (at(a) + 4 * at((a + b) / 2) + at(b));
+      integral[i] = integral[i - 1] + (b - a) / 6 * (at(a) + 4 * at((a + b) / 2) + at(b));
     }
   }
 

@@ -91,8 +91,7 @@ public final class Sites {
     return sites;
   }
 
-  private void add(
-      List<Site> sites, Parts parts, Couple couple, WheelYear year, double wetShare) {
+  private void add(List<Site> sites, Parts parts, Couple couple, WheelYear year, double wetShare) {
     boolean thread = couple.where() == Couple.Where.THREAD;
     double factor = Calibration.RATE * (thread ? access(profile.threadCompound()) : 1);
     Maturity maturity = thread ? threadMaturity(profile.threadCompound()) : SEAT;
@@ -206,7 +205,8 @@ public final class Sites {
 
   /**
    * Share of the film's attack that reaches the thread in the end. ASSUMPTION: all of it on dry or
-   * once oiled threads; what is left of grease and of a filled paste keeps two and three fifths out; spread in {@link Assumption#THREAD_ACCESS}.
+   * once oiled threads; what is left of grease and of a filled paste keeps two and three fifths
+   * out; spread in {@link Assumption#THREAD_ACCESS}.
    */
   private static double access(ThreadCompound compound) {
     return switch (compound) {
@@ -238,8 +238,7 @@ public final class Sites {
     double full = Math.min(1, range / (2 * WINTER_HALF_RANGE_K));
     double[] weights = new double[12];
     for (MonthAir month : air.months()) {
-      weights[month.month() - 1] =
-          range > 0 ? full * (warmest - month.temperatureC()) / range : 0;
+      weights[month.month() - 1] = range > 0 ? full * (warmest - month.temperatureC()) / range : 0;
     }
     return weights;
   }
@@ -249,8 +248,7 @@ public final class Sites {
       case "nipple" -> parts.nipple().coating();
       case "rim" -> parts.rim().coating();
       case "spoke" -> parts.spoke().coating();
-      default -> new Coating(
-          Coating.Kind.NONE, 0, couple.bareShare(), couple.bareShare());
+      default -> new Coating(Coating.Kind.NONE, 0, couple.bareShare(), couple.bareShare());
     };
   }
 
@@ -269,8 +267,7 @@ public final class Sites {
     double bodyMm = parts.nipple().bodyDiameterMm();
     double roomMm3 =
         Math.PI / 4 * (holeMm * holeMm - bodyMm * bodyMm) * parts.rim().bedThicknessMm();
-    double ringMm2 =
-        couple.wholeRing().ringCircumferenceMm() * couple.wholeRing().ringWidthMm();
+    double ringMm2 = couple.wholeRing().ringCircumferenceMm() * couple.wholeRing().ringWidthMm();
     return 1000 * Products.SEAT_FILL * roomMm3 / ringMm2;
   }
 
@@ -308,17 +305,11 @@ public final class Sites {
         driven
             * (ACTIVE_ELASTICITY * lnSpread(couple.activeShare())
                 + EDGE_ELASTICITY * lnSpread(couple.edgeShare())));
-    set(
-        ln,
-        Assumption.SEAT_BARE,
-        (self + driven * RING_ELASTICITY) * lnSpread(couple.bareShare()));
+    set(ln, Assumption.SEAT_BARE, (self + driven * RING_ELASTICITY) * lnSpread(couple.bareShare()));
     set(ln, Assumption.CATHODE_SPEED, driven * Assumption.CATHODE_SPEED.lnSpread());
     set(ln, Assumption.LOCAL_ATTACK, loss.localShare() * Assumption.LOCAL_ATTACK.lnSpread());
     set(ln, Assumption.WET_HOURS, Assumption.WET_HOURS.lnSpread());
-    set(
-        ln,
-        Assumption.SALT_STORE,
-        Assumption.SALT_ELASTICITY * Assumption.SALT_STORE.lnSpread());
+    set(ln, Assumption.SALT_STORE, Assumption.SALT_ELASTICITY * Assumption.SALT_STORE.lnSpread());
     set(ln, Assumption.CALIBRATION, Assumption.CALIBRATION.lnSpread());
     for (int k = 0; k < ln.length; k++) {
       ln[k] *= 1 - worn;
