@@ -29,11 +29,10 @@ function asked(advice, question) {
   );
 }
 
-function reasonFor(pairing) {
-  return words.firstOf(
-    [`advice-limited-${pairing.limitedBy}`, `advice-${pairing.limitedBy}`, pairing.limitedBy],
-    pairing.reasons.length ? words.say(pairing.reasons[0]) : "",
-  );
+/** The reason that sets the interval, else the foremost. */
+function limit(pairing) {
+  const reason = pairing.reasons.find(({ code }) => code.endsWith(pairing.limitedBy)) ?? pairing.reasons[0];
+  return reason ? words.say(reason) : "";
 }
 
 const firstLook = (pairing) =>
@@ -94,7 +93,7 @@ function tag(answer, question, index) {
         h("strong", {}, t("page-then-every", { span: words.span(pairing.everyMonths) })),
       ),
     ),
-    h("p", { class: "because" }, reasonFor(pairing)),
+    h("p", { class: "because" }, limit(pairing)),
     h(
       "dl",
       { class: "facts" },
@@ -263,6 +262,14 @@ function why(advice, pairing) {
   );
 }
 
+/** What a change is, with the title of the new part or choice in place of its id. */
+function changeTitle(change) {
+  const title = KINDS.includes(change.field)
+    ? partTitle(change.field, change.value)
+    : words.firstOf([`page-${camel(change.field)}-${change.value}`], change.value);
+  return words.fill(change.what, { value: title });
+}
+
 const camel = (name) => name.replace(/-(.)/g, (_, letter) => letter.toUpperCase());
 
 function tryChange(change) {
@@ -303,7 +310,7 @@ function changes(advice) {
         h(
           "li",
           {},
-          h("span", { class: "change-what" }, words.say(change.what)),
+          h("span", { class: "change-what" }, changeTitle(change)),
           h("span", { class: "cost", "data-cost": change.cost }, t(`page-cost-${change.cost}`)),
           h(
             "span",
@@ -312,7 +319,7 @@ function changes(advice) {
             h("small", {}, t("page-change-factor", { factor: words.number(change.factor, 1) })),
           ),
           canTry(change)
-            ? h("button", { type: "button", class: "quiet small", onclick: () => tryChange(change), "aria-label": `${t("page-try")}: ${words.say(change.what)}` }, t("page-try"))
+            ? h("button", { type: "button", class: "quiet small", onclick: () => tryChange(change), "aria-label": `${t("page-try")}: ${changeTitle(change)}` }, t("page-try"))
             : h("span", {}),
         ),
       ),

@@ -41,6 +41,17 @@ export function firstOf(codes, otherwise) {
 /** A note from the server: its own sentence in the page's language. */
 export const say = (note) => note.text ?? t(note.code, note.args);
 
+/** A note's sentence with some gaps filled by the page instead of the server. */
+export function fill(note, values) {
+  if (sentences[note.code] === undefined) {
+    return say(note);
+  }
+  const args = Object.fromEntries(
+    Object.entries(note.args ?? {}).map(([name, value]) => [name, typeof value === "number" ? rough(value) : value]),
+  );
+  return t(note.code, { ...args, ...values });
+}
+
 export function number(value, digits = 0) {
   return new Intl.NumberFormat(language, { maximumFractionDigits: digits }).format(value);
 }

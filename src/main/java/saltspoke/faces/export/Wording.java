@@ -73,13 +73,14 @@ final class Wording {
     return String.join(" · ", parts);
   }
 
-  /** The sentence on what sets the interval, else the foremost reason. */
+  /** The reason that sets the interval, else the foremost. */
   String limit(PairingAdvice advice) {
-    String code = "advice-limited-" + advice.limitedBy();
-    if (texts.all().containsKey(code)) {
-      return say(code);
-    }
-    return advice.reasons().isEmpty() ? "" : say(advice.reasons().get(0));
+    return advice.reasons().stream()
+        .filter(reason -> reason.code().endsWith(advice.limitedBy()))
+        .findFirst()
+        .or(() -> advice.reasons().stream().findFirst())
+        .map(this::say)
+        .orElse("");
   }
 
   /** A span to act within, rounded down: better a week early than a week late. */
