@@ -11,6 +11,8 @@ import * as words from "./words.js";
 
 const { t } = words;
 const KINDS = ["rim", "nipple", "interface", "spoke"];
+const SHOWN_CHANGES = 7;
+const WORTH_A_LINE = 1.1;
 const URGENT_MONTHS = 1.5;
 const OVERDUE_MONTHS = 0.1;
 
@@ -296,34 +298,47 @@ const canTry = (change) =>
   (app.profiles[0][camel(change.field)] !== undefined && camel(change.field) !== "months") ||
   ["risk", "tape-sound", "hidden-nipples", "build-month"].includes(change.field);
 
+function changeRow(change) {
+  const title = changeTitle(change);
+  return h(
+    "li",
+    {},
+    h("span", { class: "change-what" }, title),
+    h("span", { class: "cost", "data-cost": change.cost }, t(`page-cost-${change.cost}`)),
+    h(
+      "span",
+      { class: "change-gain" },
+      t("page-change-gain", { first: words.span(change.firstLookMonths), every: words.span(change.everyMonths) }),
+      h("small", {}, t("page-change-factor", { factor: words.number(change.factor, 1) })),
+    ),
+    canTry(change)
+      ? h(
+          "button",
+          { type: "button", class: "quiet small", onclick: () => tryChange(change), "aria-label": `${t("page-try")}: ${title}` },
+          t("page-try"),
+        )
+      : h("span", {}),
+  );
+}
+
 function changes(advice) {
-  if (advice.changes.length === 0) {
-    return null;
-  }
+  const helpful = advice.changes.filter((change) => change.factor >= WORTH_A_LINE);
+  const best = helpful.slice(0, SHOWN_CHANGES);
+  const rest = advice.changes.filter((change) => !best.includes(change));
   return block(
     "changes",
     t("page-changes"),
-    h(
-      "ul",
-      { class: "changes" },
-      advice.changes.map((change) =>
-        h(
-          "li",
+    best.length
+      ? h("ul", { class: "changes" }, best.map(changeRow))
+      : h("p", {}, t("page-changes-none")),
+    rest.length
+      ? h(
+          "details",
           {},
-          h("span", { class: "change-what" }, changeTitle(change)),
-          h("span", { class: "cost", "data-cost": change.cost }, t(`page-cost-${change.cost}`)),
-          h(
-            "span",
-            { class: "change-gain" },
-            t("page-change-gain", { first: words.span(change.firstLookMonths), every: words.span(change.everyMonths) }),
-            h("small", {}, t("page-change-factor", { factor: words.number(change.factor, 1) })),
-          ),
-          canTry(change)
-            ? h("button", { type: "button", class: "quiet small", onclick: () => tryChange(change), "aria-label": `${t("page-try")}: ${changeTitle(change)}` }, t("page-try"))
-            : h("span", {}),
-        ),
-      ),
-    ),
+          h("summary", {}, t("page-changes-rest", { count: rest.length })),
+          h("ul", { class: "changes" }, rest.map(changeRow)),
+        )
+      : null,
   );
 }
 

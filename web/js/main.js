@@ -332,7 +332,10 @@ function relabel() {
 
 function showCredits(about) {
   const attributions = new Set((about.dataSet?.files ?? []).map((file) => file.attribution).filter(Boolean));
-  byId("credits").textContent = [t("page-credits"), [...attributions].join(" · ")].join(" ");
+  byId("credits").replaceChildren(
+    h("p", {}, t("page-credits")),
+    h("details", {}, h("summary", {}, t("page-sources")), h("ul", {}, [...attributions].map((line) => h("li", {}, line)))),
+  );
 }
 
 async function begin() {
@@ -361,6 +364,9 @@ async function begin() {
     app.about = about;
     showCredits(about);
     draw();
+    if (app.questions.some(hasPlace)) {
+      remember();
+    }
     app.questions.forEach((_, index) => answerOne(index));
     document.documentElement.dataset.ready = "yes";
   } catch (failure) {

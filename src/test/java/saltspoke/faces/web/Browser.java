@@ -116,7 +116,8 @@ final class Browser implements AutoCloseable {
             (boolean)
                 script(
                     "return !!document.querySelector('.tag') && !document.querySelector('.stale')"
-                        + " && !document.querySelector('.waiting')"));
+                        + " && !document.querySelector('.waiting')"
+                        + " && !!document.querySelector('#others table')"));
     return driver.findElement(By.cssSelector(".tag"));
   }
 
