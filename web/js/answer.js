@@ -186,6 +186,7 @@ function takeAway() {
   const file = (extension, options) => {
     const label = t(`page-take-${extension}`);
     const path = extension === "json" ? "/api/advice" : `/api/advice.${extension}`;
+    const units = extension === "pdf" && app.view.units === "us" ? { units: "us" } : {};
     const posted = body(question, app.profiles, lang, options);
     if (posted) {
       return h(
@@ -195,7 +196,7 @@ function takeAway() {
           class: "quiet",
           onclick: async () => {
             try {
-              await download(path, posted, fileName(extension));
+              await download(path, { ...posted, ...units }, fileName(extension));
             } catch (failure) {
               byId("taken").textContent = app.wordsFor(
                 failure instanceof Refused ? failure : new Refused(0, { error: "unreachable" }),
@@ -206,7 +207,7 @@ function takeAway() {
         label,
       );
     }
-    const query = new URLSearchParams({ ...parameters(question, options), lang });
+    const query = new URLSearchParams({ ...parameters(question, options), lang, ...units });
     return h("a", { class: "button quiet", href: `${path}?${query}`, download: fileName(extension) }, label);
   };
   return h(
