@@ -101,8 +101,8 @@ final class MapResources {
   }
 
   /**
-   * Whether a point can be asked about, which it can up to 2 km off the shore. "No" is an answer here
-   * and no error, so that a click at sea is nothing a browser would complain about.
+   * Whether a point can be asked about, which it can up to 2 km off the shore. "No" is an answer
+   * here and no error, so that a click at sea is nothing a browser would complain about.
    */
   Reply spot(Ask ask) {
     double[] point = point(new Parameters(ask.query(), Set.of("at")));

@@ -105,7 +105,8 @@ final class Browser implements AutoCloseable {
   void open(String query) throws Exception {
     driver.manage().logs().get(LogType.BROWSER); // what an earlier test left behind
     driver.get(address() + query.replace(" ", "%20"));
-    await("the page is ready", () -> script("return document.documentElement.dataset.ready") != null);
+    await(
+        "the page is ready", () -> script("return document.documentElement.dataset.ready") != null);
   }
 
   /** Waits for an answer on the tag that belongs to the question asked last. */
@@ -141,9 +142,7 @@ final class Browser implements AutoCloseable {
   }
 
   void await(String what, java.util.function.BooleanSupplier done) {
-    new WebDriverWait(driver, PATIENCE)
-        .withMessage(what)
-        .until(unused -> done.getAsBoolean());
+    new WebDriverWait(driver, PATIENCE).withMessage(what).until(unused -> done.getAsBoolean());
   }
 
   static void pause(long milliseconds) {

@@ -142,7 +142,8 @@ class FlowBrowserTest {
     browser.driver.findElement(By.id("compare")).click();
     browser.choose("nipple", "brass-nickel");
     browser.await(
-        "two tags", () -> browser.driver.findElements(By.cssSelector(".tag:not(.stale)")).size() == 2);
+        "two tags",
+        () -> browser.driver.findElements(By.cssSelector(".tag:not(.stale)")).size() == 2);
     browser.await("a table", () -> !browser.driver.findElements(By.id("side-by-side")).isEmpty());
     assertTrue(browser.driver.getCurrentUrl().contains("b.nipple=brass-nickel"));
     browser.awaitMap();
@@ -164,8 +165,7 @@ class FlowBrowserTest {
   @Test
   void anUnknownPostcodeSaysWhatToDoInstead() throws Exception {
     browser.open("?postcode=00000&country=US");
-    browser.await(
-        "words", () -> !browser.driver.findElements(By.cssSelector(".failed")).isEmpty());
+    browser.await("words", () -> !browser.driver.findElements(By.cssSelector(".failed")).isEmpty());
     String words = browser.text("verdict");
     assertTrue(words.contains("town"), words);
     assertFalse(words.contains("page-"), words);
@@ -196,7 +196,9 @@ class FlowBrowserTest {
     browser.answer();
     for (String[] file :
         new String[][] {
-          {"advice.pdf", "application/pdf"}, {"advice.csv", "text/csv"}, {"/advice?", "application/json"}
+          {"advice.pdf", "application/pdf"},
+          {"advice.csv", "text/csv"},
+          {"/advice?", "application/json"}
         }) {
       String link =
           browser

@@ -132,11 +132,15 @@ class LooksBrowserTest {
     Object paint =
         browser.script(
             "return performance.getEntriesByName('first-contentful-paint')[0]?.startTime");
-    Object answer =
-        browser.script("return performance.getEntriesByName('answer')[0]?.startTime");
+    Object answer = browser.script("return performance.getEntriesByName('answer')[0]?.startTime");
     System.out.println(
-        "page weight without tiles " + bytes + " bytes; first paint " + paint
-            + " ms; first answer " + answer + " ms after navigation, warmed server");
+        "page weight without tiles "
+            + bytes
+            + " bytes; first paint "
+            + paint
+            + " ms; first answer "
+            + answer
+            + " ms after navigation, warmed server");
     assertTrue(bytes < MOST_PAGE_BYTES, bytes + " bytes");
   }
 }

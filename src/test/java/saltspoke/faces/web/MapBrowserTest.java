@@ -59,7 +59,9 @@ class MapBrowserTest {
   void everyLayerHasALegendAndAValueUnderThePointer() throws Exception {
     browser.open("");
     for (String layer :
-        new String[] {"class-carbon-steel", "class-zinc", "wet-hours", "chloride", "near-freezing-days"}) {
+        new String[] {
+          "class-carbon-steel", "class-zinc", "wet-hours", "chloride", "near-freezing-days"
+        }) {
       browser.choose("layer", layer);
       browser.await(
           "legend",
@@ -88,7 +90,8 @@ class MapBrowserTest {
     int width = map().getSize().getWidth();
     int height = map().getSize().getHeight();
     for (int i = 0; i < CLICKS; i++) {
-      clickAt(random.nextInt(width - 8) - width / 2 + 4, random.nextInt(height - 8) - height / 2 + 4);
+      clickAt(
+          random.nextInt(width - 8) - width / 2 + 4, random.nextInt(height - 8) - height / 2 + 4);
     }
     browser.await(
         "a settled page",
