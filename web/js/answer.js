@@ -92,7 +92,7 @@ function tag(answer, question, index) {
         { class: "then" },
         t("page-by-date", { date: words.date(words.dateIn(pairing.firstLookMonths)) }),
         " ",
-        h("strong", {}, t("page-then-every", { span: words.span(pairing.everyMonths) })),
+        h("strong", {}, t("page-then-every", { every: words.every(pairing.everyMonths) })),
       ),
     ),
     h("p", { class: "because" }, limit(pairing)),
@@ -309,7 +309,7 @@ function changeRow(change) {
     h(
       "span",
       { class: "change-gain" },
-      t("page-change-gain", { first: words.span(change.firstLookMonths), every: words.span(change.everyMonths) }),
+      t("page-change-gain", { first: words.span(change.firstLookMonths), every: words.every(change.everyMonths) }),
       h("small", {}, t("page-change-factor", { factor: words.number(change.factor, 1) })),
     ),
     canTry(change)
@@ -489,7 +489,7 @@ function detailsOf(answer, question) {
 /** What a screen reader hears and the strip on a phone shows once an answer is there. */
 function oneLine(answer, question) {
   const pairing = asked(answer.advice, question);
-  return t("page-one-line", { first: firstLook(pairing), every: words.span(pairing.everyMonths) });
+  return t("page-one-line", { first: firstLook(pairing), every: words.every(pairing.everyMonths) });
 }
 
 /** Draws everything that depends on the answers. */

@@ -85,10 +85,24 @@ final class Wording {
 
   /** A span to act within, rounded down: better a week early than a week late. */
   String span(double months) {
+    return counted(unit(months), floored(months));
+  }
+
+  /** "every 3 months", as each language says it for one and for several. */
+  String every(double months) {
+    String code = "page-each-" + unit(months);
+    return floored(months) == 1 ? say(code) : say(code + "s", Map.of("span", span(months)));
+  }
+
+  private static String unit(double months) {
+    return months < 1 ? "week" : "month";
+  }
+
+  private static double floored(double months) {
     if (months < 1) {
-      return counted("week", Math.max(1, Math.floor(months * WEEKS_PER_MONTH)));
+      return Math.max(1, Math.floor(months * WEEKS_PER_MONTH));
     }
-    return counted("month", months < 6 ? Math.floor(months * 2) / 2 : Math.floor(months));
+    return months < 6 ? Math.floor(months * 2) / 2 : Math.floor(months);
   }
 
   /** When a state is reached, as a range; what lies beyond the horizon says so. */
