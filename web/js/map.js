@@ -119,8 +119,16 @@ async function showLayer() {
     maxZoom: MOST_ZOOM,
     className: "value-tiles",
   }).addTo(map);
+  tiles.on("loading", () => {
+    byId("pointer").textContent = t("page-map-drawing");
+  });
+  tiles.on("load", () => {
+    if (byId("pointer").textContent === t("page-map-drawing")) {
+      byId("pointer").textContent = "";
+    }
+  });
   legend = null;
-  byId("pointer").textContent = "";
+  byId("pointer").textContent = t("page-map-drawing");
   try {
     legend = await ask("legend", `/api/legend/${layer}`);
   } catch {
