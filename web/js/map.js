@@ -118,7 +118,7 @@ async function showLayer() {
   tiles = L.tileLayer(`/api/tiles/${layer}/{z}/{x}/{y}.png`, {
     maxZoom: MOST_ZOOM,
     className: "value-tiles",
-  }).addTo(map);
+  });
   tiles.on("loading", () => {
     byId("pointer").textContent = t("page-map-drawing");
   });
@@ -127,8 +127,8 @@ async function showLayer() {
       byId("pointer").textContent = "";
     }
   });
+  tiles.addTo(map);
   legend = null;
-  byId("pointer").textContent = t("page-map-drawing");
   try {
     legend = await ask("legend", `/api/legend/${layer}`);
   } catch {
