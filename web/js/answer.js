@@ -265,11 +265,23 @@ function why(advice, pairing) {
   );
 }
 
+/** The new part or choice of a change in words. */
+function valueTitle({ field, value }) {
+  if (KINDS.includes(field)) {
+    return partTitle(field, value);
+  }
+  if (value === "true" || value === "false") {
+    return t(value === "true" ? "page-saltedRoads-yes" : "page-saltedRoads-no");
+  }
+  if (field.endsWith("-share") || field.endsWith("Share")) {
+    return Number(value) < 0 ? t("page-by-climate") : words.percent(Number(value));
+  }
+  return words.firstOf([`page-${camel(field)}-${value}`], value);
+}
+
 /** What a change is, with the title of the new part or choice in place of its id. */
 function changeTitle(change) {
-  const title = KINDS.includes(change.field)
-    ? partTitle(change.field, change.value)
-    : words.firstOf([`page-${camel(change.field)}-${change.value}`], change.value);
+  const title = valueTitle(change);
   return words.fill(change.what, { value: title });
 }
 
