@@ -1,6 +1,5 @@
 package saltspoke.advice;
 
-import java.util.List;
 import saltspoke.wheel.Pairing;
 import saltspoke.wheel.damage.Parts;
 import saltspoke.wheel.damage.Site;
@@ -8,7 +7,6 @@ import saltspoke.wheel.damage.Site;
 /**
  * One pairing worked out under one request.
  *
- * @param sites its ways of going bad
  * @param risk chances over time
  * @param look kind of look that shows it
  * @param interval the rule's answer
@@ -16,15 +14,14 @@ import saltspoke.wheel.damage.Site;
 record Case(
     Pairing pairing,
     Parts parts,
-    List<Site> sites,
     WheelRisk risk,
     LookKind look,
     Interval interval) {
 
   /** The site that brings a state about first; null when none can. */
   Site leader(State state) {
-    int i = risk.leader(state);
-    return i < 0 ? null : sites.get(i);
+    SiteRisk first = risk.leader(state);
+    return first == null ? null : first.site();
   }
 
   /** The site that decides the interval: what seizes first, else what is lost, else what shows. */

@@ -36,7 +36,7 @@ public class Explore {
       double salt=shop.year().months().stream().mapToDouble(m->m.salt().totalMgClPerM2()).sum()/12;
       int nf=shop.year().months().stream().mapToInt(m->m.films().size()).sum();
       System.out.printf("%n== %s  wet %.0f h/a salt %.0f mg films %d  %.0f ms%n",c[0],wet,salt,nf,(System.nanoTime()-t0)/1e6);
-      for(Site s:k.sites()){ double y=0; for(double v:s.monthlyUm()) y+=v;
+      for(Site s:java.util.List.of(k.limiting()==null?k.leader(State.ATTACKED):k.limiting())){ double y=0; for(double v:s.monthlyUm()) y+=v;
         System.out.printf("   %s/%s %s: %.2f um/a (wet-rate %.0f um/a) visible %.1f seized %.1f lost %.1f%n",s.part(),s.cause(),s.metal(),y,y/Math.max(1,wet)*8766,s.visibleUm(),s.seizedUm(),s.lostUm());}
       System.out.printf("   attack %s  seized %s  lost %s%n   first %.2f every %.2f (%s) repl %s by %s%n",t(p.firstAttackMonths()),t(p.seizedMonths()),t(p.headLossMonths()),p.firstLookMonths(),p.everyMonths(),k.interval().everyLimitedBy(),p.replaceByMonths(),p.limitedBy());
     }

@@ -14,6 +14,7 @@ import saltspoke.values.Quantiles;
 import saltspoke.wheel.CellSpec;
 import saltspoke.wheel.Coating;
 import saltspoke.wheel.Material;
+import saltspoke.wheel.Nipple;
 import saltspoke.wheel.RidingProfile;
 import saltspoke.wheel.Spoke;
 import saltspoke.wheel.ThreadCompound;
@@ -61,11 +62,23 @@ public final class Sites {
   private final int buildMonth;
   private final CellRates rates;
   private final double[] winter;
-  private final Map<WheelYear, Map<CellSpec, FilmLoss>> losses = new HashMap<>();
+  private final WheelYear year;
+  private final double wetShare;
+  private final Map<CellSpec, FilmLoss> losses = new HashMap<>();
+  private final Map<Object, Site> made = new HashMap<>();
 
   public Sites(
-      AirClimate air, RidingProfile profile, WheelBuild build, int buildMonth, CellRates rates) {
+      AirClimate air,
+      RidingProfile profile,
+      WheelBuild build,
+      int buildMonth,
+      WheelYear year,
+      CellRates rates) {
     this.air = air;
+    this.year = year;
+    this.wetShare =
+        year.months().stream().mapToDouble(WheelYear.Month::wetHours).sum()
+            / FilmLoss.HOURS_PER_YEAR;
     this.profile = profile;
     this.build = build;
     this.buildMonth = buildMonth;
@@ -74,29 +87,35 @@ public final class Sites {
   }
 
   /** All sites of a pairing. */
-  public List<Site> of(Parts parts, WheelYear year) {
+  public List<Site> of(Parts parts) {
     List<Site> sites = new ArrayList<>();
-    double wetShare =
-        year.months().stream().mapToDouble(WheelYear.Month::wetHours).sum()
-            / FilmLoss.HOURS_PER_YEAR;
     boolean nippleThread = false;
     for (Couple couple : SpokeHole.couples(parts)) {
-      add(sites, parts, couple, year, wetShare);
+      sites.add(made.computeIfAbsent(key(parts, couple), k -> site(parts, couple)));
       nippleThread |= wornThread(couple);
     }
-    if (!nippleThread) {
-      dryThread(parts).ifPresent(sites::add);
+    Nipple nipple = parts.nipple();
+    if (!nippleThread && Fretting.relative(nipple.material()) > 0) {
+      sites.add(made.computeIfAbsent(List.of("galling", nipple.id()), k -> dryThread(nipple)));
     }
-    openAir(parts).ifPresent(sites::add);
+    if (showsInOpenAir(nipple)) {
+      sites.add(made.computeIfAbsent(List.of("open-air", nipple.id()), k -> openAir(nipple)));
+    }
     return sites;
   }
 
-  private void add(
-      List<Site> sites, Parts parts, Couple couple, WheelYear year, double wetShare) {
+  /** Everything that a couple's site depends on besides the question itself. */
+  private static Object key(Parts parts, Couple couple) {
+    boolean thread = couple.where() == Couple.Where.THREAD;
+    return List.of(
+        couple, parts.nipple().id(), thread ? parts.spoke().id() : parts.rim().id());
+  }
+
+  private Site site(Parts parts, Couple couple) {
     boolean thread = couple.where() == Couple.Where.THREAD;
     double factor = Calibration.RATE * (thread ? access(profile.threadCompound()) : 1);
     Maturity maturity = thread ? threadMaturity(profile.threadCompound()) : SEAT;
-    FilmLoss bare = loss(year, couple.spec());
+    FilmLoss bare = loss(couple.spec());
     double share = couple.bareShare().median();
     double[] monthly = bare.scaled(factor * share);
     double worn = wornThread(couple) ? addWear(monthly, couple.metal()) : 0;
@@ -104,7 +123,7 @@ public final class Sites {
     Coating coating = coatingOf(parts, couple);
     double through = CoatingLife.months(coating, wetShare);
     if (share < 1 && Double.isFinite(through)) {
-      FilmLoss whole = loss(year, couple.wholeRing());
+      FilmLoss whole = loss(couple.wholeRing());
       double[] more = whole.scaled(factor);
       double[] less = bare.scaled(factor * share);
       for (int i = 0; i < 12; i++) {
@@ -117,8 +136,7 @@ public final class Sites {
     dose = dose.after(delay);
     double[] ln = shifts(couple, bare, thread, worn);
     set(ln, Assumption.COATING_LIFE, coatingShift(dose, unshielded, through, delay));
-    sites.add(
-        new Site(
+    return new Site(
             couple.part(),
             thread ? "thread" : "seat",
             couple.metal(),
@@ -129,7 +147,7 @@ public final class Sites {
                 : Products.visibleAtSeatUm(couple.metal()),
             seized(parts, couple),
             lost(parts, couple),
-            ln));
+            ln);
   }
 
   private static boolean wornThread(Couple couple) {
@@ -151,19 +169,15 @@ public final class Sites {
   }
 
   /** A thread that does not corrode still wears and galls. */
-  private Optional<Site> dryThread(Parts parts) {
-    Material metal = parts.nipple().material();
-    if (Fretting.relative(metal) == 0) {
-      return Optional.empty();
-    }
+  private Site dryThread(Nipple nipple) {
+    Material metal = nipple.material();
     double[] monthly = new double[12];
     addWear(monthly, metal);
     double[] ln = new double[Assumption.values().length];
     set(ln, Assumption.FRETTING, Assumption.FRETTING.lnSpread());
     set(ln, Assumption.THREAD_ACCESS, Assumption.THREAD_ACCESS.lnSpread());
     double seized = Fretting.toFillUm(metal);
-    return Optional.of(
-        new Site(
+    return new Site(
             "nipple",
             "galling",
             metal,
@@ -173,7 +187,7 @@ public final class Sites {
             Double.POSITIVE_INFINITY,
             seized,
             Double.POSITIVE_INFINITY,
-            ln));
+            ln);
   }
 
   /**
@@ -198,10 +212,8 @@ public final class Sites {
     return um > 0 && longer > 0 ? Math.max(-1, Math.min(0, Math.log(longer / um))) : 0;
   }
 
-  private FilmLoss loss(WheelYear year, CellSpec spec) {
-    return losses
-        .computeIfAbsent(year, y -> new HashMap<>())
-        .computeIfAbsent(spec, s -> FilmLoss.over(year, s, rates));
+  private FilmLoss loss(CellSpec spec) {
+    return losses.computeIfAbsent(spec, s -> FilmLoss.over(year, s, rates));
   }
 
   /**
@@ -336,38 +348,38 @@ public final class Sites {
     return share.p10() > 0 ? Math.log(share.p90() / share.p10()) / (2 * Z90) : 0;
   }
 
-  private Optional<Site> openAir(Parts parts) {
-    Material metal = SpokeHole.surface(parts.nipple());
-    Optional<Metal> standard = standard(metal);
-    double visible = Products.visibleInOpenUm(metal);
-    if (build.hiddenNipples() || standard.isEmpty()) {
-      return Optional.empty();
-    }
+  /** Whether the outside of a nipple can be seen to suffer from the air alone. */
+  private boolean showsInOpenAir(Nipple nipple) {
+    Material metal = SpokeHole.surface(nipple);
+    return !build.hiddenNipples()
+        && nipple.coating().kind() != Coating.Kind.ANODIC
+        && standard(metal).isPresent()
+        && Double.isFinite(Products.visibleInOpenUm(metal));
+  }
+
+  private Site openAir(Nipple nipple) {
+    Material metal = SpokeHole.surface(nipple);
     MetalCorrosivity loss =
         air.corrosivity().stream()
-            .filter(entry -> entry.metal() == standard.get())
+            .filter(entry -> entry.metal() == standard(metal).orElseThrow())
             .findFirst()
             .orElseThrow();
-    if (parts.nipple().coating().kind() == Coating.Kind.ANODIC) {
-      return Optional.empty();
-    }
     PowerLawDose dose = PowerLawDose.of(loss, Shelter.share(profile));
     double[] monthly = new double[12];
     Arrays.fill(monthly, dose.firstYearUm() / 12);
     double[] ln = new double[Assumption.values().length];
     set(ln, Assumption.AIR_LOSS, lnSpread(loss.firstYearLossUm()));
     set(ln, Assumption.SHELTER, Assumption.SHELTER.lnSpread());
-    return Optional.of(
-        new Site(
+    return new Site(
             "nipple",
             "open-air",
             metal,
             dose,
             monthly,
-            visible,
+            Products.visibleInOpenUm(metal),
             Double.POSITIVE_INFINITY,
             Double.POSITIVE_INFINITY,
-            ln));
+            ln);
   }
 
   private static Optional<Metal> standard(Material material) {
