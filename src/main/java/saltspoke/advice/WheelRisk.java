@@ -158,40 +158,53 @@ final class WheelRisk {
     return first;
   }
 
-  /** What a finding at an age leaves of each draw. */
+  /**
+   * What a finding at an age leaves of each draw. A finding that no draw can explain (a clean wheel
+   * where all say it should be eaten) leaves the half of the draws that come nearest: those in which
+   * the worst nipple is slowest.
+   */
   private final class Belief {
     private final double ageMonths;
-    private final Evidence[] evidence = new Evidence[Draws.COUNT];
-    private final double[] weight = new double[Draws.COUNT];
+    private final Evidence evidence;
+    private final double[] attacked;
+    private final double[] seized;
+    private final double[] lost;
+    private final boolean surprising;
     private double weights;
 
     Belief(History history) {
       ageMonths = history.ageMonths();
+      evidence = new Evidence(history, worst);
       double place = SiteTable.place(ageMonths);
-      double[] attacked = zetas(State.ATTACKED, place);
-      double[] seized = zetas(State.SEIZED, place);
-      double[] lost = zetas(State.LOST, place);
-      double most = Double.NEGATIVE_INFINITY;
-      for (int n = 0; n < weight.length; n++) {
-        double[] zeta = {attacked[n], seized[n], lost[n]};
-        evidence[n] = Evidence.of(history, zeta, worst.nipples());
-        most = Math.max(most, evidence[n].lnWeight());
+      attacked = zetas(State.ATTACKED, place);
+      seized = zetas(State.SEIZED, place);
+      lost = zetas(State.LOST, place);
+      for (int n = 0; n < attacked.length; n++) {
+        weights += evidence.weight(attacked[n], seized[n], lost[n]);
       }
-      for (int n = 0; n < weight.length; n++) {
-        weight[n] = Math.exp(evidence[n].lnWeight() - most);
-        weights += weight[n];
-      }
+      surprising = weights < 1e-9;
     }
 
     double chance(State state, double months) {
       double[] zeta = zetas(state, SiteTable.place(ageMonths + months));
-      double free = 0;
-      for (int n = 0; n < weight.length; n++) {
-        if (weight[n] > 1e-12) {
-          free += weight[n] * evidence[n].freeShare(state, zeta[n]);
-        }
+      if (surprising) {
+        return surprised(zeta);
       }
-      return 1 - free / weights;
+      double free = 0;
+      for (int n = 0; n < zeta.length; n++) {
+        free += evidence.free(state, zeta[n], attacked[n], seized[n], lost[n]);
+      }
+      return Math.max(0, 1 - free / weights);
+    }
+
+    private double surprised(double[] zeta) {
+      double[] sorted = zeta.clone();
+      Arrays.sort(sorted);
+      double free = 0;
+      for (int n = sorted.length / 2; n < sorted.length; n++) {
+        free += worst.none(sorted[n]);
+      }
+      return 1 - free / (sorted.length - sorted.length / 2);
     }
   }
 }

@@ -23,10 +23,6 @@ final class WorstOf {
     }
   }
 
-  int nipples() {
-    return nipples;
-  }
-
   /** Chance that none passes z. */
   double none(double z) {
     if (!(z < MOST)) {
@@ -38,6 +34,11 @@ final class WorstOf {
     double at = (z - LEAST) * PER_UNIT;
     int i = (int) at;
     return none[i] + (at - i) * (none[i + 1] - none[i]);
+  }
+
+  /** Chance that none of all but one passes z. */
+  double noneOfOthers(double z) {
+    return Math.exp((nipples - 1) * Normal.lnCdf(z));
   }
 
   /** Scatter of the worst nipple in draw n. */

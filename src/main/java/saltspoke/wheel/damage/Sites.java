@@ -45,6 +45,9 @@ public final class Sites {
   /** Loss of the rim bed over its thickness at which it cracks at the hole. ASSUMPTION. */
   private static final double BED_SHARE = 0.5;
 
+  /** A coating that outlives this, twice what the advice looks ahead, is taken as lasting. */
+  private static final double HORIZON_MONTHS = 480;
+
   /** Tensile strength of spoke wire, MPa, common practice. */
   private static final double WIRE_MPA = 1000;
 
@@ -62,7 +65,7 @@ public final class Sites {
   private final int buildMonth;
   private final CellRates rates;
   private final double[] winter;
-  private final WheelYear year;
+  private final FilmPool films;
   private final double wetShare;
   private final Map<CellSpec, FilmLoss> losses = new HashMap<>();
   private final Map<Object, Site> made = new HashMap<>();
@@ -75,7 +78,7 @@ public final class Sites {
       WheelYear year,
       CellRates rates) {
     this.air = air;
-    this.year = year;
+    this.films = FilmPool.of(year);
     this.wetShare =
         year.months().stream().mapToDouble(WheelYear.Month::wetHours).sum()
             / FilmLoss.HOURS_PER_YEAR;
@@ -122,7 +125,7 @@ public final class Sites {
     DoseCurve dose = new SeasonalDose(monthly, buildMonth, winter, maturity);
     Coating coating = coatingOf(parts, couple);
     double through = CoatingLife.months(coating, wetShare);
-    if (share < 1 && Double.isFinite(through)) {
+    if (share < 1 && through < HORIZON_MONTHS) {
       FilmLoss whole = loss(couple.wholeRing());
       double[] more = whole.scaled(factor);
       double[] less = bare.scaled(factor * share);
@@ -213,7 +216,7 @@ public final class Sites {
   }
 
   private FilmLoss loss(CellSpec spec) {
-    return losses.computeIfAbsent(spec, s -> FilmLoss.over(year, s, rates));
+    return losses.computeIfAbsent(spec, s -> FilmLoss.over(films, s, rates));
   }
 
   /**
