@@ -37,6 +37,9 @@ final class Answer {
     if (leader == null) {
       return new StateTimes("nipple", null, null, null, false, true);
     }
+    if (history.finding() == Finding.ONE_STIFF && state != State.LOST) {
+      return new StateTimes(leader.part(), 0.0, 0.0, 0.0, false, false);
+    }
     WheelRisk risk = worked.risk();
     double horizon = RiskLimits.HORIZON_MONTHS;
     Double p10 = finite(risk.monthsTo(state, 0.1, history, horizon));

@@ -124,6 +124,11 @@ final class WheelRisk {
     return months > horizonMonths ? Double.POSITIVE_INFINITY : months;
   }
 
+  /** Whether no draw explains the finding, so that the look is to be trusted over the model. */
+  boolean surprisedBy(History history) {
+    return !history.isNew() && new Belief(history).surprising;
+  }
+
   private double chanceAtStep(State state, int step, Belief belief) {
     return belief == null
         ? chanceAt(state, step)
