@@ -78,7 +78,8 @@ class CellNumericsTest {
     Film film = CellFixtures.rain();
     CellCurrents c = GalvanicCell.solve(CellFixtures.nippleOnCarbon(0.05), film);
     double[] out = new double[2];
-    new AnodeLaw(Kinetics.of(Material.ALUMINIUM_WROUGHT), film).at(c.couplePotentialVSce(), out);
+    new AnodeLaw(Kinetics.of(Material.ALUMINIUM_WROUGHT), FilmFactors.of(film))
+        .at(c.couplePotentialVSce(), out);
     assertEquals(out[0], c.galvanicUAPerCm2(), 1e-6 * out[0]);
   }
 
@@ -145,28 +146,6 @@ class CellNumericsTest {
         random.nextBoolean() ? 3 : 12,
         random.nextInt(2) * 100,
         random.nextInt(4) == 0 ? 1 : 0);
-  }
-
-  @Test
-  void surfaceAgainstTable() {
-    List<WheelYear.FilmHours> films = new ArrayList<>();
-    for (int rh = 50; rh < 98; rh += 4) {
-      SaltMix salt = new SaltMix(100, 600, 100, 0);
-      films.add(new WheelYear.FilmHours(ThinFilm.inEquilibrium(salt, rh, rh / 5.0 - 8), 300));
-    }
-    films.add(new WheelYear.FilmHours(CellFixtures.rain(), 200));
-    films.add(new WheelYear.FilmHours(ThinFilm.dry(5), 4000));
-    CellTable table = new CellTables(1).table(CellFixtures.nippleOnCarbon(0.02));
-    RateSurface surface = RateSurface.of(table, films, 0.05, 5, 0.1, 10);
-    for (double widthMm : new double[] {0.05, 0.13, 0.4, 1.7, 5}) {
-      for (double scale : new double[] {0.1, 0.3, 1, 2.4, 10}) {
-        double exact = 0;
-        for (WheelYear.FilmHours part : films) {
-          exact += table.rate(part.film(), widthMm, scale) * part.hours() / 8766;
-        }
-        assertEquals(exact, surface.um(widthMm, scale, 1), 0.03 * exact);
-      }
-    }
   }
 
   /** Bounded: the least recently used cathode goes first, and answers do not change. */
