@@ -59,7 +59,21 @@ class ArchitectureTest {
           .resideOutsideOfPackage("saltspoke.faces..")
           .should()
           .dependOnClassesThat()
-          .resideInAnyPackage("org.eclipse.jetty..", "com.fasterxml.jackson..", "picocli..");
+          .resideInAnyPackage(
+              "org.eclipse.jetty..",
+              "com.fasterxml.jackson.databind..",
+              "com.fasterxml.jackson.annotation..",
+              "picocli..");
+
+  /** Readers of JSON packages stream tokens; binding JSON to objects stays with the faces. */
+  @ArchTest
+  static final ArchRule jsonTokensLiveInSourcesAndFaces =
+      noClasses()
+          .that()
+          .resideOutsideOfPackages("saltspoke.sources..", "saltspoke.faces..")
+          .should()
+          .dependOnClassesThat()
+          .resideInAPackage("com.fasterxml.jackson.core..");
 
   @ArchTest
   static final ArchRule csvLivesInSourcesAndExport =

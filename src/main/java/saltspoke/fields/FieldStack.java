@@ -1,17 +1,28 @@
 package saltspoke.fields;
 
 import java.util.List;
+import java.util.stream.IntStream;
 
 /** Fields of one layer on one grid: twelve months, exceedance levels, or a single band. */
 public final class FieldStack {
   private final String layer;
+  private final List<String> labels;
   private final List<Field> bands;
+
+  /** A stack whose bands are numbered from 1. */
+  public FieldStack(String layer, List<Field> bands) {
+    this(layer, IntStream.rangeClosed(1, bands.size()).mapToObj(String::valueOf).toList(), bands);
+  }
 
   /**
    * @param layer id of the layer in the manifest
+   * @param labels one per band: months as 1 to 12, exceedance levels in percent, or names
    * @param bands at least one, all on the same grid
    */
-  public FieldStack(String layer, List<Field> bands) {
+  public FieldStack(String layer, List<String> labels, List<Field> bands) {
+    if (labels.size() != bands.size()) {
+      throw new IllegalArgumentException("layer " + layer + " needs a label for each band");
+    }
     if (bands.isEmpty()) {
       throw new IllegalArgumentException("layer " + layer + " has no band");
     }
@@ -21,11 +32,17 @@ public final class FieldStack {
       }
     }
     this.layer = layer;
+    this.labels = List.copyOf(labels);
     this.bands = List.copyOf(bands);
   }
 
   public String layer() {
     return layer;
+  }
+
+  /** One label per band, in order. */
+  public List<String> labels() {
+    return labels;
   }
 
   public int size() {

@@ -23,4 +23,26 @@ public record Grid(
       throw new IllegalArgumentException("a grid needs two rows, two columns and positive steps");
     }
   }
+
+  /** A grid that wraps when its columns go once round the world, to a thousandth of a degree. */
+  public static Grid of(
+      double northDeg,
+      double westDeg,
+      double stepLatDeg,
+      double stepLonDeg,
+      int rows,
+      int columns) {
+    boolean wraps = Math.abs(columns * stepLonDeg - 360) < 1e-3;
+    return new Grid(northDeg, westDeg, stepLatDeg, stepLonDeg, rows, columns, wraps);
+  }
+
+  /** Latitude of a row, degrees. */
+  public double latitudeDeg(int row) {
+    return northDeg - row * stepLatDeg;
+  }
+
+  /** Longitude of a column, degrees. */
+  public double longitudeDeg(int column) {
+    return westDeg + column * stepLonDeg;
+  }
 }

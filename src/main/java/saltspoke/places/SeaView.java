@@ -23,4 +23,20 @@ public record SeaView(
       throw new IllegalArgumentException("a sea view has 36 directions");
     }
   }
+
+  /**
+   * The view from a place whose true distance to the sea is known better: in every direction the
+   * shore comes nearer or goes farther by the same amount as the nearest one, never below 0. Fetch
+   * and salinity stay.
+   *
+   * @param distanceKm true distance to the nearest sea, at least 0
+   */
+  public SeaView movedTo(double distanceKm) {
+    double shiftKm = distanceKm - this.distanceKm;
+    double[] moved = new double[DIRECTIONS];
+    for (int k = 0; k < DIRECTIONS; k++) {
+      moved[k] = Math.max(0, shoreKm[k] + shiftKm);
+    }
+    return new SeaView(distanceKm, moved, fetchKm, salinityRatio);
+  }
 }

@@ -7,13 +7,13 @@ package saltspoke.values;
 public final class Refusal extends RuntimeException {
   private static final long serialVersionUID = 1L;
 
-  /** What went wrong, in the order of exit codes 2, 3, 3 and 4. */
+  /** What went wrong; each kind has one exit code and one HTTP status. */
   public enum Kind {
     /** The question itself is malformed: exit 2, HTTP 400. */
     WRONG_USE,
     /** Well formed, but there is no such thing: exit 3, HTTP 404. */
     NOT_FOUND,
-    /** A number outside its allowed range: exit 3, HTTP 400. */
+    /** A number outside its allowed range: exit 3, HTTP 404. */
     OUT_OF_RANGE,
     /** A shipped or loaded data file is missing or damaged: exit 4, HTTP 503. */
     DATA_DAMAGED

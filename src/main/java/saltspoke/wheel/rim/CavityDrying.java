@@ -1,6 +1,7 @@
 package saltspoke.wheel.rim;
 
 import java.util.List;
+import saltspoke.atmosphere.SaturationPressure;
 import saltspoke.wheel.WheelBuild;
 
 /**
@@ -55,8 +56,8 @@ public final class CavityDrying {
   public static double gPerDay(double conductanceM3PerS, double temperatureC, double outsideHpa) {
     double inside =
         temperatureC < 0
-            ? Vapour.saturationOverIceHpa(temperatureC)
-            : Vapour.saturationHpa(temperatureC);
+            ? SaturationPressure.overIceHpa(temperatureC)
+            : SaturationPressure.overWaterHpa(temperatureC);
     double deficit = Vapour.densityGPerM3(Math.max(0, inside - outsideHpa), temperatureC);
     return conductanceM3PerS * deficit * 86400;
   }

@@ -25,6 +25,11 @@ public enum RimAssumption {
   DRIED_SHARE("dried-share", "1", 0.1, 0.35, 0.7),
   /** Free water that clings to the bed and neither drains nor pools. */
   CLINGING_G("clinging-water", "g", 0.1, 0.3, 0.8),
+  /**
+   * Film that free water makes in the cavity at least: less water wets fewer seats, not all of them
+   * thinner.
+   */
+  PATCH_FILM_UM("patch-film", "um", 10, 20, 50),
   /** Wetted surface of the cavity over which water and salt spread: bed 1.9 m × 20 mm and walls. */
   WETTED_BED_M2("wetted-bed", "m2", 0.03, 0.05, 0.09),
   /** Salt that stays behind when the water it is dissolved in drains away. */
@@ -34,6 +39,8 @@ public enum RimAssumption {
    * riding in the wet exchanges for the road's water, fresh or salted.
    */
   WASHED_PER_RAIN_HOUR("rain-wash", "1/h", 0.006, 0.02, 0.06),
+  /** An hour of rain on a parked bicycle over an hour of riding in the wet, in that exchange. */
+  PARKED_WASH_RATIO("parked-wash", "1", 0.1, 0.3, 0.7),
   /** Salt that one rinse takes from a seat, share of what is there. */
   WASHED_PER_RINSE("rinse-wash", "1", 0.05, 0.15, 0.4),
   /** Share of that washing which reaches a seat hidden inside the rim. */

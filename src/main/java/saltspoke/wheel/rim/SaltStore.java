@@ -135,7 +135,10 @@ final class SaltStore {
       RimAssumptions a) {
     double rainHours = rides.wetRideHours();
     if (profile.storage() == Storage.OPEN) {
-      rainHours += outside.wetDays() * a.get(RimAssumption.RAIN_HOURS_PER_WET_DAY);
+      rainHours +=
+          outside.wetDays()
+              * a.get(RimAssumption.RAIN_HOURS_PER_WET_DAY)
+              * a.get(RimAssumption.PARKED_WASH_RATIO);
     }
     double washed =
         (rainHours * a.get(RimAssumption.WASHED_PER_RAIN_HOUR)

@@ -2,6 +2,7 @@ package saltspoke.wheel.rim;
 
 import java.util.ArrayList;
 import java.util.List;
+import saltspoke.atmosphere.SaturationPressure;
 import saltspoke.wheel.SaltMix;
 import saltspoke.wheel.ThinFilm;
 
@@ -55,7 +56,7 @@ final class SeatAir {
               s.share(),
               s.day(),
               s.temperatureC(),
-              inRange / 100 * Vapour.saturationHpa(s.temperatureC()),
+              inRange / 100 * SaturationPressure.overWaterHpa(s.temperatureC()),
               inRange));
     }
     return seat;
@@ -76,7 +77,7 @@ final class SeatAir {
         ThinFilm.inEquilibrium(salt, probe - RH_STEP_PCT, temperatureC, true).thicknessUm();
     // 1 µm of film is about 1 g of water per m².
     double grams = Math.max(0, wetter - drier) * bedM2;
-    double hpa = 2 * RH_STEP_PCT / 100 * Vapour.saturationHpa(temperatureC);
+    double hpa = 2 * RH_STEP_PCT / 100 * SaturationPressure.overWaterHpa(temperatureC);
     double gPerDayHpa = conductanceM3PerS * Vapour.densityGPerM3(1, temperatureC) * 86400;
     return grams / hpa / gPerDayHpa;
   }

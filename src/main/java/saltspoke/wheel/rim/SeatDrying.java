@@ -1,6 +1,7 @@
 package saltspoke.wheel.rim;
 
 import java.util.List;
+import saltspoke.atmosphere.SaturationPressure;
 
 /** How long an open seat stays wet after rain or spray, apart from water in the cavity. */
 public final class SeatDrying {
@@ -14,7 +15,7 @@ public final class SeatDrying {
 
   /** Loss of an open film, g/(m² h), to air of that vapour pressure at its own temperature. */
   public static double openFilmGPerM2Hour(double temperatureC, double vapourPressureHpa) {
-    double deficit = Math.max(0, Vapour.saturationHpa(temperatureC) - vapourPressureHpa);
+    double deficit = Math.max(0, SaturationPressure.overWaterHpa(temperatureC) - vapourPressureHpa);
     return MASS_TRANSFER_M_PER_S * 3600 * Vapour.densityGPerM3(deficit, temperatureC);
   }
 

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import saltspoke.atmosphere.DayType;
 import saltspoke.atmosphere.MonthAir;
+import saltspoke.atmosphere.SaturationPressure;
 import saltspoke.wheel.Storage;
 
 /**
@@ -87,7 +88,7 @@ public final class StorageClimate {
   }
 
   private static KeptAir state(double share, int day, double temperatureC, double hpa) {
-    double saturation = Vapour.saturationHpa(temperatureC);
+    double saturation = SaturationPressure.overWaterHpa(temperatureC);
     double held = Math.min(hpa, saturation);
     return new KeptAir(share, day, temperatureC, held, Math.min(100, 100 * held / saturation));
   }
@@ -102,7 +103,7 @@ public final class StorageClimate {
       KeptAir s = states.get(i);
       double rh =
           Math.min(100, s.relativeHumidityPct() + buffering * (mean - s.relativeHumidityPct()));
-      double hpa = rh / 100 * Vapour.saturationHpa(s.temperatureC());
+      double hpa = rh / 100 * SaturationPressure.overWaterHpa(s.temperatureC());
       states.set(i, new KeptAir(s.share(), s.day(), s.temperatureC(), hpa, rh));
     }
   }

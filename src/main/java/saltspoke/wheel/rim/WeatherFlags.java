@@ -1,13 +1,18 @@
 package saltspoke.wheel.rim;
 
 import java.util.ArrayList;
+import java.util.Collection;
 import java.util.List;
+import java.util.Map;
+import java.util.TreeMap;
 import saltspoke.atmosphere.AirClimate;
 import saltspoke.values.Note;
 import saltspoke.wheel.RidingProfile;
 import saltspoke.wheel.SaltedRoads;
 import saltspoke.wheel.Storage;
+import saltspoke.wheel.ThinFilm;
 import saltspoke.wheel.WheelBuild;
+import saltspoke.wheel.WheelYear;
 
 /** What a person should know about how the wheel's weather was found. */
 final class WeatherFlags {
@@ -25,7 +30,8 @@ final class WeatherFlags {
       WheelBuild build,
       RideMonth[] rides,
       WaterStore water,
-      SaltStore salt) {
+      SaltStore salt,
+      List<WheelYear.Month> months) {
     List<Note> flags = new ArrayList<>();
     double rideHours = 0;
     double wetHours = 0;
@@ -72,6 +78,24 @@ final class WeatherFlags {
         && air.annual().temperatureC() > RimAssumption.ROOM_C.median()) {
       flags.add(Note.of("wheel-room-not-heated"));
     }
+    flags.addAll(filmFlags(months));
     return flags;
+  }
+
+  /** The films' own flags, each once, for the film that lies there longest of those it concerns. */
+  private static Collection<Note> filmFlags(List<WheelYear.Month> months) {
+    Map<String, Note> flags = new TreeMap<>();
+    Map<String, Double> longest = new TreeMap<>();
+    for (WheelYear.Month month : months) {
+      for (WheelYear.FilmHours film : month.films()) {
+        for (Note note : ThinFilm.flags(film.film())) {
+          if (film.hours() > longest.getOrDefault(note.code(), 0.0)) {
+            longest.put(note.code(), film.hours());
+            flags.put(note.code(), note);
+          }
+        }
+      }
+    }
+    return flags.values();
   }
 }

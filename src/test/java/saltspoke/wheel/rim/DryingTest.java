@@ -6,6 +6,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import java.util.List;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
+import saltspoke.atmosphere.SaturationPressure;
 import saltspoke.sources.CsvTable;
 import saltspoke.wheel.WheelBuild;
 
@@ -16,7 +17,7 @@ class DryingTest {
   }
 
   private static double lossGPerDay(double celsius, double rhPct) {
-    double hpa = rhPct / 100 * Vapour.saturationHpa(celsius);
+    double hpa = rhPct / 100 * SaturationPressure.overWaterHpa(celsius);
     return CavityDrying.gPerDay(CavityDrying.gapsM3PerS(24, 1), celsius, hpa);
   }
 
@@ -49,7 +50,8 @@ class DryingTest {
   }
 
   private static double openLoss(double celsius, double rhPct) {
-    return SeatDrying.openFilmGPerM2Hour(celsius, rhPct / 100 * Vapour.saturationHpa(celsius));
+    return SeatDrying.openFilmGPerM2Hour(
+        celsius, rhPct / 100 * SaturationPressure.overWaterHpa(celsius));
   }
 
   @Test

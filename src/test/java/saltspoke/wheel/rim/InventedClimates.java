@@ -9,6 +9,7 @@ import saltspoke.atmosphere.AnnualAir;
 import saltspoke.atmosphere.DayType;
 import saltspoke.atmosphere.MonthAir;
 import saltspoke.atmosphere.RoadSalt;
+import saltspoke.atmosphere.SaturationPressure;
 import saltspoke.atmosphere.Setting;
 import saltspoke.places.Place;
 import saltspoke.places.SeaView;
@@ -60,7 +61,7 @@ public final class InventedClimates {
       double winter = Math.cos(2 * Math.PI * m / 12);
       double celsius = meanC - amplitudeC * winter;
       double rh = rhPct + rhSwingPct * winter;
-      double hpa = rh / 100 * Vapour.saturationHpa(celsius);
+      double hpa = rh / 100 * SaturationPressure.overWaterHpa(celsius);
       List<DayType> days = new ArrayList<>();
       double[] spell = {-1.4, -0.5, 0.5, 1.4};
       for (double s : spell) {
@@ -71,7 +72,7 @@ public final class InventedClimates {
                 rangeC * (1 - 0.2 * s * (winter > 0 ? -1 : 1) * -0.5),
                 Math.min(
                     hpa * (1 + 0.18 * s + 0.05 * s * s),
-                    0.99 * Vapour.saturationHpa(celsius + 2.5 * s))));
+                    0.99 * SaturationPressure.overWaterHpa(celsius + 2.5 * s))));
       }
       double nearFreezing =
           30 / (1 + Math.exp((celsius - 3) / 1.5)) / (1 + Math.exp(-(celsius + 8) / 2));

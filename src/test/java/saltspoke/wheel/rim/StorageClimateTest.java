@@ -8,6 +8,7 @@ import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 import saltspoke.atmosphere.AirClimate;
 import saltspoke.atmosphere.MonthAir;
+import saltspoke.atmosphere.SaturationPressure;
 import saltspoke.wheel.Storage;
 
 @Tag("law")
@@ -43,7 +44,7 @@ class StorageClimateTest {
                 assertTrue(s.relativeHumidityPct() >= 0 && s.relativeHumidityPct() <= 100);
                 assertEquals(
                     s.relativeHumidityPct(),
-                    100 * s.vapourPressureHpa() / Vapour.saturationHpa(s.temperatureC()),
+                    100 * s.vapourPressureHpa() / SaturationPressure.overWaterHpa(s.temperatureC()),
                     1e-9);
               });
         }

@@ -19,6 +19,10 @@ import saltspoke.wheel.WheelYear;
 class WheelWeatherLawsTest {
   private static final AirClimate MARITIME = InventedClimates.all().get("maritime-winter");
 
+  /**
+   * The one exception is taken out here by a fully open seat: more salt makes a cavity breathe more
+   * slowly, so that a damp spell no longer reaches its deliquescence where the mean lies below it.
+   */
   @Property(tries = 60)
   void moreSaltOnTheRoadIsNeverFewerWetHours(
       @ForAll @DoubleRange(min = 0, max = 4) double saltOnRoad,
@@ -37,7 +41,8 @@ class WheelWeatherLawsTest {
     return WheelWeather.over(
         InventedClimates.climate(8, 8, 78, 6, 7, 150, 5, 50, saltOnRoad),
         profile,
-        WheelBuild.USUAL);
+        WheelBuild.USUAL,
+        RimAssumptions.MEDIAN.with(RimAssumption.OPEN_SEAT_SHARE, 1));
   }
 
   /**

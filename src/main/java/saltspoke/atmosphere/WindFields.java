@@ -1,0 +1,44 @@
+package saltspoke.atmosphere;
+
+import saltspoke.fields.DataSet;
+import saltspoke.fields.FieldStack;
+import saltspoke.places.Place;
+
+/**
+ * Monthly wind at a place: its speed from the monthly climate, its direction and constancy from the
+ * map of mean wind vectors.
+ */
+final class WindFields {
+  /**
+   * ASSUMPTION: the vectors of that map are this much too short, since they average over eleven
+   * years of two-degree means; spread 1.1–1.6.
+   */
+  private static final double VECTOR_STRETCH = 1.3;
+
+  /** Least mean wind that the law of directions is asked for, m/s. */
+  private static final double CALMEST_M_PER_S = 0.5;
+
+  private final FieldStack eastward;
+  private final FieldStack northward;
+
+  private WindFields(FieldStack eastward, FieldStack northward) {
+    this.eastward = eastward;
+    this.northward = northward;
+  }
+
+  static WindFields from(DataSet data) {
+    return new WindFields(
+        data.stack("wind-direction-monthly-u"), data.stack("wind-direction-monthly-v"));
+  }
+
+  WindMonth at(Place place, MonthClimate month) {
+    double speed = Math.max(CALMEST_M_PER_S, month.windMPerS());
+    int band = month.month() - 1;
+    double u = eastward.sample(band, place.latitudeDeg(), place.longitudeDeg());
+    double v = northward.sample(band, place.latitudeDeg(), place.longitudeDeg());
+    if (Double.isNaN(u) || Double.isNaN(v)) {
+      return WindMonth.fromAllSides(speed);
+    }
+    return new WindMonth(speed, VECTOR_STRETCH * u, VECTOR_STRETCH * v);
+  }
+}

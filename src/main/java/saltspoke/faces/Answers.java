@@ -1,0 +1,120 @@
+package saltspoke.faces;
+
+import java.util.List;
+import java.util.Optional;
+import java.util.function.Supplier;
+import saltspoke.advice.Advice;
+import saltspoke.advice.AdviceRequest;
+import saltspoke.advice.Advisor;
+import saltspoke.atmosphere.AirClimate;
+import saltspoke.atmosphere.AirModel;
+import saltspoke.atmosphere.AirOverrides;
+import saltspoke.fields.DataSet;
+import saltspoke.places.Place;
+import saltspoke.places.PlaceDirectory;
+import saltspoke.places.PlaceHit;
+import saltspoke.places.PlaceOverrides;
+import saltspoke.values.Refusal;
+import saltspoke.wheel.Catalogue;
+import saltspoke.wheel.Profiles;
+import saltspoke.wheel.RidingProfile;
+
+/**
+ * The one advisor behind every face: finds the place, works out its air, and advises on the wheel.
+ * Each part is made at its first use and kept; safe for use by many threads.
+ */
+public final class Answers {
+  private final DataSet dataSet;
+  private final Supplier<PlaceDirectory> places;
+  private final Supplier<AirModel> airModel;
+  private final Catalogue catalogue = Catalogue.shipped();
+  private final Profiles profiles = Profiles.shipped();
+  private final Supplier<Advisor> advisor;
+
+  public Answers(DataSet dataSet) {
+    this.dataSet = dataSet;
+    this.places = once(() -> PlaceDirectory.open(dataSet));
+    this.airModel = once(() -> AirModel.from(dataSet));
+    this.advisor = once(() -> new Advisor(catalogue));
+  }
+
+  public DataSet dataSet() {
+    return dataSet;
+  }
+
+  public Catalogue catalogue() {
+    return catalogue;
+  }
+
+  public Profiles profiles() {
+    return profiles;
+  }
+
+  /** Towns whose name begins so, most populous first. */
+  public List<PlaceHit> search(String query, int limit) {
+    return places.get().search(query, limit);
+  }
+
+  /** The place of a question. */
+  public Place place(PlaceQuestion question) {
+    PlaceOverrides overrides = new PlaceOverrides(question.elevationM(), question.seaDistanceKm());
+    if (question.name().isPresent()) {
+      return places.get().byName(question.name().get(), overrides);
+    }
+    if (question.postcode().isPresent()) {
+      return places
+          .get()
+          .byPostcode(question.postcode().get(), question.country().orElseThrow(), overrides);
+    }
+    return places
+        .get()
+        .at(question.latitudeDeg().getAsDouble(), question.longitudeDeg().getAsDouble(), overrides);
+  }
+
+  /** The air at the place of a question. */
+  public AirClimate air(PlaceQuestion question) {
+    return airModel.get().at(place(question), AirOverrides.of(question.setting().orElse(null)));
+  }
+
+  /** Reads both parts of a wheel question and answers it; the profile is named in it. */
+  public Advice advise(Parameters parameters) {
+    String name =
+        parameters
+            .text("profile")
+            .orElseThrow(
+                () ->
+                    Refusal.wrongUse(
+                        "no-profile",
+                        "profile",
+                        "",
+                        "the name of a ready profile or one of your own"));
+    return advise(parameters, profiles.get(name));
+  }
+
+  /** The same for a profile of one's own. */
+  public Advice advise(Parameters parameters, RidingProfile profile) {
+    PlaceQuestion question = PlaceQuestion.from(parameters);
+    AdviceRequest request = Questions.wheel(parameters, profile);
+    return advisor.get().advise(air(question), request);
+  }
+
+  /** Language of a question, English when none is named. */
+  public static Texts textsFor(Parameters parameters) {
+    Optional<String> language = parameters.text("lang");
+    return Texts.in(language.orElse("en"));
+  }
+
+  private static <T> Supplier<T> once(Supplier<T> maker) {
+    return new Supplier<>() {
+      private T made;
+
+      @Override
+      public synchronized T get() {
+        if (made == null) {
+          made = maker.get();
+        }
+        return made;
+      }
+    };
+  }
+}

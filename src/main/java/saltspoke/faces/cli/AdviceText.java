@@ -1,0 +1,90 @@
+package saltspoke.faces.cli;
+
+import java.util.List;
+import saltspoke.advice.Advice;
+import saltspoke.advice.Change;
+import saltspoke.advice.PairingAdvice;
+import saltspoke.advice.StateTimes;
+import saltspoke.faces.Texts;
+
+/** Advice as plain text: the place, the pairings ranked, why, what one change buys, cautions. */
+final class AdviceText {
+  private static final int MOST_CHANGES = 6;
+
+  private AdviceText() {}
+
+  static String of(Advice advice, Texts texts) {
+    StringBuilder out = new StringBuilder();
+    AirText.place(out, advice.air().place(), texts);
+    out.append(texts.say(advice.air().summary())).append('\n');
+    AirText.line(out, "Profile: %s", advice.request().profile().title());
+    out.append("\nfirst  every  replace  seized, months   pairing\n");
+    out.append(" look              by  (10–50–90 %)     rim / nipple / interface / spoke\n");
+    for (PairingAdvice pairing : advice.pairings()) {
+      AirText.line(
+          out,
+          "%5s  %5s  %7s  %-15s  %s / %s / %s / %s",
+          texts.format(pairing.firstLookMonths()),
+          texts.format(pairing.everyMonths()),
+          pairing.replaceByMonths() == null ? ">240" : texts.format(pairing.replaceByMonths()),
+          times(pairing.seizedMonths()),
+          pairing.pairing().rim(),
+          pairing.pairing().nipple(),
+          pairing.pairing().between(),
+          pairing.pairing().spoke());
+    }
+    out.append("Months from now. A dash: cannot occur with these materials.\n");
+    PairingAdvice focus = advice.pairings().get(0);
+    if (advice.pairings().size() == 1) {
+      AirText.line(
+          out,
+          "\nFirst visible attack (%s): %s months; loss of a head or bed (%s): %s months",
+          focus.firstAttackMonths().part(),
+          times(focus.firstAttackMonths()),
+          focus.headLossMonths().part(),
+          times(focus.headLossMonths()));
+      AirText.notes(out, "\nWhy:", focus.reasons(), texts);
+    }
+    changes(out, advice.changes(), texts);
+    AirText.notes(
+        out,
+        "\nA look (" + focus.lookKind() + ", about " + focus.lookMinutes() + " min):",
+        advice.look(),
+        texts);
+    AirText.notes(out, "\nStop riding when:", advice.stopSigns(), texts);
+    AirText.notes(out, "\nCautions:", advice.cautions(), texts);
+    if (!advice.flags().isEmpty()) {
+      AirText.notes(out, "\nTo know:", advice.flags(), texts);
+    }
+    return out.toString();
+  }
+
+  private static void changes(StringBuilder out, List<Change> changes, Texts texts) {
+    if (changes.isEmpty()) {
+      return;
+    }
+    out.append("\nWhat one change buys:\n");
+    changes.stream()
+        .limit(MOST_CHANGES)
+        .forEach(
+            change ->
+                AirText.line(
+                    out,
+                    "  %s (%s): first look at %s months, × %s",
+                    texts.say(change.what()),
+                    change.cost(),
+                    texts.format(change.firstLookMonths()),
+                    texts.format(change.factor())));
+  }
+
+  private static String times(StateTimes times) {
+    if (times.notApplicable()) {
+      return "–";
+    }
+    return month(times.p10()) + "–" + month(times.median()) + "–" + month(times.p90());
+  }
+
+  private static String month(Double months) {
+    return months == null ? ">240" : String.valueOf(Math.round(months));
+  }
+}

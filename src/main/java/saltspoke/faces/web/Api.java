@@ -1,0 +1,134 @@
+package saltspoke.faces.web;
+
+import com.fasterxml.jackson.core.JsonProcessingException;
+import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.node.ObjectNode;
+import java.util.LinkedHashMap;
+import java.util.Map;
+import java.util.Set;
+import java.util.TreeMap;
+import saltspoke.advice.Advice;
+import saltspoke.faces.About;
+import saltspoke.faces.Answers;
+import saltspoke.faces.Parameters;
+import saltspoke.faces.PlaceQuestion;
+import saltspoke.faces.Questions;
+import saltspoke.faces.Resources;
+import saltspoke.faces.Texts;
+import saltspoke.faces.json.AdviceJson;
+import saltspoke.faces.json.AirJson;
+import saltspoke.faces.json.CatalogueJson;
+import saltspoke.faces.json.Json;
+import saltspoke.faces.json.PlacesJson;
+import saltspoke.faces.json.ProfileJson;
+import saltspoke.values.Refusal;
+
+/** The resources under {@code /api}, each a function from a request to a reply. */
+public final class Api {
+  private static final Set<String> GET = Set.of("GET");
+  private static final int TEXT_AGE_SECONDS = 3600;
+
+  private final Answers answers;
+
+  private Api(Answers answers) {
+    this.answers = answers;
+  }
+
+  /** A server for these answers on a port of the loopback address, 0 for any free one. */
+  public static WebServer server(int port, Answers answers) {
+    Api api = new Api(answers);
+    Map<String, ResourceHandler> resources = new LinkedHashMap<>();
+    resources.put("/api/air", new ResourceHandler(GET, api::air));
+    resources.put("/api/advice", new ResourceHandler(Set.of("GET", "POST"), api::advice));
+    resources.put("/api/places", new ResourceHandler(GET, api::places));
+    resources.put("/api/profiles", new ResourceHandler(GET, api::profiles));
+    resources.put("/api/pairings", new ResourceHandler(GET, api::pairings));
+    resources.put("/api/about", new ResourceHandler(GET, api::about));
+    resources.put("/api/texts", new ResourceHandler(GET, api::texts));
+    resources.put("/api/openapi.json", new ResourceHandler(GET, api::document));
+    resources.put("/*", new ResourceHandler(GET, new StaticFiles()::serve));
+    return new WebServer(port, resources);
+  }
+
+  private Reply air(Ask ask) {
+    Parameters parameters = new Parameters(ask.query(), Questions.AIR);
+    Texts texts = Answers.textsFor(parameters);
+    return Reply.json(AirJson.of(answers.air(PlaceQuestion.from(parameters)), texts));
+  }
+
+  private Reply advice(Ask ask) {
+    if (ask.method().equals("POST")) {
+      return posted(ask.body());
+    }
+    Parameters parameters = new Parameters(ask.query(), Questions.ADVICE);
+    return reply(answers.advise(parameters), Answers.textsFor(parameters));
+  }
+
+  private Reply posted(String body) {
+    JsonNode node;
+    try {
+      node = Json.MAPPER.readTree(body);
+    } catch (JsonProcessingException e) {
+      throw Refusal.wrongUse("not-json", "body", "", "a JSON object");
+    }
+    if (node == null || !node.isObject()) {
+      throw Refusal.wrongUse("not-json", "body", "", "a JSON object");
+    }
+    Map<String, String> values = new TreeMap<>();
+    for (Map.Entry<String, JsonNode> field : node.properties()) {
+      if (field.getValue().isValueNode()) {
+        values.put(field.getKey(), field.getValue().asText());
+      } else if (!field.getKey().equals("profile")) {
+        throw Refusal.wrongUse(
+            "not-a-value",
+            Parameters.shortened(field.getKey()),
+            "",
+            "a text, number or truth value");
+      }
+    }
+    Parameters parameters = new Parameters(values, Questions.ADVICE);
+    JsonNode profile = node.get("profile");
+    Advice advice =
+        profile != null && profile.isObject()
+            ? answers.advise(parameters, ProfileJson.read(profile))
+            : answers.advise(parameters);
+    return reply(advice, Answers.textsFor(parameters));
+  }
+
+  private static Reply reply(Advice advice, Texts texts) {
+    return Reply.json(AdviceJson.of(advice, texts));
+  }
+
+  private Reply places(Ask ask) {
+    Parameters parameters = new Parameters(ask.query(), Questions.PLACES);
+    String query =
+        parameters
+            .text("q")
+            .orElseThrow(() -> Refusal.wrongUse("empty", "q", "", "the beginning of a name"));
+    return Reply.json(PlacesJson.of(answers.search(query, parameters.whole("limit", 1, 50, 10))));
+  }
+
+  private Reply profiles(Ask ask) {
+    return Reply.json(CatalogueJson.of(answers.profiles()));
+  }
+
+  private Reply pairings(Ask ask) {
+    return Reply.json(CatalogueJson.of(answers.catalogue()));
+  }
+
+  private Reply about(Ask ask) {
+    return Reply.json(About.json(answers.dataSet()));
+  }
+
+  private Reply texts(Ask ask) {
+    Texts texts = Answers.textsFor(new Parameters(ask.query(), Set.of("lang")));
+    ObjectNode node = Json.object();
+    texts.all().forEach(node::put);
+    byte[] body = Json.compact(node).getBytes(java.nio.charset.StandardCharsets.UTF_8);
+    return Reply.kept(Reply.JSON, body, TEXT_AGE_SECONDS);
+  }
+
+  private Reply document(Ask ask) {
+    return Reply.kept(Reply.JSON, Resources.bytes("saltspoke/openapi.json"), TEXT_AGE_SECONDS);
+  }
+}

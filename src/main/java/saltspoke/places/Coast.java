@@ -1,0 +1,201 @@
+package saltspoke.places;
+
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.concurrent.ConcurrentHashMap;
+import net.sf.geographiclib.Geodesic;
+import net.sf.geographiclib.GeodesicData;
+import net.sf.geographiclib.GeodesicMask;
+import saltspoke.fields.DataSet;
+
+/**
+ * The coast of the world: which points are land, how far the nearest shore is, and what the sea
+ * looks like from a place. Near the place the fine coast decides (about 0.2 km), beyond {@value
+ * #FINE_M} m the coarse one (1.2 km).
+ */
+final class Coast {
+  /** Within this distance the fine coast is used, m. */
+  private static final double FINE_M = 40_000;
+
+  /** Error of the coarse coast with some room, m. */
+  private static final double COARSE_ERROR_M = 4_000;
+
+  /** Water this far beyond the shore, at most, tells which sea it is, km. */
+  private static final double SEA_SAMPLE_KM = 20;
+
+  /**
+   * A shore point.
+   *
+   * @param distanceKm geodesic distance
+   * @param azimuthDeg direction towards it, clockwise from north
+   */
+  record Shore(double latitudeDeg, double longitudeDeg, double distanceKm, double azimuthDeg) {}
+
+  private final TiledTable fineTable;
+  private final DataSet data;
+  private final Map<Integer, Map<Integer, CoastBin>> fineTiles = new ConcurrentHashMap<>();
+  private final ClosedSeas closedSeas = new ClosedSeas();
+  private Map<Integer, CoastBin> coarse;
+
+  Coast(DataSet data) {
+    this.data = data;
+    this.fineTable = new TiledTable(data, "coast-fine");
+  }
+
+  boolean isLand(double latitudeDeg, double longitudeDeg) {
+    double lon = longitudeDeg >= 180 ? longitudeDeg - 360 : longitudeDeg;
+    CoastBin bin = fineBin(CoastBin.keyOf(latitudeDeg, lon), TiledTable.tileOf(latitudeDeg, lon));
+    return bin != null && bin.contains(latitudeDeg, lon);
+  }
+
+  /** The nearest shore in any direction, seen from land or from the sea. */
+  Shore nearest(double latitudeDeg, double longitudeDeg) {
+    Vantage from = new Vantage(latitudeDeg, longitudeDeg);
+    NearestShore search = new NearestShore(from);
+    search.offerNearestFirst(coarse().values());
+    if (search.bestM() < FINE_M + COARSE_ERROR_M) {
+      double reach = search.bestM() + COARSE_ERROR_M;
+      NearestShore fine = new NearestShore(from);
+      fine.offerNearestFirst(fineBins(latitudeDeg, longitudeDeg, reach));
+      search = fine;
+    } else {
+      NearestShore fine = new NearestShore(from);
+      fine.offerNearestFirst(fineBins(search.latitudeDeg(), search.longitudeDeg(), COARSE_ERROR_M));
+      if (fine.bestM() < search.bestM() + COARSE_ERROR_M) {
+        search = fine;
+      }
+    }
+    GeodesicData line =
+        Geodesic.WGS84.Inverse(
+            latitudeDeg,
+            longitudeDeg,
+            search.latitudeDeg(),
+            search.longitudeDeg(),
+            GeodesicMask.DISTANCE | GeodesicMask.AZIMUTH);
+    return new Shore(
+        search.latitudeDeg(), search.longitudeDeg(), line.s12 / 1000, (line.azi1 + 360) % 360);
+  }
+
+  /** The sea as seen from a place, by the geodesic distance and 36 rays. */
+  SeaView view(double latitudeDeg, double longitudeDeg) {
+    boolean land = isLand(latitudeDeg, longitudeDeg);
+    double distanceKm = land ? nearest(latitudeDeg, longitudeDeg).distanceKm() : 0;
+    SeaRays rays = rays(latitudeDeg, longitudeDeg, distanceKm);
+    double[] shoreKm = new double[SeaView.DIRECTIONS];
+    double[] fetchKm = new double[SeaView.DIRECTIONS];
+    double[] salinityRatio = new double[SeaView.DIRECTIONS];
+    for (int k = 0; k < SeaView.DIRECTIONS; k++) {
+      double[] water = rays.openWater(k, land);
+      if (water == null) {
+        shoreKm[k] = Double.POSITIVE_INFINITY;
+      } else {
+        shoreKm[k] = water[0] / 1000;
+        fetchKm[k] = (water[1] - water[0]) / 1000;
+        salinityRatio[k] =
+            salinity(latitudeDeg, longitudeDeg, 10 * k, shoreKm[k] + seaSampleKm(fetchKm[k]));
+      }
+    }
+    return new SeaView(distanceKm, shoreKm, fetchKm, salinityRatio);
+  }
+
+  private static double seaSampleKm(double fetchKm) {
+    return Math.min(fetchKm / 2, SEA_SAMPLE_KM);
+  }
+
+  private SeaRays rays(double latitudeDeg, double longitudeDeg, double distanceKm) {
+    Vantage from = new Vantage(latitudeDeg, longitudeDeg);
+    SeaRays rays = new SeaRays(from);
+    double fineM = 0;
+    if (distanceKm * 1000 < FINE_M) {
+      fineM = FINE_M;
+      for (CoastBin bin : fineBins(latitudeDeg, longitudeDeg, FINE_M)) {
+        rays.add(bin.shape(), 0, FINE_M);
+      }
+    }
+    double horizonM = SeaRays.SHORE_LIMIT_M + SeaRays.FETCH_LIMIT_M;
+    double chord = Vantage.chordOfArcM(horizonM);
+    for (CoastBin bin : coarse().values()) {
+      if (bin.leastM(from) < chord) {
+        rays.add(bin.shape(), fineM, horizonM);
+      }
+    }
+    return rays;
+  }
+
+  private double salinity(double latitudeDeg, double longitudeDeg, double azimuthDeg, double km) {
+    double phi = Math.toRadians(latitudeDeg);
+    double arc = km * 1000 / Vantage.MEAN_RADIUS_M;
+    double azimuth = Math.toRadians(azimuthDeg);
+    double sin = Math.sin(phi) * Math.cos(arc) + Math.cos(phi) * Math.sin(arc) * Math.cos(azimuth);
+    double lon =
+        longitudeDeg
+            + Math.toDegrees(
+                Math.atan2(
+                    Math.sin(azimuth) * Math.sin(arc) * Math.cos(phi),
+                    Math.cos(arc) - Math.sin(phi) * sin));
+    double wrapped = lon - 360 * Math.floor((lon + 180) / 360);
+    return closedSeas.ratioAt(Math.toDegrees(Math.asin(sin)), wrapped);
+  }
+
+  private synchronized Map<Integer, CoastBin> coarse() {
+    if (coarse == null) {
+      Map<Integer, CoastBin> bins = new HashMap<>();
+      new TiledTable(data, "coast-coarse")
+          .all(
+              line -> {
+                CoastBin bin = CoastBin.parse(line);
+                bins.put(bin.key(), bin);
+              });
+      coarse = bins;
+    }
+    return coarse;
+  }
+
+  private CoastBin fineBin(int key, int tile) {
+    return fineTiles
+        .computeIfAbsent(
+            tile,
+            t -> {
+              Map<Integer, CoastBin> bins = new HashMap<>();
+              fineTable.tile(
+                  t,
+                  line -> {
+                    CoastBin bin = CoastBin.parse(line);
+                    bins.put(bin.key(), bin);
+                  });
+              return bins;
+            })
+        .get(key);
+  }
+
+  private List<CoastBin> fineBins(double latitudeDeg, double longitudeDeg, double reachM) {
+    double high = Math.toDegrees(reachM / Vantage.MEAN_RADIUS_M) + 0.01;
+    double south = Math.max(-90, latitudeDeg - high);
+    double north = Math.min(90, latitudeDeg + high);
+    double most = Math.max(Math.abs(south), Math.abs(north));
+    double wide = most > 89 ? 180 : Math.min(180, high / Math.cos(Math.toRadians(most)));
+    int columns = wide >= 179 ? 180 : columnsBetween(longitudeDeg - wide, longitudeDeg + wide);
+    List<CoastBin> bins = new ArrayList<>();
+    for (double lat = floorToBin(south); lat <= Math.min(north, 89.9); lat += CoastBin.SIZE_DEG) {
+      for (int c = 0; c < columns; c++) {
+        double lon = floorToBin(longitudeDeg - wide) + c * (double) CoastBin.SIZE_DEG;
+        CoastBin bin = fineBin(CoastBin.keyOf(lat, lon), TiledTable.tileOf(lat, lon));
+        if (bin != null) {
+          bins.add(bin);
+        }
+      }
+    }
+    return bins;
+  }
+
+  private static int columnsBetween(double westDeg, double eastDeg) {
+    return Math.min(
+        180, (int) ((floorToBin(eastDeg) - floorToBin(westDeg)) / CoastBin.SIZE_DEG) + 1);
+  }
+
+  private static double floorToBin(double deg) {
+    return Math.floor(deg / CoastBin.SIZE_DEG) * CoastBin.SIZE_DEG;
+  }
+}
