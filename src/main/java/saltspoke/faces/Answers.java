@@ -55,6 +55,16 @@ public final class Answers {
     return places.get().search(query, limit);
   }
 
+  /** Whether a point is on land; lakes are land, the Caspian is sea. */
+  public boolean isLand(double latitudeDeg, double longitudeDeg) {
+    return places.get().isLand(latitudeDeg, longitudeDeg);
+  }
+
+  /** Codes of the countries whose postcodes are known. */
+  public List<String> postcodeCountries() {
+    return places.get().postcodeCountries();
+  }
+
   /** The place of a question. */
   public Place place(PlaceQuestion question) {
     PlaceOverrides overrides = new PlaceOverrides(question.elevationM(), question.seaDistanceKm());

@@ -30,7 +30,8 @@ public final class Questions {
           "spokes",
           "tension",
           "tape-sound",
-          "hidden-nipples");
+          "hidden-nipples",
+          "units");
 
   /** Names that a question about a wheel may carry. */
   public static final Set<String> ADVICE = union(AIR, WHEEL);

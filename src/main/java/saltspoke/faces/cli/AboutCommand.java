@@ -1,7 +1,6 @@
 package saltspoke.faces.cli;
 
 import java.io.PrintWriter;
-import java.nio.charset.StandardCharsets;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -9,7 +8,6 @@ import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Spec;
 import saltspoke.faces.About;
-import saltspoke.faces.Resources;
 import saltspoke.faces.json.Json;
 import saltspoke.fields.DataSet;
 
@@ -30,8 +28,7 @@ final class AboutCommand implements Callable<Integer> {
     DataSet dataSet = Opening.dataSet(common.data);
     PrintWriter out = spec.commandLine().getOut();
     if (licences) {
-      out.println(new String(Resources.bytes(About.LIBRARIES), StandardCharsets.UTF_8));
-      out.println(About.dataNotice(dataSet));
+      out.println(About.notices(dataSet));
       return ExitCode.DONE;
     }
     out.println(common.json ? Json.pretty(About.json(dataSet)) : About.text(dataSet));

@@ -1,8 +1,11 @@
 package saltspoke.faces.web;
 
+import static java.nio.charset.StandardCharsets.UTF_8;
+
 import com.fasterxml.jackson.core.JsonProcessingException;
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
+import java.time.LocalDate;
 import java.util.LinkedHashMap;
 import java.util.Map;
 import java.util.Set;
@@ -15,6 +18,10 @@ import saltspoke.faces.PlaceQuestion;
 import saltspoke.faces.Questions;
 import saltspoke.faces.Resources;
 import saltspoke.faces.Texts;
+import saltspoke.faces.export.AdviceCsv;
+import saltspoke.faces.export.CustomerSheetPdf;
+import saltspoke.faces.export.LookCalendar;
+import saltspoke.faces.export.Units;
 import saltspoke.faces.json.AdviceJson;
 import saltspoke.faces.json.AirJson;
 import saltspoke.faces.json.CatalogueJson;
@@ -45,6 +52,15 @@ public final class Api {
     resources.put("/api/pairings", new ResourceHandler(GET, api::pairings));
     resources.put("/api/about", new ResourceHandler(GET, api::about));
     resources.put("/api/texts", new ResourceHandler(GET, api::texts));
+    MapResources map = new MapResources(answers);
+    resources.put("/api/tiles/*", new ResourceHandler(GET, map::tile));
+    resources.put("/api/legend/*", new ResourceHandler(GET, map::legend));
+    resources.put("/api/value", new ResourceHandler(GET, map::value));
+    resources.put("/api/map/spot", new ResourceHandler(GET, map::spot));
+    resources.put("/api/map/names.json", new ResourceHandler(GET, map::names));
+    resources.put("/api/advice.pdf", new ResourceHandler(Set.of("GET", "POST"), api::sheet));
+    resources.put("/api/advice.ics", new ResourceHandler(Set.of("GET", "POST"), api::calendar));
+    resources.put("/api/advice.csv", new ResourceHandler(Set.of("GET", "POST"), api::table));
     resources.put("/api/openapi.json", new ResourceHandler(GET, api::document));
     resources.put("/*", new ResourceHandler(GET, new StaticFiles()::serve));
     return new WebServer(port, resources);
@@ -56,15 +72,46 @@ public final class Api {
     return Reply.json(AirJson.of(answers.air(PlaceQuestion.from(parameters)), texts));
   }
 
+  /** An answer about a wheel and how it is to be told. */
+  private record Told(Advice advice, Texts texts, Units units) {}
+
   private Reply advice(Ask ask) {
+    Told told = told(ask);
+    return Reply.json(AdviceJson.of(told.advice(), told.texts()));
+  }
+
+  private Reply sheet(Ask ask) {
+    Told told = told(ask);
+    byte[] pdf =
+        CustomerSheetPdf.render(told.advice(), told.texts(), told.units(), LocalDate.now());
+    return Reply.file("application/pdf", pdf, "saltspoke.pdf");
+  }
+
+  private Reply calendar(Ask ask) {
+    Told told = told(ask);
+    String text = LookCalendar.render(told.advice(), told.texts(), LocalDate.now());
+    return Reply.file("text/calendar;charset=utf-8", text.getBytes(UTF_8), "saltspoke.ics");
+  }
+
+  private Reply table(Ask ask) {
+    byte[] csv = AdviceCsv.render(told(ask).advice()).getBytes(UTF_8);
+    return Reply.file("text/csv;charset=utf-8", csv, "saltspoke.csv");
+  }
+
+  private Told told(Ask ask) {
     if (ask.method().equals("POST")) {
       return posted(ask.body());
     }
     Parameters parameters = new Parameters(ask.query(), Questions.ADVICE);
-    return reply(answers.advise(parameters), Answers.textsFor(parameters));
+    return told(answers.advise(parameters), parameters);
   }
 
-  private Reply posted(String body) {
+  private static Told told(Advice advice, Parameters parameters) {
+    Units units = parameters.choice("units", Units.values(), Units::id).orElse(Units.METRIC);
+    return new Told(advice, Answers.textsFor(parameters), units);
+  }
+
+  private Told posted(String body) {
     JsonNode node;
     try {
       node = Json.MAPPER.readTree(body);
@@ -92,11 +139,7 @@ public final class Api {
         profile != null && profile.isObject()
             ? answers.advise(parameters, ProfileJson.read(profile))
             : answers.advise(parameters);
-    return reply(advice, Answers.textsFor(parameters));
-  }
-
-  private static Reply reply(Advice advice, Texts texts) {
-    return Reply.json(AdviceJson.of(advice, texts));
+    return told(advice, parameters);
   }
 
   private Reply places(Ask ask) {
@@ -124,7 +167,7 @@ public final class Api {
     Texts texts = Answers.textsFor(new Parameters(ask.query(), Set.of("lang")));
     ObjectNode node = Json.object();
     texts.all().forEach(node::put);
-    byte[] body = Json.compact(node).getBytes(java.nio.charset.StandardCharsets.UTF_8);
+    byte[] body = Json.compact(node).getBytes(UTF_8);
     return Reply.kept(Reply.JSON, body, TEXT_AGE_SECONDS);
   }
 

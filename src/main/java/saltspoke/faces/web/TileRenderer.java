@@ -10,15 +10,13 @@ import java.awt.image.BufferedImage;
 import java.io.ByteArrayOutputStream;
 import java.io.IOException;
 import java.io.UncheckedIOException;
-import java.util.Optional;
 import javax.imageio.ImageIO;
-import saltspoke.fields.Field;
 
 /**
  * Draws map tiles: the steps of a layer on land, a thin line where the step changes, hatching where
  * a class is a coin toss, coast and borders. The sea is left transparent.
  */
-public final class TileRenderer {
+final class TileRenderer {
   /**
    * Below this probability of the likeliest class the map hatches. A choice for people, not a
    * published limit: the runner-up is then often nearly as likely.
@@ -31,10 +29,21 @@ public final class TileRenderer {
   private static final Color BORDER = new Color(0x15, 0x25, 0x2A, 190);
   private static final double CHANGE_SHADE = 0.72;
 
-  private final WorldShapes shapes;
+  /** From this zoom a pixel is finer than the outlines for drawing. */
+  private static final int FINE_ZOOM = 7;
 
-  public TileRenderer(WorldShapes shapes) {
+  private final WorldShapes shapes;
+  private final LandTest isLand;
+
+  /** Whether a point is on land, by the coast that answers use. */
+  @FunctionalInterface
+  interface LandTest {
+    boolean test(double latitudeDeg, double longitudeDeg);
+  }
+
+  TileRenderer(WorldShapes shapes, LandTest isLand) {
     this.shapes = shapes;
+    this.isLand = isLand;
   }
 
   /**
@@ -42,26 +51,26 @@ public final class TileRenderer {
    *
    * @param style steps and colours
    * @param values the layer's values, in the unit of the style's bounds
-   * @param sureness probability of the likeliest class, 0..1, where the layer is one of classes
-   * @param zoom 0..11
-   * @param column from the west
-   * @param row from the north
+   * @param frame which tile
    */
-  public byte[] render(
-      LayerStyle style, Field values, Optional<Field> sureness, int zoom, int column, int row) {
-    TileFrame frame = new TileFrame(zoom, column, row);
+  byte[] render(LayerStyle style, TileValues values, TileFrame frame) {
     BufferedImage image =
         new BufferedImage(TileFrame.SIZE_PX, TileFrame.SIZE_PX, BufferedImage.TYPE_INT_ARGB);
+    boolean fine = frame.zoom() >= FINE_ZOOM;
     Path2D land = shapes.land(frame);
-    if (land.getCurrentPoint() != null) {
-      paintValues(image, frame, style, values, sureness);
+    if (fine || land.getCurrentPoint() != null) {
+      paintValues(image, style, values);
       Graphics2D graphics = image.createGraphics();
       graphics.setRenderingHint(RenderingHints.KEY_ANTIALIASING, RenderingHints.VALUE_ANTIALIAS_ON);
-      keepOnly(graphics, land);
-      graphics.setStroke(new BasicStroke(0.8f));
-      graphics.setColor(COAST);
-      graphics.draw(land);
-      graphics.setStroke(new BasicStroke(zoom < 4 ? 0.7f : 1.1f));
+      if (fine) {
+        keepLand(image, frame);
+      } else {
+        keepOnly(graphics, land);
+        graphics.setStroke(new BasicStroke(0.8f));
+        graphics.setColor(COAST);
+        graphics.draw(land);
+      }
+      graphics.setStroke(new BasicStroke(frame.zoom() < 4 ? 0.7f : 1.1f));
       graphics.setColor(BORDER);
       graphics.draw(shapes.borders(frame));
       graphics.dispose();
@@ -69,20 +78,13 @@ public final class TileRenderer {
     return png(image);
   }
 
-  private static void paintValues(
-      BufferedImage image,
-      TileFrame frame,
-      LayerStyle style,
-      Field values,
-      Optional<Field> sureness) {
+  private static void paintValues(BufferedImage image, LayerStyle style, TileValues values) {
     int size = TileFrame.SIZE_PX;
     int[] above = new int[size + 1];
     int[] steps = new int[size + 1];
     for (int y = -1; y < size; y++) {
-      double latitudeDeg = frame.latitudeDeg(y);
       for (int x = -1; x < size; x++) {
-        double longitudeDeg = frame.longitudeDeg(x);
-        int step = style.step(values.sample(latitudeDeg, longitudeDeg));
+        int step = style.step(values.value(x, y));
         steps[x + 1] = step;
         if (x < 0 || y < 0) {
           continue;
@@ -93,8 +95,7 @@ public final class TileRenderer {
           colour = shade(colour, CHANGE_SHADE);
         } else if (step >= 0
             && (x + y) % HATCH_STEP_PX == 0
-            && sureness.isPresent()
-            && sureness.get().sample(latitudeDeg, longitudeDeg) < COIN_TOSS_BELOW) {
+            && values.sureness(x, y) < COIN_TOSS_BELOW) {
           colour = isDark(colour) ? shade(colour, 1.9) : shade(colour, 0.6);
         }
         image.setRGB(x, y, colour);
@@ -102,6 +103,30 @@ public final class TileRenderer {
       int[] swap = above;
       above = steps;
       steps = swap;
+    }
+  }
+
+  /** Erases the sea pixel by pixel, by the same coast that answers use, and draws its shore. */
+  private void keepLand(BufferedImage image, TileFrame frame) {
+    int size = TileFrame.SIZE_PX;
+    boolean[] above = new boolean[size + 1];
+    boolean[] row = new boolean[size + 1];
+    for (int y = -1; y < size; y++) {
+      for (int x = -1; x < size; x++) {
+        boolean land = isLand.test(frame.latitudeDeg(y), frame.longitudeDeg(x));
+        row[x + 1] = land;
+        if (x < 0 || y < 0) {
+          continue;
+        }
+        if (land != row[x] || land != above[x + 1]) {
+          image.setRGB(x, y, COAST.getRGB());
+        } else if (!land) {
+          image.setRGB(x, y, 0);
+        }
+      }
+      boolean[] swap = above;
+      above = row;
+      row = swap;
     }
   }
 

@@ -45,15 +45,6 @@ public final class WorldShapes {
     return new WorldShapes(land, borders(rings));
   }
 
-  /**
-   * The same borders with a finer coast.
-   *
-   * @param landPolygons GeoJSON of land
-   */
-  public WorldShapes withCoast(InputStream landPolygons) {
-    return new WorldShapes(rings(landPolygons).stream().map(WorldShapes::line).toList(), borders);
-  }
-
   /** Land within a tile, as a filled shape in pixels. */
   Path2D land(TileFrame frame) {
     Path2D path = new Path2D.Double(Path2D.WIND_EVEN_ODD);

@@ -8,13 +8,9 @@ import java.awt.image.BufferedImage;
 import java.io.ByteArrayInputStream;
 import java.io.InputStream;
 import java.nio.charset.StandardCharsets;
-import java.util.Arrays;
-import java.util.Optional;
 import javax.imageio.ImageIO;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
-import saltspoke.fields.Field;
-import saltspoke.fields.Grid;
 import saltspoke.values.Refusal;
 
 /** Two square made-up countries side by side: 0..40 E and 40..80 E, 0..60 N. */
@@ -28,31 +24,30 @@ class TileRendererTest {
       {"type":"Feature","properties":{},"geometry":{"type":"MultiPolygon","coordinates":
       [[[[40,60],[40,0],[80,0],[80,60],[40,60]]]]}}]}
       """;
-  private static final Grid WORLD = new Grid(90, -180, 10, 10, 19, 36, true);
   private static final LayerStyle STYLE =
       LayerStyle.classes("class-zinc", new double[] {0.1, 0.7, 2.1, 4.2, 8.4});
-
-  private final TileRenderer renderer = new TileRenderer(WorldShapes.ofCountries(stream()));
 
   private static InputStream stream() {
     return new ByteArrayInputStream(COUNTRIES.getBytes(StandardCharsets.UTF_8));
   }
 
-  private static Field everywhere(double value) {
-    float[] values = new float[WORLD.rows() * WORLD.columns()];
-    Arrays.fill(values, (float) value);
-    return new Field(WORLD, "um", values);
+  private static BufferedImage tile(double value, double sureness, int z, int x, int y)
+      throws Exception {
+    double[] values = {value, value, value, value};
+    double[] sure = {sureness, sureness, sureness, sureness};
+    byte[] png =
+        new TileRenderer(WorldShapes.ofCountries(stream()), TileRendererTest::isLand)
+            .render(STYLE, new TileValues(2, values, sure), new TileFrame(z, x, y));
+    return ImageIO.read(new ByteArrayInputStream(png));
   }
 
-  private BufferedImage tile(double value, Optional<Field> sureness, int z, int x, int y)
-      throws Exception {
-    byte[] png = renderer.render(STYLE, everywhere(value), sureness, z, x, y);
-    return ImageIO.read(new ByteArrayInputStream(png));
+  private static boolean isLand(double latitudeDeg, double longitudeDeg) {
+    return latitudeDeg > 0 && latitudeDeg < 60 && longitudeDeg > 0 && longitudeDeg < 80;
   }
 
   @Test
   void landCarriesTheColourOfItsStepAndTheSeaNone() throws Exception {
-    BufferedImage world = tile(3, Optional.empty(), 0, 0, 0);
+    BufferedImage world = tile(3, 1, 0, 0, 0);
     int atTwentyEastThirtyNorth = world.getRGB(142, 105);
     assertEquals(STYLE.colours().get(3), atTwentyEastThirtyNorth);
     assertEquals(0, world.getRGB(20, 105) >>> 24, "the sea is transparent");
@@ -60,7 +55,7 @@ class TileRendererTest {
 
   @Test
   void aBorderIsDrawnWhereTwoCountriesMeetAndNowhereElse() throws Exception {
-    BufferedImage tile = tile(3, Optional.empty(), 2, 2, 1);
+    BufferedImage tile = tile(3, 1, 2, 2, 1);
     int fill = STYLE.colours().get(3);
     int borderColumn = (int) Math.round((220 / 360.0 * 4 - 2) * 256);
     boolean drawn =
@@ -72,8 +67,8 @@ class TileRendererTest {
 
   @Test
   void aCoinTossIsHatched() throws Exception {
-    BufferedImage sure = tile(3, Optional.of(everywhere(0.9)), 2, 2, 1);
-    BufferedImage toss = tile(3, Optional.of(everywhere(0.5)), 2, 2, 1);
+    BufferedImage sure = tile(3, 0.9, 2, 2, 1);
+    BufferedImage toss = tile(3, 0.5, 2, 2, 1);
     assertEquals(1, colours(sure, 64).size());
     assertEquals(2, colours(toss, 64).size());
   }
@@ -89,6 +84,15 @@ class TileRendererTest {
   }
 
   @Test
+  void fromTownZoomTheShoreIsThatOfTheAnswers() throws Exception {
+    // Column 256 of zoom 9 starts at 0° E and row 255 ends at the equator: both shores of the land.
+    BufferedImage inside = tile(3, 1, 9, 256, 255);
+    assertEquals(STYLE.colours().get(3), inside.getRGB(128, 128));
+    BufferedImage outside = tile(3, 1, 9, 255, 255);
+    assertEquals(0, outside.getRGB(128, 128) >>> 24);
+  }
+
+  @Test
   void valuesOnABoundBelongToTheMilderClass() {
     assertEquals(0, STYLE.step(0.1));
     assertEquals(1, STYLE.step(Math.nextUp(0.1)));
@@ -98,11 +102,11 @@ class TileRendererTest {
 
   @Test
   void aTileOutsideThePyramidIsRefusedWithItsRange() {
-    Refusal refusal = assertThrows(Refusal.class, () -> tile(3, Optional.empty(), 2, 4, 0));
+    Refusal refusal = assertThrows(Refusal.class, () -> tile(3, 1, 2, 4, 0));
     assertEquals("x", refusal.field());
     assertEquals("0..3", refusal.allowed());
-    assertThrows(Refusal.class, () -> tile(3, Optional.empty(), 12, 0, 0));
-    assertThrows(Refusal.class, () -> tile(3, Optional.empty(), -1, 0, 0));
+    assertThrows(Refusal.class, () -> tile(3, 1, 12, 0, 0));
+    assertThrows(Refusal.class, () -> tile(3, 1, -1, 0, 0));
   }
 
   @Test
