@@ -7,8 +7,8 @@ import saltspoke.atmosphere.AirClimate;
 import saltspoke.values.Note;
 import saltspoke.values.Refusal;
 import saltspoke.wheel.Catalogue;
-import saltspoke.wheel.Pairing;
 import saltspoke.wheel.CellTables;
+import saltspoke.wheel.Pairing;
 import saltspoke.wheel.damage.CellRates;
 import saltspoke.wheel.rim.WheelWeather;
 
@@ -25,9 +25,7 @@ public final class Advisor {
   /** An advisor on a catalogue, with the shipped models of wheel weather and cell. */
   public Advisor(Catalogue catalogue) {
     this(
-        catalogue,
-        WheelWeather::over,
-        CellRates.tabled(new CellTables(CellTables.USUAL_CAPACITY)));
+        catalogue, WheelWeather::over, CellRates.tabled(new CellTables(CellTables.USUAL_CAPACITY)));
   }
 
   Advisor(Catalogue catalogue, WheelYears weather, CellRates rates) {
@@ -44,8 +42,7 @@ public final class Advisor {
   public Advice advise(AirClimate air, AdviceRequest request) {
     check(request);
     List<Pairing> pairings =
-        catalogue.pairings(
-            request.rim(), request.nipple(), request.between(), request.spoke());
+        catalogue.pairings(request.rim(), request.nipple(), request.between(), request.spoke());
     Workshop shop = open(air, request, DRAWS, WheelRisk.NIPPLE_SCATTER);
     List<Case> cases = new ArrayList<>();
     for (Pairing pairing : pairings) {

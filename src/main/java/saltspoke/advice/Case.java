@@ -11,12 +11,7 @@ import saltspoke.wheel.damage.Site;
  * @param look kind of look that shows it
  * @param interval the rule's answer
  */
-record Case(
-    Pairing pairing,
-    Parts parts,
-    WheelRisk risk,
-    LookKind look,
-    Interval interval) {
+record Case(Pairing pairing, Parts parts, WheelRisk risk, LookKind look, Interval interval) {
 
   /** The site that brings a state about first; null when none can. */
   Site leader(State state) {

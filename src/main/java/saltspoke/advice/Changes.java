@@ -23,8 +23,7 @@ final class Changes {
   private final AdviceRequest request;
   private final Function<AdviceRequest, Workshop> opener;
 
-  Changes(
-      Catalogue catalogue, AdviceRequest request, Function<AdviceRequest, Workshop> opener) {
+  Changes(Catalogue catalogue, AdviceRequest request, Function<AdviceRequest, Workshop> opener) {
     this.catalogue = catalogue;
     this.request = request;
     this.opener = opener;
@@ -65,12 +64,7 @@ final class Changes {
     add(options, "drainHoles", yesNo(holes), "parts", Profiled.drained(p, holes));
     for (ThreadCompound compound : ThreadCompound.values()) {
       if (compound != p.threadCompound()) {
-        add(
-            options,
-            "threadCompound",
-            compound.id(),
-            "rebuild",
-            Profiled.compound(p, compound));
+        add(options, "threadCompound", compound.id(), "rebuild", Profiled.compound(p, compound));
       }
     }
     if (p.saltedRoads() != SaltedRoads.NO && !p.months().isEmpty()) {
@@ -129,9 +123,7 @@ final class Changes {
       }
       String field = rim ? "rim" : nipple ? "nipple" : between ? "interface" : "spoke";
       String value =
-          rim
-              ? other.rim()
-              : nipple ? other.nipple() : between ? other.between() : other.spoke();
+          rim ? other.rim() : nipple ? other.nipple() : between ? other.between() : other.spoke();
       found.add(change(field, value, "rebuild", now, open.of(other)));
     }
   }

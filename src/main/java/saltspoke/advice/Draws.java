@@ -7,8 +7,7 @@ import saltspoke.wheel.damage.Assumption;
  * Fates drawn evenly from what is uncertain: one row per draw, one column per {@link Assumption}
  * and for the limits, in standard deviations. The points are a Kronecker sequence on the powers of
  * the generalised golden ratio (the root of x^(d+1) = x + 1), shifted by a seed, each with its
- * mirror image, the columns made
- * uncorrelated and of variance one. Same seed, same rows.
+ * mirror image, the columns made uncorrelated and of variance one. Same seed, same rows.
  */
 final class Draws {
   /** Draws in all; half of them are mirror images. */

@@ -2,7 +2,8 @@ package saltspoke.advice;
 
 /**
  * How a wheel is looked at. Minutes and chances to see are common practice and ASSUMPTION: what
- * shows outside is what creeps out of the hole; a fine crack in a head hides even with the tape off.
+ * shows outside is what creeps out of the hole; a fine crack in a head hides even with the tape
+ * off.
  */
 enum LookKind {
   /** True, tension, powder at the holes, one nipple turned a quarter and back. */

@@ -62,7 +62,6 @@ final class Looks {
     return List.of(
         Note.of("advice-assumes-settled-year"),
         Note.of("advice-assumes-steel-crevices-left-out"),
-        Note.of(
-            "advice-assumes-correlation", "scatter", WheelRisk.NIPPLE_SCATTER));
+        Note.of("advice-assumes-correlation", "scatter", WheelRisk.NIPPLE_SCATTER));
   }
 }

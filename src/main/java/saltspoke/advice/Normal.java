@@ -31,8 +31,8 @@ final class Normal {
   }
 
   /**
-   * Φ(z) by its continued fraction in the tails and its power series in the middle
-   * (Abramowitz and Stegun 26.2.11 and 26.2.14).
+   * Φ(z) by its continued fraction in the tails and its power series in the middle (Abramowitz and
+   * Stegun 26.2.11 and 26.2.14).
    */
   static double cdf(double z) {
     double x = Math.abs(z);

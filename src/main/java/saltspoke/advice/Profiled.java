@@ -18,56 +18,137 @@ final class Profiled {
 
   static RidingProfile storage(RidingProfile p, Storage storage) {
     return copy(
-        p, p.months(), p.wetRideShare(), p.saltedRoads(), p.seaRideShare(), storage, p.rinsing(),
-        p.driedAfterWet(), p.drainHoles(), p.threadCompound(), p.sealant());
+        p,
+        p.months(),
+        p.wetRideShare(),
+        p.saltedRoads(),
+        p.seaRideShare(),
+        storage,
+        p.rinsing(),
+        p.driedAfterWet(),
+        p.drainHoles(),
+        p.threadCompound(),
+        p.sealant());
   }
 
   static RidingProfile rinsing(RidingProfile p, Rinsing rinsing) {
     return copy(
-        p, p.months(), p.wetRideShare(), p.saltedRoads(), p.seaRideShare(), p.storage(), rinsing,
-        p.driedAfterWet(), p.drainHoles(), p.threadCompound(), p.sealant());
+        p,
+        p.months(),
+        p.wetRideShare(),
+        p.saltedRoads(),
+        p.seaRideShare(),
+        p.storage(),
+        rinsing,
+        p.driedAfterWet(),
+        p.drainHoles(),
+        p.threadCompound(),
+        p.sealant());
   }
 
   static RidingProfile dried(RidingProfile p, boolean dried) {
     return copy(
-        p, p.months(), p.wetRideShare(), p.saltedRoads(), p.seaRideShare(), p.storage(),
-        p.rinsing(), dried, p.drainHoles(), p.threadCompound(), p.sealant());
+        p,
+        p.months(),
+        p.wetRideShare(),
+        p.saltedRoads(),
+        p.seaRideShare(),
+        p.storage(),
+        p.rinsing(),
+        dried,
+        p.drainHoles(),
+        p.threadCompound(),
+        p.sealant());
   }
 
   static RidingProfile drained(RidingProfile p, boolean holes) {
     return copy(
-        p, p.months(), p.wetRideShare(), p.saltedRoads(), p.seaRideShare(), p.storage(),
-        p.rinsing(), p.driedAfterWet(), holes, p.threadCompound(), p.sealant());
+        p,
+        p.months(),
+        p.wetRideShare(),
+        p.saltedRoads(),
+        p.seaRideShare(),
+        p.storage(),
+        p.rinsing(),
+        p.driedAfterWet(),
+        holes,
+        p.threadCompound(),
+        p.sealant());
   }
 
   static RidingProfile compound(RidingProfile p, ThreadCompound compound) {
     return copy(
-        p, p.months(), p.wetRideShare(), p.saltedRoads(), p.seaRideShare(), p.storage(),
-        p.rinsing(), p.driedAfterWet(), p.drainHoles(), compound, p.sealant());
+        p,
+        p.months(),
+        p.wetRideShare(),
+        p.saltedRoads(),
+        p.seaRideShare(),
+        p.storage(),
+        p.rinsing(),
+        p.driedAfterWet(),
+        p.drainHoles(),
+        compound,
+        p.sealant());
   }
 
   static RidingProfile sealant(RidingProfile p, Sealant sealant) {
     return copy(
-        p, p.months(), p.wetRideShare(), p.saltedRoads(), p.seaRideShare(), p.storage(),
-        p.rinsing(), p.driedAfterWet(), p.drainHoles(), p.threadCompound(), sealant);
+        p,
+        p.months(),
+        p.wetRideShare(),
+        p.saltedRoads(),
+        p.seaRideShare(),
+        p.storage(),
+        p.rinsing(),
+        p.driedAfterWet(),
+        p.drainHoles(),
+        p.threadCompound(),
+        sealant);
   }
 
   static RidingProfile roads(RidingProfile p, SaltedRoads roads) {
     return copy(
-        p, p.months(), p.wetRideShare(), roads, p.seaRideShare(), p.storage(), p.rinsing(),
-        p.driedAfterWet(), p.drainHoles(), p.threadCompound(), p.sealant());
+        p,
+        p.months(),
+        p.wetRideShare(),
+        roads,
+        p.seaRideShare(),
+        p.storage(),
+        p.rinsing(),
+        p.driedAfterWet(),
+        p.drainHoles(),
+        p.threadCompound(),
+        p.sealant());
   }
 
   static RidingProfile awayFromSea(RidingProfile p) {
     return copy(
-        p, p.months(), p.wetRideShare(), p.saltedRoads(), 0, p.storage(), p.rinsing(),
-        p.driedAfterWet(), p.drainHoles(), p.threadCompound(), p.sealant());
+        p,
+        p.months(),
+        p.wetRideShare(),
+        p.saltedRoads(),
+        0,
+        p.storage(),
+        p.rinsing(),
+        p.driedAfterWet(),
+        p.drainHoles(),
+        p.threadCompound(),
+        p.sealant());
   }
 
   static RidingProfile neverWet(RidingProfile p) {
     return copy(
-        p, p.months(), 0, p.saltedRoads(), p.seaRideShare(), p.storage(), p.rinsing(),
-        p.driedAfterWet(), p.drainHoles(), p.threadCompound(), p.sealant());
+        p,
+        p.months(),
+        0,
+        p.saltedRoads(),
+        p.seaRideShare(),
+        p.storage(),
+        p.rinsing(),
+        p.driedAfterWet(),
+        p.drainHoles(),
+        p.threadCompound(),
+        p.sealant());
   }
 
   /** Not ridden outdoors from November to March, or May to September south of the equator. */
@@ -75,8 +156,17 @@ final class Profiled {
     TreeSet<Integer> months = new TreeSet<>(p.months());
     months.removeAll(south ? WINTER_SOUTH : WINTER_NORTH);
     return copy(
-        p, months, p.wetRideShare(), p.saltedRoads(), p.seaRideShare(), p.storage(), p.rinsing(),
-        p.driedAfterWet(), p.drainHoles(), p.threadCompound(), p.sealant());
+        p,
+        months,
+        p.wetRideShare(),
+        p.saltedRoads(),
+        p.seaRideShare(),
+        p.storage(),
+        p.rinsing(),
+        p.driedAfterWet(),
+        p.drainHoles(),
+        p.threadCompound(),
+        p.sealant());
   }
 
   private static RidingProfile copy(

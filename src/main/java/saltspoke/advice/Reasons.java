@@ -55,8 +55,7 @@ final class Reasons {
 
   private static void limit(Case worked, Interval interval, List<Note> notes) {
     Site limiting = worked.limiting();
-    boolean wears =
-        worked.leader(State.SEIZED) != null || worked.leader(State.LOST) != null;
+    boolean wears = worked.leader(State.SEIZED) != null || worked.leader(State.LOST) != null;
     if (limiting == null || !wears) {
       notes.add(Note.of("advice-nothing-corrodes"));
     } else if (interval.freeFirstMonths() >= RiskLimits.HORIZON_MONTHS) {
@@ -73,8 +72,7 @@ final class Reasons {
     }
     if (interval.everyLimitedBy().equals("warning-time")) {
       notes.add(
-          Note.of(
-              "advice-warning-time", "months", Answer.rounded(2 * interval.freeEveryMonths())));
+          Note.of("advice-warning-time", "months", Answer.rounded(2 * interval.freeEveryMonths())));
     }
   }
 
@@ -129,7 +127,9 @@ final class Reasons {
             Answer.rounded(limiting.dose().steady().um(12))));
   }
 
-  /** What of place, salt and storage decides for the pairing in focus, and how many salted rides. */
+  /**
+   * What of place, salt and storage decides for the pairing in focus, and how many salted rides.
+   */
   static List<Note> whatDecides(
       Case worked, List<Change> changes, WheelYear year, AdviceRequest request) {
     List<Note> notes = new ArrayList<>();

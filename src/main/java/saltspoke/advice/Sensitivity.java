@@ -52,11 +52,9 @@ public final class Sensitivity {
     List<Tornado.Bar> bars = new ArrayList<>();
     for (Assumption assumption : Assumption.values()) {
       double low =
-          first(
-              air, request, pairing, WheelWeather::over, draws.holding(assumption, -1), scatter);
+          first(air, request, pairing, WheelWeather::over, draws.holding(assumption, -1), scatter);
       double high =
-          first(
-              air, request, pairing, WheelWeather::over, draws.holding(assumption, 1), scatter);
+          first(air, request, pairing, WheelWeather::over, draws.holding(assumption, 1), scatter);
       bars.add(bar(assumption.id(), "damage", assumption.spread(), base, low, high));
     }
     for (RimAssumption assumption : RimAssumption.values()) {
@@ -96,15 +94,8 @@ public final class Sensitivity {
 
   private static Tornado.Bar bar(
       String name, String room, String spread, double base, double low, double high) {
-    double factor =
-        Math.max(
-            Math.max(low / base, base / low), Math.max(high / base, base / high));
+    double factor = Math.max(Math.max(low / base, base / low), Math.max(high / base, base / high));
     return new Tornado.Bar(
-        name,
-        room,
-        spread,
-        Answer.rounded(low),
-        Answer.rounded(high),
-        Answer.rounded(factor));
+        name, room, spread, Answer.rounded(low), Answer.rounded(high), Answer.rounded(factor));
   }
 }

@@ -7,11 +7,11 @@ import java.util.List;
  * The chance that a wheel has reached a state, its worst nipple deciding.
  *
  * <p>In each draw all nipples share the drawn assumptions (that is their correlation) and each has
- * a scatter of its own: nipple j loses exp(σ·z_j) times the median. A nipple is then in a state from
- * the time on at which z_j passes a threshold ζ = min over sites of (ln limit − ln dose)/σ, and a
- * wheel of N nipples is still free of it with chance Φ(ζ)^N. Chances are means over the draws. With
- * the scatter below and a common spread of ln 1.8 to ln 2.5 the correlation of ln life between two
- * nipples of a wheel is 0.7 to 0.85.
+ * a scatter of its own: nipple j loses exp(σ·z_j) times the median. A nipple is then in a state
+ * from the time on at which z_j passes a threshold ζ = min over sites of (ln limit − ln dose)/σ,
+ * and a wheel of N nipples is still free of it with chance Φ(ζ)^N. Chances are means over the
+ * draws. With the scatter below and a common spread of ln 1.8 to ln 2.5 the correlation of ln life
+ * between two nipples of a wheel is 0.7 to 0.85.
  */
 final class WheelRisk {
   /**
@@ -88,9 +88,7 @@ final class WheelRisk {
 
   /** Chance of it some months from now, for a wheel of which the last look found something. */
   double chance(State state, double months, History history) {
-    return history.isNew()
-        ? chance(state, months)
-        : new Belief(history).chance(state, months);
+    return history.isNew() ? chance(state, months) : new Belief(history).chance(state, months);
   }
 
   /** Months from now at which the chance reaches a level; infinite beyond the horizon. */
@@ -130,9 +128,7 @@ final class WheelRisk {
   }
 
   private double chanceAtStep(State state, int step, Belief belief) {
-    return belief == null
-        ? chanceAt(state, step)
-        : belief.chance(state, SiteTable.months(step));
+    return belief == null ? chanceAt(state, step) : belief.chance(state, SiteTable.months(step));
   }
 
   /**
@@ -165,8 +161,8 @@ final class WheelRisk {
 
   /**
    * What a finding at an age leaves of each draw. A finding that no draw can explain (a clean wheel
-   * where all say it should be eaten) leaves the half of the draws that come nearest: those in which
-   * the worst nipple is slowest.
+   * where all say it should be eaten) leaves the half of the draws that come nearest: those in
+   * which the worst nipple is slowest.
    */
   private final class Belief {
     private final double ageMonths;

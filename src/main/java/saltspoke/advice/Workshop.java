@@ -78,8 +78,7 @@ final class Workshop {
     History history =
         request.ageMonths() <= 0
             ? History.NEW
-            : new History(
-                request.ageMonths(), request.lastFinding(), look.finds(State.ATTACKED));
+            : new History(request.ageMonths(), request.lastFinding(), look.finds(State.ATTACKED));
     Interval interval =
         Interval.of(
             risk,

@@ -36,8 +36,7 @@ public final class TestClimates {
     all.put(
         "humid-subtropical",
         climate(20, 8, 74, 0, 9, 120, 10, 0, 0, new double[] {35, 1.8, 1.6, 0.4}));
-    all.put(
-        "hot-desert", climate(25, 9, 30, 8, 15, 20, 2, 0, 0, new double[] {3, 0.2, 0.1, 0.05}));
+    all.put("hot-desert", climate(25, 9, 30, 8, 15, 20, 2, 0, 0, new double[] {3, 0.2, 0.1, 0.05}));
     return all;
   }
 
@@ -75,23 +74,43 @@ public final class TestClimates {
       for (double spell : new double[] {-1.4, -0.5, 0.5, 1.4}) {
         double dayC = celsius + 2.5 * spell;
         double moist = hpa * (1 + 0.18 * spell + 0.05 * spell * spell);
-        days.add(
-            new DayType(0.25, dayC, rangeC, Math.min(moist, 0.99 * saturationHpa(dayC))));
+        days.add(new DayType(0.25, dayC, rangeC, Math.min(moist, 0.99 * saturationHpa(dayC))));
       }
       double nearFreezing =
           30 / (1 + Math.exp((celsius - 3) / 1.5)) / (1 + Math.exp(-(celsius + 8) / 2));
       months.add(
           new MonthAir(
-              m + 1, celsius, rh, hpa, rangeC, 0, 0, 0, 0, wetDays * 5 / 12, wetDays / 12, 4,
-              nearFreezing, nearFreezing, chloride, days));
+              m + 1,
+              celsius,
+              rh,
+              hpa,
+              rangeC,
+              0,
+              0,
+              0,
+              0,
+              wetDays * 5 / 12,
+              wetDays / 12,
+              4,
+              nearFreezing,
+              nearFreezing,
+              chloride,
+              days));
       double share = Math.max(0, winter) / 3.732;
       salted.add(new RoadSalt.Month(m + 1, treatments * share, saltOnRoad * Math.max(0, winter)));
     }
     double[] far = new double[SeaView.DIRECTIONS];
     return new AirClimate(
         new Place(
-            "invented", "", "", 50, 0, 10,
-            new SeaView(10, far, far, far), new Surroundings(0, 0, 0), List.of()),
+            "invented",
+            "",
+            "",
+            50,
+            0,
+            10,
+            new SeaView(10, far, far, far),
+            new Surroundings(0, 0, 0),
+            List.of()),
         months,
         new AnnualAir(meanC, rhPct, 0, wetDays * 5, 0, 0),
         new Quantiles(chloride / 2, chloride, chloride * 2),

@@ -43,8 +43,8 @@ public enum Assumption {
 
   /**
    * Change of ln rate per change of ln salt at the seat. More salt makes the film thicker and wet
-   * for longer, but past a few g/m² it only thickens brine. Computed with the wheel's weather and the
-   * cell for aluminium on carbon: 0.35 to 0.4.
+   * for longer, but past a few g/m² it only thickens brine. Computed with the wheel's weather and
+   * the cell for aluminium on carbon: 0.35 to 0.4.
    */
   public static final double SALT_ELASTICITY = 0.4;
 
@@ -68,7 +68,9 @@ public enum Assumption {
     return spread;
   }
 
-  /** One standard deviation of the natural logarithm; 0 where the part or the air brings its own. */
+  /**
+   * One standard deviation of the natural logarithm; 0 where the part or the air brings its own.
+   */
   public double lnSpread() {
     return lnSpread;
   }

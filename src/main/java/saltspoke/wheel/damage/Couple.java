@@ -1,9 +1,9 @@
 package saltspoke.wheel.damage;
 
+import saltspoke.values.Quantiles;
 import saltspoke.wheel.CellSpec;
 import saltspoke.wheel.Coating;
 import saltspoke.wheel.Material;
-import saltspoke.values.Quantiles;
 
 /**
  * One place at a spoke hole where one part is eaten, with or without another driving it.

@@ -48,9 +48,7 @@ final class Fretting {
     double[] monthly = new double[12];
     for (int m = 0; m < 12; m++) {
       double weekly =
-          profile.months().contains(m + 1)
-              ? profile.hoursPerWeek()
-              : profile.trainerHoursPerWeek();
+          profile.months().contains(m + 1) ? profile.hoursPerWeek() : profile.trainerHoursPerWeek();
       monthly[m] = weekly * WEEKS_PER_MONTH * ALUMINIUM_UM_PER_HOUR * relative(metal);
     }
     return monthly;

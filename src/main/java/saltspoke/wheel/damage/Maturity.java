@@ -37,8 +37,7 @@ final class Maturity {
     for (int i = 1; i < POINTS; i++) {
       double a = months(i - 1);
       double b = months(i);
-      integral[i] =
-          integral[i - 1] + (b - a) / 6 * (at(a) + 4 * at((a + b) / 2) + at(b));
+      integral[i] = integral[i - 1] + (b - a) / 6 * (at(a) + 4 * at((a + b) / 2) + at(b));
     }
     for (int m = 1; m <= MONTHS; m++) {
       atMonth[m] = settledMonths((double) m);

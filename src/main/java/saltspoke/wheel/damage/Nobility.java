@@ -29,7 +29,14 @@ final class Nobility {
   /** Whether a metal dissolves at all in salt water at its own potential or a nobler one. */
   static boolean corrodes(Material material) {
     return switch (material) {
-      case ZINC, ALUMINIUM_HIGH_STRENGTH, ALUMINIUM_WROUGHT, CARBON_STEEL, BRASS, NICKEL, NICKEL_ALUMINIUM_BRONZE -> true;
+      case ZINC,
+          ALUMINIUM_HIGH_STRENGTH,
+          ALUMINIUM_WROUGHT,
+          CARBON_STEEL,
+          BRASS,
+          NICKEL,
+          NICKEL_ALUMINIUM_BRONZE ->
+          true;
       case STAINLESS, STAINLESS_PH, TITANIUM, PLATINUM, CARBON_FIBRE, POLYMER -> false;
     };
   }

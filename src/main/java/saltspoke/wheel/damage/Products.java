@@ -27,8 +27,8 @@ public final class Products {
 
   /**
    * Volume of product over volume of metal, from molar volumes (computed from densities recalled
-   * from memory): Al(OH)3 32 over 10.0 cm³; iron oxyhydroxide 21 over 7.1; brass in chloride: Cu2(OH)3Cl
-   * 28.3 per copper over 7.1 and Zn5(OH)8Cl2·H2O 33 per zinc over 9.2, together 3.9.
+   * from memory): Al(OH)3 32 over 10.0 cm³; iron oxyhydroxide 21 over 7.1; brass in chloride:
+   * Cu2(OH)3Cl 28.3 per copper over 7.1 and Zn5(OH)8Cl2·H2O 33 per zinc over 9.2, together 3.9.
    */
   static double volumeRatio(Material material) {
     return switch (material) {
@@ -57,13 +57,14 @@ public final class Products {
       case CARBON_STEEL -> 10;
       case BRASS, NICKEL, NICKEL_ALUMINIUM_BRONZE -> 15;
       case ZINC -> 10;
-      case STAINLESS, STAINLESS_PH, TITANIUM, PLATINUM, CARBON_FIBRE, POLYMER -> Double.POSITIVE_INFINITY;
+      case STAINLESS, STAINLESS_PH, TITANIUM, PLATINUM, CARBON_FIBRE, POLYMER ->
+          Double.POSITIVE_INFINITY;
     };
   }
 
   /**
-   * Uniform loss of an open surface at which it looks attacked, µm: dull brass, bloom on
-   * aluminium, rust. ASSUMPTION, same spread.
+   * Uniform loss of an open surface at which it looks attacked, µm: dull brass, bloom on aluminium,
+   * rust. ASSUMPTION, same spread.
    */
   public static double visibleInOpenUm(Material material) {
     return switch (material) {

@@ -15,8 +15,8 @@ import saltspoke.wheel.Material;
  * @param visibleUm dose at first visible attack
  * @param seizedUm dose at which the nipple no longer turns
  * @param lostUm dose at which head or rim bed is lost
- * @param lnShift change of ln dose for one spread of each {@link Assumption}, by ordinal; effects on
- *     limits stand in the limits' own assumptions
+ * @param lnShift change of ln dose for one spread of each {@link Assumption}, by ordinal; effects
+ *     on limits stand in the limits' own assumptions
  */
 public record Site(
     String part,

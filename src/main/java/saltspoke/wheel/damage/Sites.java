@@ -110,8 +110,7 @@ public final class Sites {
   /** Everything that a couple's site depends on besides the question itself. */
   private static Object key(Parts parts, Couple couple) {
     boolean thread = couple.where() == Couple.Where.THREAD;
-    return List.of(
-        couple, parts.nipple().id(), thread ? parts.spoke().id() : parts.rim().id());
+    return List.of(couple, parts.nipple().id(), thread ? parts.spoke().id() : parts.rim().id());
   }
 
   private Site site(Parts parts, Couple couple) {
@@ -140,17 +139,17 @@ public final class Sites {
     double[] ln = shifts(couple, bare, thread, worn);
     set(ln, Assumption.COATING_LIFE, coatingShift(dose, unshielded, through, delay));
     return new Site(
-            couple.part(),
-            thread ? "thread" : "seat",
-            couple.metal(),
-            dose,
-            monthly,
-            thread
-                ? seized(parts, couple) * Products.STIFF_SHARE
-                : Products.visibleAtSeatUm(couple.metal()),
-            seized(parts, couple),
-            lost(parts, couple),
-            ln);
+        couple.part(),
+        thread ? "thread" : "seat",
+        couple.metal(),
+        dose,
+        monthly,
+        thread
+            ? seized(parts, couple) * Products.STIFF_SHARE
+            : Products.visibleAtSeatUm(couple.metal()),
+        seized(parts, couple),
+        lost(parts, couple),
+        ln);
   }
 
   private static boolean wornThread(Couple couple) {
@@ -181,16 +180,16 @@ public final class Sites {
     set(ln, Assumption.THREAD_ACCESS, Assumption.THREAD_ACCESS.lnSpread());
     double seized = Fretting.toFillUm(metal);
     return new Site(
-            "nipple",
-            "galling",
-            metal,
-            new SeasonalDose(
-                monthly, buildMonth, new double[12], threadMaturity(profile.threadCompound())),
-            monthly,
-            Double.POSITIVE_INFINITY,
-            seized,
-            Double.POSITIVE_INFINITY,
-            ln);
+        "nipple",
+        "galling",
+        metal,
+        new SeasonalDose(
+            monthly, buildMonth, new double[12], threadMaturity(profile.threadCompound())),
+        monthly,
+        Double.POSITIVE_INFINITY,
+        seized,
+        Double.POSITIVE_INFINITY,
+        ln);
   }
 
   /**
@@ -221,7 +220,8 @@ public final class Sites {
 
   /**
    * Share of the film's attack that reaches the thread in the end. ASSUMPTION: all of it on dry or
-   * once oiled threads; what is left of grease and of a filled paste keeps two and three fifths out; spread in {@link Assumption#THREAD_ACCESS}.
+   * once oiled threads; what is left of grease and of a filled paste keeps two and three fifths
+   * out; spread in {@link Assumption#THREAD_ACCESS}.
    */
   private static double access(ThreadCompound compound) {
     return switch (compound) {
@@ -253,8 +253,7 @@ public final class Sites {
     double full = Math.min(1, range / (2 * WINTER_HALF_RANGE_K));
     double[] weights = new double[12];
     for (MonthAir month : air.months()) {
-      weights[month.month() - 1] =
-          range > 0 ? full * (warmest - month.temperatureC()) / range : 0;
+      weights[month.month() - 1] = range > 0 ? full * (warmest - month.temperatureC()) / range : 0;
     }
     return weights;
   }
@@ -264,8 +263,7 @@ public final class Sites {
       case "nipple" -> parts.nipple().coating();
       case "rim" -> parts.rim().coating();
       case "spoke" -> parts.spoke().coating();
-      default -> new Coating(
-          Coating.Kind.NONE, 0, couple.bareShare(), couple.bareShare());
+      default -> new Coating(Coating.Kind.NONE, 0, couple.bareShare(), couple.bareShare());
     };
   }
 
@@ -284,8 +282,7 @@ public final class Sites {
     double bodyMm = parts.nipple().bodyDiameterMm();
     double roomMm3 =
         Math.PI / 4 * (holeMm * holeMm - bodyMm * bodyMm) * parts.rim().bedThicknessMm();
-    double ringMm2 =
-        couple.wholeRing().ringCircumferenceMm() * couple.wholeRing().ringWidthMm();
+    double ringMm2 = couple.wholeRing().ringCircumferenceMm() * couple.wholeRing().ringWidthMm();
     return 1000 * Products.SEAT_FILL * roomMm3 / ringMm2;
   }
 
@@ -323,17 +320,11 @@ public final class Sites {
         driven
             * (ACTIVE_ELASTICITY * lnSpread(couple.activeShare())
                 + EDGE_ELASTICITY * lnSpread(couple.edgeShare())));
-    set(
-        ln,
-        Assumption.SEAT_BARE,
-        (self + driven * RING_ELASTICITY) * lnSpread(couple.bareShare()));
+    set(ln, Assumption.SEAT_BARE, (self + driven * RING_ELASTICITY) * lnSpread(couple.bareShare()));
     set(ln, Assumption.CATHODE_SPEED, driven * Assumption.CATHODE_SPEED.lnSpread());
     set(ln, Assumption.LOCAL_ATTACK, loss.localShare() * Assumption.LOCAL_ATTACK.lnSpread());
     set(ln, Assumption.WET_HOURS, Assumption.WET_HOURS.lnSpread());
-    set(
-        ln,
-        Assumption.SALT_STORE,
-        Assumption.SALT_ELASTICITY * Assumption.SALT_STORE.lnSpread());
+    set(ln, Assumption.SALT_STORE, Assumption.SALT_ELASTICITY * Assumption.SALT_STORE.lnSpread());
     set(ln, Assumption.CALIBRATION, Assumption.CALIBRATION.lnSpread());
     for (int k = 0; k < ln.length; k++) {
       ln[k] *= 1 - worn;
@@ -374,15 +365,15 @@ public final class Sites {
     set(ln, Assumption.AIR_LOSS, lnSpread(loss.firstYearLossUm()));
     set(ln, Assumption.SHELTER, Assumption.SHELTER.lnSpread());
     return new Site(
-            "nipple",
-            "open-air",
-            metal,
-            dose,
-            monthly,
-            Products.visibleInOpenUm(metal),
-            Double.POSITIVE_INFINITY,
-            Double.POSITIVE_INFINITY,
-            ln);
+        "nipple",
+        "open-air",
+        metal,
+        dose,
+        monthly,
+        Products.visibleInOpenUm(metal),
+        Double.POSITIVE_INFINITY,
+        Double.POSITIVE_INFINITY,
+        ln);
   }
 
   private static Optional<Metal> standard(Material material) {

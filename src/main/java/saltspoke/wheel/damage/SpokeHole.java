@@ -21,7 +21,9 @@ public final class SpokeHole {
   /** Length of thread at its mouth that the film wets, mm. ASSUMPTION: about two pitches. */
   static final double THREAD_MOUTH_MM = 1.0;
 
-  /** Metallic path nipple–seat–rim, Ω. ASSUMPTION: pressed seat; far below the film's resistance. */
+  /**
+   * Metallic path nipple–seat–rim, Ω. ASSUMPTION: pressed seat; far below the film's resistance.
+   */
   static final double SEAT_OHM = 10;
 
   private static final Quantiles WHOLE = new Quantiles(1, 1, 1);
@@ -71,13 +73,22 @@ public final class SpokeHole {
     } else if (toRim) {
       whole = againstRim(parts, washer);
     } else {
-      whole = alone(nipple.material(), radiusMm, nipple.ringCircumferenceMm(), nipple.ringWidthMm());
+      whole =
+          alone(nipple.material(), radiusMm, nipple.ringCircumferenceMm(), nipple.ringWidthMm());
       active = WHOLE;
       edge = WHOLE;
     }
     Quantiles bare = nipple.coating().seatBareShare();
     return Optional.of(
-        new Couple("nipple", Couple.Where.SEAT, bareOf(whole, bare.median()), whole, bare, active, edge, null));
+        new Couple(
+            "nipple",
+            Couple.Where.SEAT,
+            bareOf(whole, bare.median()),
+            whole,
+            bare,
+            active,
+            edge,
+            null));
   }
 
   private static CellSpec againstRim(Parts parts, Optional<Material> washer) {
@@ -140,7 +151,15 @@ public final class SpokeHole {
             : alone(rim.material(), radiusMm, lengthMm, rim.ringWidthMm());
     Quantiles bare = rim.coating().seatBareShare();
     return Optional.of(
-        new Couple("rim", Couple.Where.SEAT, bareOf(whole, bare.median()), whole, bare, WHOLE, WHOLE, null));
+        new Couple(
+            "rim",
+            Couple.Where.SEAT,
+            bareOf(whole, bare.median()),
+            whole,
+            bare,
+            WHOLE,
+            WHOLE,
+            null));
   }
 
   private static Optional<Couple> washerAtSeat(Parts parts, Material washer) {
@@ -211,8 +230,7 @@ public final class SpokeHole {
     double radiusMm = nipple.threadDiameterMm() / 2;
     double lengthMm = Math.PI * nipple.threadDiameterMm();
     // Area of the wire near the nipple, written as a disc around the thread.
-    double outerMm =
-        Math.sqrt(radiusMm * radiusMm + parts.spoke().wettedAreaCm2() * 100 / Math.PI);
+    double outerMm = Math.sqrt(radiusMm * radiusMm + parts.spoke().wettedAreaCm2() * 100 / Math.PI);
     CellSpec whole =
         Nobility.nobler(other, anode)
             ? new CellSpec(
@@ -259,8 +277,7 @@ public final class SpokeHole {
 
   /** A ring that nothing drives: it is eaten by itself. */
   private static CellSpec alone(Material metal, double radiusMm, double lengthMm, double widthMm) {
-    return new CellSpec(
-        metal, null, radiusMm, lengthMm, widthMm, 0, 0, radiusMm, SEAT_OHM, 0);
+    return new CellSpec(metal, null, radiusMm, lengthMm, widthMm, 0, 0, radiusMm, SEAT_OHM, 0);
   }
 
   /** Radius of the disc around the hole that has the wet area of the nipple's head. */
