@@ -7,16 +7,21 @@ import saltspoke.wheel.damage.Site;
 /**
  * One pairing worked out under one request.
  *
- * @param risk chances over time
- * @param look kind of look that shows it
- * @param interval the rule's answer
+ * @param fate what becomes of such a wheel
  */
-record Case(Pairing pairing, Parts parts, WheelRisk risk, LookKind look, Interval interval) {
+record Case(Pairing pairing, Parts parts, Fate fate) {
+
+  Interval interval() {
+    return fate.interval();
+  }
+
+  LookKind look() {
+    return fate.look();
+  }
 
   /** The site that brings a state about first; null when none can. */
   Site leader(State state) {
-    SiteRisk first = risk.leader(state);
-    return first == null ? null : first.site();
+    return fate.leader(state);
   }
 
   /** The site that decides the interval: what seizes first, else what is lost, else what shows. */

@@ -22,7 +22,7 @@ final class Reasons {
     if (request.lastFinding() == Finding.ONE_STIFF) {
       notes.add(Note.of("advice-seized-already"));
     }
-    if (worked.risk().surprisedBy(Answer.history(worked, request))) {
+    if (worked.fate().surprising()) {
       notes.add(Note.of("advice-finding-unexpected"));
     }
     limit(worked, interval, notes);

@@ -12,6 +12,7 @@ import java.util.List;
  * and a wheel of N nipples is still free of it with chance Φ(ζ)^N. Chances are means over the
  * draws. With the scatter below and a common spread of ln 1.8 to ln 2.5 the correlation of ln life
  * between two nipples of a wheel is 0.7 to 0.85.
+ * Serves one thread.
  */
 final class WheelRisk {
   /**
@@ -23,6 +24,12 @@ final class WheelRisk {
   private final SiteRisk[] sites;
   private final WorstOf worst;
   private final boolean steady;
+  private final double[] zeta = new double[Draws.COUNT];
+
+  /** Chances already worked out, by state and step of time; −1 for none yet. */
+  private final double[][] known = new double[State.values().length][];
+
+  private Belief belief;
 
   /**
    * @param sites of one nipple hole
@@ -56,26 +63,29 @@ final class WheelRisk {
     return first;
   }
 
-  /** Thresholds ζ of a state at a place in time, one per draw. */
-  private double[] zetas(State state, double place) {
-    double[] zeta = new double[Draws.COUNT];
-    Arrays.fill(zeta, Double.POSITIVE_INFINITY);
+  /** Fills in the thresholds ζ of a state at a place in time, one per draw. */
+  private double[] zetas(State state, double place, double[] zeta) {
+    boolean first = true;
     for (SiteRisk site : sites) {
       if (site.canCause(state)) {
         double done = site.table(steady).at(place);
         double[] threshold = site.thresholds(state);
         for (int n = 0; n < zeta.length; n++) {
-          zeta[n] = Math.min(zeta[n], threshold[n] - done);
+          double z = threshold[n] - done;
+          zeta[n] = first || z < zeta[n] ? z : zeta[n];
         }
+        first = false;
       }
+    }
+    if (first) {
+      Arrays.fill(zeta, Double.POSITIVE_INFINITY);
     }
     return zeta;
   }
 
   private double chanceAt(State state, double place) {
-    double[] zeta = zetas(state, place);
     double free = 0;
-    for (double z : zeta) {
+    for (double z : zetas(state, place, zeta)) {
       free += worst.none(z);
     }
     return 1 - free / zeta.length;
@@ -88,7 +98,14 @@ final class WheelRisk {
 
   /** Chance of it some months from now, for a wheel of which the last look found something. */
   double chance(State state, double months, History history) {
-    return history.isNew() ? chance(state, months) : new Belief(history).chance(state, months);
+    return history.isNew() ? chance(state, months) : believing(history).chance(state, months);
+  }
+
+  private Belief believing(History history) {
+    if (belief == null || !belief.history.equals(history)) {
+      belief = new Belief(history);
+    }
+    return belief;
   }
 
   /** Months from now at which the chance reaches a level; infinite beyond the horizon. */
@@ -96,20 +113,20 @@ final class WheelRisk {
     if (Arrays.stream(sites).noneMatch(site -> site.canCause(state))) {
       return Double.POSITIVE_INFINITY;
     }
-    Belief belief = history.isNew() ? null : new Belief(history);
+    Belief given = history.isNew() ? null : believing(history);
     int low = 0;
     int high = (int) Math.ceil(SiteTable.place(horizonMonths));
-    double atHigh = chanceAtStep(state, high, belief);
+    double atHigh = chanceAtStep(state, high, given);
     if (atHigh < level) {
       return Double.POSITIVE_INFINITY;
     }
-    double atLow = chanceAtStep(state, low, belief);
+    double atLow = chanceAtStep(state, low, given);
     if (atLow >= level) {
       return history.isNew() ? SiteTable.FIRST_MONTHS : 0;
     }
     while (high - low > 1) {
       int middle = (low + high) >>> 1;
-      double at = chanceAtStep(state, middle, belief);
+      double at = chanceAtStep(state, middle, given);
       if (at >= level) {
         high = middle;
         atHigh = at;
@@ -124,11 +141,23 @@ final class WheelRisk {
 
   /** Whether no draw explains the finding, so that the look is to be trusted over the model. */
   boolean surprisedBy(History history) {
-    return !history.isNew() && new Belief(history).surprising;
+    return !history.isNew() && believing(history).surprising;
   }
 
-  private double chanceAtStep(State state, int step, Belief belief) {
-    return belief == null ? chanceAt(state, step) : belief.chance(state, SiteTable.months(step));
+  private double chanceAtStep(State state, int step, Belief given) {
+    if (given != null) {
+      return given.chance(state, SiteTable.months(step));
+    }
+    double[] chances = known[state.ordinal()];
+    if (chances == null) {
+      chances = new double[SiteTable.POINTS];
+      Arrays.fill(chances, -1);
+      known[state.ordinal()] = chances;
+    }
+    if (chances[step] < 0) {
+      chances[step] = chanceAt(state, step);
+    }
+    return chances[step];
   }
 
   /**
@@ -165,7 +194,7 @@ final class WheelRisk {
    * which the worst nipple is slowest.
    */
   private final class Belief {
-    private final double ageMonths;
+    private final History history;
     private final Evidence evidence;
     private final double[] attacked;
     private final double[] seized;
@@ -174,12 +203,12 @@ final class WheelRisk {
     private double weights;
 
     Belief(History history) {
-      ageMonths = history.ageMonths();
+      this.history = history;
       evidence = new Evidence(history, worst);
-      double place = SiteTable.place(ageMonths);
-      attacked = zetas(State.ATTACKED, place);
-      seized = zetas(State.SEIZED, place);
-      lost = zetas(State.LOST, place);
+      double place = SiteTable.place(history.ageMonths());
+      attacked = zetas(State.ATTACKED, place, new double[Draws.COUNT]);
+      seized = zetas(State.SEIZED, place, new double[Draws.COUNT]);
+      lost = zetas(State.LOST, place, new double[Draws.COUNT]);
       for (int n = 0; n < attacked.length; n++) {
         weights += evidence.weight(attacked[n], seized[n], lost[n]);
       }
@@ -187,7 +216,7 @@ final class WheelRisk {
     }
 
     double chance(State state, double months) {
-      double[] zeta = zetas(state, SiteTable.place(ageMonths + months));
+      double[] zeta = zetas(state, SiteTable.place(history.ageMonths() + months), WheelRisk.this.zeta);
       if (surprising) {
         return surprised(zeta);
       }

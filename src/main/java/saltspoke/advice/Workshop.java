@@ -29,6 +29,7 @@ final class Workshop {
   private final double scatter;
   private final WorstOf worst;
   private final Map<Site, SiteRisk> ready = new IdentityHashMap<>();
+  private final Map<List<SiteRisk>, Fate> fates = new HashMap<>();
   private final Map<Pairing, Case> worked = new HashMap<>();
 
   Workshop(
@@ -70,23 +71,7 @@ final class Workshop {
     for (Site site : sites.of(parts)) {
       found.add(ready.computeIfAbsent(site, s -> new SiteRisk(s, draws, scatter)));
     }
-    WheelRisk risk = new WheelRisk(found, worst, false);
-    SiteRisk leader = risk.leader(State.SEIZED);
-    LookKind look =
-        LookKind.of(
-            request.build().hiddenNipples(), leader == null ? "nipple" : leader.site().part());
-    History history =
-        request.ageMonths() <= 0
-            ? History.NEW
-            : new History(request.ageMonths(), request.lastFinding(), look.finds(State.ATTACKED));
-    Interval interval =
-        Interval.of(
-            risk,
-            risk.atMeanPace(),
-            history,
-            RiskLimits.of(request.risk()),
-            look,
-            request.practiceLimits());
-    return new Case(pairing, parts, risk, look, interval);
+    Fate fate = fates.computeIfAbsent(found, f -> new Fate(f, worst, request));
+    return new Case(pairing, parts, fate);
   }
 }
