@@ -8,24 +8,24 @@ package saltspoke.atmosphere;
  */
 final class DiurnalRangeModel {
   private static final double[] COEFFICIENTS = {
-    2.4247, // constant
-    2.0762, // RH / 100
-    -2.666, // its square
-    -0.27317, // near the sea × annual marine wind / 10
-    -0.13001, // rain
-    0.059766, // annual rain
-    0.08316, // rain × T
-    -0.30668, // RH × T
-    0.14078, // T / 20
-    -0.025572, // its square
-    0.26401, // near the sea × RH
-    -0.25002, // near the sea
-    0.08952, // near the sea × |latitude|
-    0.024888, // RH × elevation
-    0.069626, // seasonal range / 20
-    0.024264, // winter phase
-    -0.077865, // RH × winter phase
-    -0.24059, // |latitude| / 90
+    2.4135, // constant
+    2.0366, // RH / 100
+    -2.6182, // its square
+    -0.19015, // near the sea × annual marine wind / 10
+    -0.13631, // rain
+    0.063306, // annual rain
+    0.088131, // rain × T
+    -0.31839, // RH × T
+    0.15589, // T / 20
+    -0.029424, // its square
+    0.21991, // near the sea × RH
+    -0.24748, // near the sea
+    0.047562, // near the sea × |latitude|
+    0.034212, // RH × elevation
+    0.0719, // seasonal range / 20
+    0.02946, // winter phase
+    -0.080943, // RH × winter phase
+    -0.21603, // |latitude| / 90
   };
 
   private DiurnalRangeModel() {}

@@ -17,45 +17,45 @@ package saltspoke.atmosphere;
  */
 final class HumidityModel {
   private static final double[] COEFFICIENTS = {
-    1.8541, // constant
-    0.41804, // ln saturation ratio, P.836
-    0.12469, // rain against evaporation
-    -0.3745, // vapour map's height above the place, km
-    -0.17797, // elevation, km
-    0.085438, // seasonal range / 20 × rain
-    -0.37637, // spring phase × |latitude|
-    0.62106, // annual mean of ln ratio, P.836
-    -0.17509, // frost squared
-    -0.45557, // near the sea: (marine − land temperature) / 10
-    0.097712, // last month's rain
-    0.19161, // ln ratio P.836 × annual rain
-    -0.085145, // ln ratio P.836 × rain
-    -0.69187, // frost: T / 20 below 0
-    -0.077944, // ln ratio P.836 × T
-    0.060076, // ln ratio P.836 squared
-    -0.0013565, // near the sea × spring phase
-    -0.14443, // near the sea × winter phase
-    0.20275, // ln saturation ratio, P.834
-    0.047769, // its square
-    -0.096182, // ln of 10 % over 90 % exceeded vapour density
-    0.004039, // that × anomaly / 10
-    -0.4843, // anomaly of the month / 10
-    -0.44237, // vapour spread × winter phase
-    0.054907, // annual rain
-    1.9507, // |latitude| squared
-    -1.3098, // |latitude| / 90
-    -0.14117, // rain
-    0.11435, // near the sea
-    0.0065881, // near the sea × ln ratio P.836
-    -0.23154, // seasonal range / 20
-    -0.38208, // T / 20
-    0.0085698, // rain squared
-    0.64946, // winter phase × |latitude|
-    0.10934, // rain × T
-    0.037134, // annual mean of ln ratio, P.834
-    -0.075166, // elevation × winter phase
-    -0.44108, // Australia, see AUSTRALIA
-    0.15399, // Australia × winter phase
+    1.9793, // constant
+    0.44533, // ln saturation ratio, P.836
+    0.12921, // rain against evaporation
+    -0.28196, // vapour map's height above the place, km
+    -0.1896, // elevation, km
+    0.086602, // seasonal range / 20 × rain
+    -0.38043, // spring phase × |latitude|
+    0.61764, // annual mean of ln ratio, P.836
+    -0.15317, // frost squared
+    -0.52086, // near the sea: (marine − land temperature) / 10
+    0.096967, // last month's rain
+    0.19675, // ln ratio P.836 × annual rain
+    -0.092416, // ln ratio P.836 × rain
+    -0.67645, // frost: T / 20 below 0
+    -0.073292, // ln ratio P.836 × T
+    0.083851, // ln ratio P.836 squared
+    -0.0037016, // near the sea × spring phase
+    -0.1221, // near the sea × winter phase
+    0.19014, // ln saturation ratio, P.834
+    0.043455, // its square
+    -0.11995, // ln of 10 % over 90 % exceeded vapour density
+    0.0071083, // that × anomaly / 10
+    -0.44213, // anomaly of the month / 10
+    -0.43252, // vapour spread × winter phase
+    0.060978, // annual rain
+    1.6653, // |latitude| squared
+    -1.2212, // |latitude| / 90
+    -0.16269, // rain
+    0.12334, // near the sea
+    0.01587, // near the sea × ln ratio P.836
+    -0.2355, // seasonal range / 20
+    -0.47868, // T / 20
+    0.009954, // rain squared
+    0.63229, // winter phase × |latitude|
+    0.12164, // rain × T
+    0.011946, // annual mean of ln ratio, P.834
+    -0.073784, // elevation × winter phase
+    -0.45265, // Australia, see AUSTRALIA
+    0.15598, // Australia × winter phase
   };
 
   /** Vapour density of the driest air that the fit is asked about, g/m³. */

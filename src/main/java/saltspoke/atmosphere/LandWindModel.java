@@ -8,18 +8,18 @@ package saltspoke.atmosphere;
  */
 final class LandWindModel {
   private static final double[] COEFFICIENTS = {
-    1.1625, // constant
-    0.0894, // marine wind within about 200 km
-    5.058, // |latitude| / 90
-    0.13343, // marine wind
-    0.29072, // spring phase
-    -0.68757, // vapour map's height above the place, km
-    -0.18563, // annual rain
-    -0.43536, // seasonal range / 20
-    -0.053311, // daily range / 10
-    0.09455, // T / 20
-    0.071521, // marine wind within about 15 km
-    -2.7655, // |latitude| squared
+    0.16605, // constant
+    0.068458, // marine wind within about 200 km
+    3.7647, // |latitude| / 90
+    0.31095, // marine wind
+    0.33058, // spring phase
+    -0.80976, // vapour map's height above the place, km
+    -0.21286, // annual rain
+    -0.35511, // seasonal range / 20
+    -0.032969, // daily range / 10
+    0.26566, // T / 20
+    0.076483, // marine wind within about 15 km
+    -1.5116, // |latitude| squared
   };
 
   /** Stillest monthly mean, m/s: the lowest few stations. */

@@ -1,9 +1,7 @@
 package saltspoke.atmosphere;
 
 import java.util.function.Function;
-import saltspoke.fields.Field;
 import saltspoke.fields.FieldStack;
-import saltspoke.fields.Grid;
 
 /** The layers that the climate is computed from, and their values at a point. */
 final class PlaceFields {
@@ -28,17 +26,27 @@ final class PlaceFields {
     15.5, 45, 74.5, 105, 135.5, 166, 196.5, 227.5, 258, 288.5, 319, 349.5
   };
 
-  /** Spacing of the nine points over which the surroundings' elevation is averaged, degrees. */
-  private static final double AROUND_STEP_DEG = 1 / 3.0;
+  /** Bands of the vapour-pressure harmonic. */
+  private static final int MEAN = 0;
+
+  private static final int COSINE = 3;
+  private static final int SINE = 4;
+
+  /**
+   * Spacing of the nine points over which the temperature map's ground is averaged, degrees: the
+   * model's own orography is smoother than the means over its cells.
+   */
+  private static final double AROUND_STEP_DEG = 0.75;
 
   private final FieldStack temperature;
   private final FieldStack vapourDensity;
   private final FieldStack scaleHeight;
   private final FieldStack vapourTopography;
   private final FieldStack rain;
-  private final FieldStack seasonalVapour;
+  private final FieldStack vapourHarmonic;
   private final FieldStack marineTemperature;
   private final FieldStack marineWind;
+  private final FieldStack temperatureHeight;
   private final FieldStack elevation;
 
   PlaceFields(Function<String, FieldStack> layers) {
@@ -47,19 +55,26 @@ final class PlaceFields {
     scaleHeight = layers.apply("vapour-scale-height");
     vapourTopography = layers.apply("vapour-topography");
     rain = layers.apply("rain-monthly");
-    seasonalVapour = seasons(layers.apply("vapour-pressure-harmonic"));
+    vapourHarmonic = layers.apply("vapour-pressure-harmonic");
+    temperatureHeight = layers.apply("temperature-height");
     marineTemperature = layers.apply("marine-air-temperature");
     marineWind = layers.apply("marine-wind-speed");
     elevation = layers.apply("elevation");
   }
 
-  /** Values at a point; monthly arrays from January. */
+  /**
+   * Values at a point; monthly arrays from January.
+   *
+   * @param temperatureGroundM height of the ground that the temperature map stands on
+   * @param mapElevationM elevation of the 10′ map
+   */
   record At(
       double[] temperatureC,
       double[] vapourDensityGPerM3,
       double scaleHeightKm,
       double vapourTopographyM,
-      double surroundingsM,
+      double temperatureGroundM,
+      double mapElevationM,
       double[] rainMm,
       double[] seasonalVapourHpa,
       double[] marineTemperatureC,
@@ -70,33 +85,43 @@ final class PlaceFields {
     for (int i = -1; i <= 1; i++) {
       for (int j = -1; j <= 1; j++) {
         around +=
-            Math.max(
+            temperatureHeight.sample(
                     0,
-                    elevation.sample(
-                        0, latitudeDeg + i * AROUND_STEP_DEG, longitudeDeg + j * AROUND_STEP_DEG))
+                    latitudeDeg + i * AROUND_STEP_DEG,
+                    longitudeDeg + j * AROUND_STEP_DEG)
                 / 9;
       }
     }
-    int medianBand = scaleHeight.size() == 1 ? 0 : EXCEEDED_50;
     return new At(
         sample(temperature, latitudeDeg, longitudeDeg),
         sample(vapourDensity, latitudeDeg, longitudeDeg),
-        scaleHeight.sample(medianBand, latitudeDeg, longitudeDeg),
+        scaleHeight.sample(EXCEEDED_50, latitudeDeg, longitudeDeg),
         vapourTopography.sample(0, latitudeDeg, longitudeDeg),
         around,
+        elevation.sample(0, latitudeDeg, longitudeDeg),
         sample(rain, latitudeDeg, longitudeDeg),
-        sample(seasonalVapour, latitudeDeg, longitudeDeg),
+        seasonalVapour(latitudeDeg, longitudeDeg),
         sample(marineTemperature, latitudeDeg, longitudeDeg),
         sample(marineWind, latitudeDeg, longitudeDeg));
   }
 
-  /**
-   * Phase of the season in a month: cosine (first index 0) and sine, largest in the northern
-   * January.
-   */
+  /** Phase of the season in a month: cosine (first index 0) and sine, largest in the northern January. */
   static double[] season(int month) {
     double phase = 2 * Math.PI * (MID_MONTH_DAY[month] - MID_MONTH_DAY[0]) / 365.25;
     return new double[] {Math.cos(phase), Math.sin(phase)};
+  }
+
+  /** Months of the year's harmonic of vapour pressure (ITU-R P.834), hPa. */
+  private double[] seasonalVapour(double latitudeDeg, double longitudeDeg) {
+    double mean = vapourHarmonic.sample(MEAN, latitudeDeg, longitudeDeg);
+    double cosine = vapourHarmonic.sample(COSINE, latitudeDeg, longitudeDeg);
+    double sine = vapourHarmonic.sample(SINE, latitudeDeg, longitudeDeg);
+    double[] months = new double[MONTHS];
+    for (int m = 0; m < MONTHS; m++) {
+      double phase = 2 * Math.PI * MID_MONTH_DAY[m] / 365.25;
+      months[m] = mean + cosine * Math.cos(phase) + sine * Math.sin(phase);
+    }
+    return months;
   }
 
   private static double[] sample(FieldStack stack, double latitudeDeg, double longitudeDeg) {
@@ -105,30 +130,5 @@ final class PlaceFields {
       values[i] = stack.sample(i, latitudeDeg, longitudeDeg);
     }
     return values;
-  }
-
-  /**
-   * Months from mean a1, amplitude a2 and day of minimum a3 of the year's harmonic (ITU-R P.834): e
-   * = a1 − a2·cos(2π(d − a3)/365.25). Taken at the grid's points, since a day of the year cannot be
-   * interpolated.
-   */
-  private static FieldStack seasons(FieldStack harmonic) {
-    Grid grid = harmonic.band(0).grid();
-    Field[] months = new Field[MONTHS];
-    for (int m = 0; m < MONTHS; m++) {
-      float[] values = new float[grid.rows() * grid.columns()];
-      for (int row = 0, i = 0; row < grid.rows(); row++) {
-        for (int column = 0; column < grid.columns(); column++, i++) {
-          double phase =
-              2 * Math.PI * (MID_MONTH_DAY[m] - harmonic.band(2).at(row, column)) / 365.25;
-          values[i] =
-              (float)
-                  (harmonic.band(0).at(row, column)
-                      - harmonic.band(1).at(row, column) * Math.cos(phase));
-        }
-      }
-      months[m] = new Field(grid, harmonic.band(0).unit(), values);
-    }
-    return new FieldStack(harmonic.layer(), java.util.List.of(months));
   }
 }

@@ -6,9 +6,9 @@ package saltspoke.atmosphere;
  * @param latitudeDeg −90..90
  * @param longitudeDeg −180..180
  * @param seaDistanceKm at least 0
- * @param elevationKmUnheld elevation
+ * @param elevationKmUnheld height that the climate goes by, see {@link #of}
  * @param mapAboveKmUnheld height of the vapour map's topography above the place
- * @param aroundAboveKmUnheld mean height of the surroundings above the place
+ * @param aroundAboveKmUnheld height of the temperature map's ground above the place
  */
 record Site(
     double latitudeDeg,
@@ -23,6 +23,15 @@ record Site(
   /** Largest difference between map and place in the fit, km. */
   private static final double MOST_ABOVE_KM = 2;
 
+  /** The lapse is carried on to twice that, then held. */
+  private static final double MOST_AROUND_KM = 4;
+
+  /** Departure from the 10′ map up to which it counts less, m; chosen on the stations of the fit. */
+  private static final double SMALL_DEPARTURE_M = 400;
+
+  /** Share of it that counts; chosen likewise among 0.3, 0.4, 0.5 and 1. */
+  private static final double SMALL_DEPARTURE_SHARE = 0.4;
+
   /** ASSUMPTION: distance over which the sea's influence on land air falls to 1/e, km. */
   private static final double COAST_KM = 50;
 
@@ -32,13 +41,25 @@ record Site(
       double elevationM,
       double seaDistanceKm,
       PlaceFields.At at) {
+    double heightM = heightForClimateM(elevationM, at.mapElevationM());
     return new Site(
         latitudeDeg,
         longitudeDeg,
         seaDistanceKm,
-        elevationM / 1000,
-        (at.vapourTopographyM() - elevationM) / 1000,
-        (at.surroundingsM() - elevationM) / 1000);
+        heightM / 1000,
+        (at.vapourTopographyM() - heightM) / 1000,
+        (at.temperatureGroundM() - heightM) / 1000);
+  }
+
+  /**
+   * The height that temperature and humidity go by: small departures of a place from the 10′ map
+   * count less than in full, larger ones in full beyond that. A hill or a hollow of a few hundred
+   * metres shares the air of its surroundings; a mountain does not.
+   */
+  private static double heightForClimateM(double elevationM, double mapElevationM) {
+    double departure = elevationM - mapElevationM;
+    double small = hold(departure, -SMALL_DEPARTURE_M, SMALL_DEPARTURE_M);
+    return mapElevationM + SMALL_DEPARTURE_SHARE * small + (departure - small);
   }
 
   /** Elevation held to the range of the fit, 0..4.5 km. */
@@ -51,16 +72,16 @@ record Site(
     return hold(mapAboveKmUnheld, -MOST_ABOVE_KM, MOST_ABOVE_KM);
   }
 
-  /** Mean height of the surroundings above the place, held to ±2 km. */
+  /** Height of the temperature map's ground above the place, held to ±4 km. */
   double aroundAboveKm() {
-    return hold(aroundAboveKmUnheld, -MOST_ABOVE_KM, MOST_ABOVE_KM);
+    return hold(aroundAboveKmUnheld, -MOST_AROUND_KM, MOST_AROUND_KM);
   }
 
   /** Whether the place lies outside the heights on which the relations were fitted. */
   boolean outsideFittedHeights() {
     return elevationKm() != elevationKmUnheld
-        || mapAboveKm() != mapAboveKmUnheld
-        || aroundAboveKm() != aroundAboveKmUnheld;
+        || Math.abs(mapAboveKmUnheld) > MOST_ABOVE_KM
+        || Math.abs(aroundAboveKmUnheld) > MOST_ABOVE_KM;
   }
 
   /** |latitude| over 90°. */

@@ -10,19 +10,18 @@ package saltspoke.atmosphere;
  */
 final class TemperatureModel {
   private static final double[] COEFFICIENTS = {
-    1.6953, // constant
-    -0.31912, // vapour map's height above the place, km
-    2.5785, // surroundings above the place, km
-    -0.090155, // map temperature / 20
-    -0.62867, // its square
-    -3.5552, // |latitude| / 90
-    -0.5388, // winter phase
-    -0.42483, // elevation, km
-    -0.32988, // spring phase × |latitude|
-    0.47405, // near the sea: (marine − map temperature) / 10
-    0.20852, // near the sea × spring phase
-    -0.095458, // near the sea × winter phase
-    0.56062, // surroundings above the place × map temperature / 20
+    1.5097, // constant
+    3.0876, // map's ground above the place, km
+    -0.062769, // map temperature / 20
+    -0.61627, // its square
+    -3.5626, // |latitude| / 90
+    -0.51025, // winter phase
+    -0.025294, // elevation, km
+    -0.33317, // spring phase × |latitude|
+    0.61156, // near the sea: (marine − map temperature) / 10
+    0.21951, // near the sea × spring phase
+    -0.13627, // near the sea × winter phase
+    1.0781, // surroundings above the place × map temperature / 20
   };
 
   private TemperatureModel() {}
@@ -44,7 +43,6 @@ final class TemperatureModel {
     double marine = Site.hold(at.marineTemperatureC()[m] - grid, -10, 10);
     double[] terms = {
       1,
-      s.mapAboveKm(),
       s.aroundAboveKm(),
       t / 20,
       t * t / 400,
@@ -55,7 +53,7 @@ final class TemperatureModel {
       s.nearSea() * marine / 10,
       s.nearSea() * spring,
       s.nearSea() * winter,
-      s.aroundAboveKm() * grid / 20
+      s.aroundAboveKm() * t / 20
     };
     return Site.dot(COEFFICIENTS, terms);
   }

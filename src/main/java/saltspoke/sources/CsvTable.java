@@ -69,6 +69,11 @@ public final class CsvTable {
       return fileName + ":" + line;
     }
 
+    /** Whether the file has a column of that name. */
+    public boolean has(String column) {
+      return cells.isMapped(column);
+    }
+
     /** The text of a cell; refused when the column is missing. May be empty. */
     public String text(String column) {
       if (!cells.isMapped(column)) {

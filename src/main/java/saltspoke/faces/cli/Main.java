@@ -19,6 +19,7 @@ import saltspoke.values.Refusal;
       AirCommand.class,
       PlacesCommand.class,
       PairingsCommand.class,
+      CompareCommand.class,
       ServeCommand.class,
       IngestCommand.class,
       AboutCommand.class,
