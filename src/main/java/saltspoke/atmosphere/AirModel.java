@@ -90,16 +90,17 @@ public final class AirModel {
       List<MonthClimate> months,
       AirOverrides overrides,
       Set<Note> flags) {
+    double rainMmPerYear = months.stream().mapToDouble(MonthClimate::rainMm).sum();
     SeaSalt model =
         new SeaSalt(
             place.sea(),
             SaltPaths.crestsAbovePlaceM(place, elevation),
             SaltPaths.roughness(setting, place.sea().distanceKm()),
-            place.elevationM());
-    double rainMmPerYear = months.stream().mapToDouble(MonthClimate::rainMm).sum();
+            place.elevationM(),
+            rainMmPerYear);
     List<Double> monthly = new ArrayList<>();
     for (MonthClimate month : months) {
-      monthly.add(model.monthMgPerM2Day(winds.at(place, month), rainMmPerYear));
+      monthly.add(model.monthMgPerM2Day(winds.at(place, month)));
     }
     Quantiles annual = SeaSalt.annual(monthly);
     double scale = 1;

@@ -46,10 +46,13 @@ final class SaltKernel {
   /** FITTED coarsely: the marine background at the coast, mg/(m² d). */
   private static final double BACKGROUND_MG = 5;
 
-  /** ASSUMPTION: its length of decay at 1000 mm rain a year, km; spread 500–1000. */
-  private static final double BACKGROUND_KM = 700;
+  /** ASSUMPTION: its length of decay at 1000 mm rain a year, km; spread 450–900. */
+  private static final double BACKGROUND_KM = 600;
 
-  /** ASSUMPTION: half of wash-out is rain's at 1000 mm a year, half settles dry. */
+  /**
+   * ASSUMPTION: half of wash-out is rain's at 1000 mm a year, half settles dry. Drier air keeps the
+   * lengths of 1000 mm: it mixes salt over a deeper layer, which thins what missing rain spares.
+   */
   private static final double RAIN_SHARE = 0.5;
 
   /** ASSUMPTION: rain a year for which the lengths above hold, mm. */
@@ -108,6 +111,7 @@ final class SaltKernel {
   }
 
   private static double washout(double rainMmPerYear) {
-    return 1 - RAIN_SHARE + RAIN_SHARE * rainMmPerYear / REFERENCE_RAIN_MM_PER_YEAR;
+    return 1
+        + RAIN_SHARE * Math.max(0, rainMmPerYear / REFERENCE_RAIN_MM_PER_YEAR - 1);
   }
 }

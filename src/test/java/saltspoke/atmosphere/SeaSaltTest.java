@@ -35,7 +35,7 @@ class SeaSaltTest {
   }
 
   private static double at(SeaView sea, WindMonth wind) {
-    return new SeaSalt(sea, FLAT, 0.2, 10).monthMgPerM2Day(wind, 1000);
+    return new SeaSalt(sea, FLAT, 0.2, 10, 1000).monthMgPerM2Day(wind);
   }
 
   @Test
@@ -77,8 +77,8 @@ class SeaSaltTest {
     double[] crest = new double[36];
     Arrays.fill(crest, 2500);
     SeaView inland = coast(80, 500, 1);
-    double behind = new SeaSalt(inland, crest, 0.2, 500).monthMgPerM2Day(ALL_SIDES, 800);
-    double open = new SeaSalt(inland, FLAT, 0.2, 500).monthMgPerM2Day(ALL_SIDES, 800);
+    double behind = new SeaSalt(inland, crest, 0.2, 500, 800).monthMgPerM2Day(ALL_SIDES);
+    double open = new SeaSalt(inland, FLAT, 0.2, 500, 800).monthMgPerM2Day(ALL_SIDES);
     assertTrue(behind < 0.1 * open);
     double[] none = new double[36];
     Arrays.fill(none, Double.POSITIVE_INFINITY);
@@ -88,9 +88,12 @@ class SeaSaltTest {
 
   @Test
   void rainWashesSaltOutInland() {
-    SeaSalt inland = new SeaSalt(coast(150, 500, 1), FLAT, 0.2, 50);
-    assertTrue(
-        inland.monthMgPerM2Day(ALL_SIDES, 2500) < 0.8 * inland.monthMgPerM2Day(ALL_SIDES, 300));
+    SeaView inland = coast(150, 500, 1);
+    double wet = new SeaSalt(inland, FLAT, 0.2, 50, 2500).monthMgPerM2Day(ALL_SIDES);
+    double usual = new SeaSalt(inland, FLAT, 0.2, 50, 1000).monthMgPerM2Day(ALL_SIDES);
+    double dry = new SeaSalt(inland, FLAT, 0.2, 50, 100).monthMgPerM2Day(ALL_SIDES);
+    assertTrue(wet < 0.85 * usual, wet + " of " + usual);
+    assertEquals(usual, dry, 1e-12, "drier air mixes salt deeper");
   }
 
   @Test
