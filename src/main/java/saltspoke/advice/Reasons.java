@@ -109,7 +109,8 @@ final class Reasons {
         switch (limiting.cause()) {
           case "thread" ->
               limiting.part().equals("spoke") ? "advice-cause-spoke" : "advice-cause-thread";
-          case "galling" -> "advice-cause-galling";
+          case "wear" ->
+              worked.parts().nipple().gallsOnSpoke() ? "advice-cause-galling" : "advice-cause-wear";
           case "open-air" -> "advice-cause-open-air";
           default ->
               switch (limiting.part()) {

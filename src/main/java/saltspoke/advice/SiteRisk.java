@@ -65,6 +65,13 @@ final class SiteRisk {
     return Double.isFinite(limit(state));
   }
 
+  /**
+   * Whether it seizes after showing, from the first month on and not only after a shield is gone.
+   */
+  boolean warns() {
+    return has(State.SEIZED) && has(State.ATTACKED) && site.dose().um(1) > 0;
+  }
+
   /** Place in time at which the median nipple of the median wheel gets there. */
   double medianPlace(State state) {
     return seasons.placeOf(Math.log(limit(state)) / scatter);
@@ -83,7 +90,10 @@ final class SiteRisk {
     double gap = z[Assumption.SEIZING_GAP.ordinal()] * Assumption.SEIZING_GAP.lnSpread();
     double visible = z[Assumption.VISIBLE_DEPTH.ordinal()] * Assumption.VISIBLE_DEPTH.lnSpread();
     return switch (state) {
-      case ATTACKED -> site.cause().equals("thread") ? gap + visible / 2 : visible;
+      case ATTACKED ->
+          site.cause().equals("thread") || site.cause().equals("wear")
+              ? gap + visible / 2
+              : visible;
       case SEIZED -> gap;
       case LOST -> z[Assumption.HEAD_MARGIN.ordinal()] * Assumption.HEAD_MARGIN.lnSpread();
     };

@@ -6,15 +6,16 @@ import saltspoke.values.Quantiles;
 
 /**
  * The distribution of a metal's first-year loss: the inputs' spreads carried through the
- * dose–response function, Pd and Sd (log-normal) by Gauss–Hermite quadrature with five nodes each, T
- * and RH (normal) by half the change of ln r over two deviations at each node; every node is widened
- * by the standard's own log-normal spread. No random numbers: the same inputs give the same bits.
+ * dose–response function, Pd and Sd (log-normal) by Gauss–Hermite quadrature with five nodes each,
+ * T and RH (normal) by half the change of ln r over two deviations at each node; every node is
+ * widened by the standard's own log-normal spread. No random numbers: the same inputs give the same
+ * bits.
  */
 final class LossDistribution {
   /**
    * ISO 9223:2012 annex A: errors are log-normal and stated as one standard deviation s of ln r,
-   * the interval being e^−s … e^s (published; s = 0.7 stands for −50…+100 % there). The sizes −33…+50
-   * % for steel, zinc and copper and −50…+100 % for aluminium are from memory.
+   * the interval being e^−s … e^s (published; s = 0.7 stands for −50…+100 % there). The sizes
+   * −33…+50 % for steel, zinc and copper and −50…+100 % for aluminium are from memory.
    */
   static double ownLnSpread(Metal metal) {
     return metal == Metal.ALUMINIUM ? 0.693 : 0.405;

@@ -111,7 +111,6 @@ final class SaltKernel {
   }
 
   private static double washout(double rainMmPerYear) {
-    return 1
-        + RAIN_SHARE * Math.max(0, rainMmPerYear / REFERENCE_RAIN_MM_PER_YEAR - 1);
+    return 1 + RAIN_SHARE * Math.max(0, rainMmPerYear / REFERENCE_RAIN_MM_PER_YEAR - 1);
   }
 }

@@ -92,14 +92,12 @@ public final class Sites {
   /** All sites of a pairing. */
   public List<Site> of(Parts parts) {
     List<Site> sites = new ArrayList<>();
-    boolean nippleThread = false;
     for (Couple couple : SpokeHole.couples(parts)) {
       sites.add(made.computeIfAbsent(key(parts, couple), k -> site(parts, couple)));
-      nippleThread |= wornThread(couple);
     }
     Nipple nipple = parts.nipple();
-    if (!nippleThread && Fretting.relative(nipple.material()) > 0) {
-      sites.add(made.computeIfAbsent(List.of("galling", nipple.id()), k -> dryThread(nipple)));
+    if (Fretting.relative(nipple.material()) > 0) {
+      sites.add(made.computeIfAbsent(List.of("wear", nipple.id()), k -> wornThread(nipple)));
     }
     if (showsInOpenAir(nipple)) {
       sites.add(made.computeIfAbsent(List.of("open-air", nipple.id()), k -> openAir(nipple)));
@@ -120,7 +118,6 @@ public final class Sites {
     FilmLoss bare = loss(couple.spec());
     double share = couple.bareShare().median();
     double[] monthly = bare.scaled(factor * share);
-    double worn = wornThread(couple) ? addWear(monthly, couple.metal()) : 0;
     DoseCurve dose = new SeasonalDose(monthly, buildMonth, winter, maturity);
     Coating coating = coatingOf(parts, couple);
     double through = CoatingLife.months(coating, wetShare);
@@ -136,7 +133,7 @@ public final class Sites {
     double delay = couple.delayMonths(wetShare);
     DoseCurve unshielded = dose;
     dose = dose.after(delay);
-    double[] ln = shifts(couple, bare, thread, worn);
+    double[] ln = shifts(couple, bare, thread);
     set(ln, Assumption.COATING_LIFE, coatingShift(dose, unshielded, through, delay));
     return new Site(
         couple.part(),
@@ -152,41 +149,29 @@ public final class Sites {
         ln);
   }
 
-  private static boolean wornThread(Couple couple) {
-    return couple.where() == Couple.Where.THREAD && couple.part().equals("nipple");
-  }
-
-  /** Adds a thread's wear to its corrosion; gives the share of the sum that is wear. */
-  private double addWear(double[] monthlyUm, Material metal) {
-    double access = access(profile.threadCompound());
-    double[] wear = Fretting.monthlyUm(metal, profile);
-    double worn = 0;
-    double all = 0;
-    for (int m = 0; m < 12; m++) {
-      monthlyUm[m] += access * wear[m];
-      worn += access * wear[m];
-      all += monthlyUm[m];
-    }
-    return all > 0 ? worn / all : 0;
-  }
-
-  /** A thread that does not corrode still wears and galls. */
-  private Site dryThread(Nipple nipple) {
+  /**
+   * A thread wears whether or not it corrodes. The two are kept apart and the faster counts, so
+   * that each keeps its own spread; where they are equal that is late by at most a factor 2.
+   */
+  private Site wornThread(Nipple nipple) {
     Material metal = nipple.material();
-    double[] monthly = new double[12];
-    addWear(monthly, metal);
+    double[] monthly = Fretting.monthlyUm(metal, profile);
+    double access = access(profile.threadCompound());
+    for (int m = 0; m < monthly.length; m++) {
+      monthly[m] *= access;
+    }
     double[] ln = new double[Assumption.values().length];
     set(ln, Assumption.FRETTING, Assumption.FRETTING.lnSpread());
     set(ln, Assumption.THREAD_ACCESS, Assumption.THREAD_ACCESS.lnSpread());
     double seized = Fretting.toFillUm(metal);
     return new Site(
         "nipple",
-        "galling",
+        "wear",
         metal,
         new SeasonalDose(
             monthly, buildMonth, new double[12], threadMaturity(profile.threadCompound())),
         monthly,
-        Double.POSITIVE_INFINITY,
+        Nobility.corrodes(metal) ? seized * Products.STIFF_SHARE : Double.POSITIVE_INFINITY,
         seized,
         Double.POSITIVE_INFINITY,
         ln);
@@ -310,7 +295,7 @@ public final class Sites {
     return Double.POSITIVE_INFINITY;
   }
 
-  private static double[] shifts(Couple couple, FilmLoss loss, boolean thread, double worn) {
+  private static double[] shifts(Couple couple, FilmLoss loss, boolean thread) {
     double[] ln = new double[Assumption.values().length];
     double driven = loss.galvanicShare() + loss.localShare();
     double self = 1 - driven;
@@ -326,10 +311,6 @@ public final class Sites {
     set(ln, Assumption.WET_HOURS, Assumption.WET_HOURS.lnSpread());
     set(ln, Assumption.SALT_STORE, Assumption.SALT_ELASTICITY * Assumption.SALT_STORE.lnSpread());
     set(ln, Assumption.CALIBRATION, Assumption.CALIBRATION.lnSpread());
-    for (int k = 0; k < ln.length; k++) {
-      ln[k] *= 1 - worn;
-    }
-    set(ln, Assumption.FRETTING, worn * Assumption.FRETTING.lnSpread());
     set(ln, Assumption.THREAD_ACCESS, thread ? Assumption.THREAD_ACCESS.lnSpread() : 0);
     return ln;
   }
