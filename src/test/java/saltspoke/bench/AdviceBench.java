@@ -1,5 +1,6 @@
 package saltspoke.bench;
 
+import java.util.List;
 import java.util.concurrent.TimeUnit;
 import org.openjdk.jmh.annotations.Benchmark;
 import org.openjdk.jmh.annotations.BenchmarkMode;
@@ -14,6 +15,7 @@ import saltspoke.advice.Advice;
 import saltspoke.advice.AdviceRequest;
 import saltspoke.advice.Advisor;
 import saltspoke.advice.Finding;
+import saltspoke.advice.PairingAdvice;
 import saltspoke.advice.RiskLevel;
 import saltspoke.advice.TestClimates;
 import saltspoke.atmosphere.AirClimate;
@@ -57,5 +59,15 @@ public class AdviceBench {
   @Benchmark
   public Advice onePairing() {
     return advisor.advise(air, one);
+  }
+
+  @Benchmark
+  public List<PairingAdvice> wholeCatalogueWithoutChanges() {
+    return advisor.pairings(air, all);
+  }
+
+  @Benchmark
+  public List<PairingAdvice> onePairingWithoutChanges() {
+    return advisor.pairings(air, one);
   }
 }
