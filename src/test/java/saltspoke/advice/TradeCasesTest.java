@@ -13,7 +13,8 @@ import saltspoke.wheel.RidingProfile;
 
 /**
  * The cases of common practice that bound what the model may say, practice limits off, in invented
- * climates. The first two are those on which the calibration constant is fitted.
+ * climates. The calibration constant is set on the first two; assumptions were chosen with all four
+ * in view, so that this holds the model to them and does not prove it.
  */
 @Tag("law")
 class TradeCasesTest {

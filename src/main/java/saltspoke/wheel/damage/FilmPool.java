@@ -11,7 +11,7 @@ import saltspoke.wheel.WheelYear;
  * The films of a year gathered into kinds that a cell can hardly tell apart, so that every cell is
  * asked once per kind and not once per month and film. A kind spans a factor 2 in thickness and in
  * chloride and 8 K; it is represented by its mean, logarithms for all but temperature, weighted by
- * hours. Against asking for every film, a year's loss differs by under 3 % (tested).
+ * hours. Against asking for every film, a year's loss differs by under 5 % (tested).
  */
 public final class FilmPool {
   private static final double KELVIN = 8;
