@@ -38,6 +38,24 @@ public final class Answers {
     this.advisor = once(() -> new Advisor(catalogue));
   }
 
+  /** Begins to make the air model and the advisor in the background, while the place is sought. */
+  public Answers prepare() {
+    for (Supplier<?> part : List.of(airModel, advisor)) {
+      Thread thread = new Thread(() -> tryToMake(part), "prepare");
+      thread.setDaemon(true);
+      thread.start();
+    }
+    return this;
+  }
+
+  private static void tryToMake(Supplier<?> part) {
+    try {
+      part.get();
+    } catch (RuntimeException e) {
+      // The question that needs this part makes it again and meets the same refusal.
+    }
+  }
+
   public DataSet dataSet() {
     return dataSet;
   }

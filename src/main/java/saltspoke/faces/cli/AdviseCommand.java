@@ -47,7 +47,7 @@ final class AdviseCommand implements Callable<Integer> {
     PlaceOptions.put(values, "lang", common.language);
     Parameters parameters = new Parameters(values, Questions.ADVICE);
     Texts texts = Answers.textsFor(parameters);
-    Answers answers = Opening.answers(common.data);
+    Answers answers = Opening.answers(common.data).prepare();
     Advice advice =
         wheel.profileFile == null
             ? answers.advise(parameters)

@@ -37,7 +37,7 @@ final class AirCommand implements Callable<Integer> {
     Parameters parameters = new Parameters(values, Questions.AIR);
     Texts texts = Answers.textsFor(parameters);
     PlaceQuestion question = PlaceQuestion.from(parameters);
-    AirClimate air = Opening.answers(common.data).air(question);
+    AirClimate air = Opening.answers(common.data).prepare().air(question);
     spec.commandLine()
         .getOut()
         .println(common.json ? Json.pretty(AirJson.of(air, texts)) : AirText.of(air, texts));

@@ -30,7 +30,7 @@ final class ServeCommand implements Callable<Integer> {
     if (port < 0 || port > 65535) {
       throw Refusal.outOfRange("port", port, "0..65535");
     }
-    Answers answers = Opening.answers(common.data);
+    Answers answers = Opening.answers(common.data).prepare();
     PrintWriter out = spec.commandLine().getOut();
     try (WebServer server = Api.server(port, answers)) {
       Runtime.getRuntime().addShutdownHook(new Thread(() -> stop(server), "stop"));
