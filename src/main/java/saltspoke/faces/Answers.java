@@ -6,6 +6,8 @@ import java.util.function.Supplier;
 import saltspoke.advice.Advice;
 import saltspoke.advice.AdviceRequest;
 import saltspoke.advice.Advisor;
+import saltspoke.advice.Sensitivity;
+import saltspoke.advice.Tornado;
 import saltspoke.atmosphere.AirClimate;
 import saltspoke.atmosphere.AirModel;
 import saltspoke.atmosphere.AirOverrides;
@@ -106,17 +108,7 @@ public final class Answers {
 
   /** Reads both parts of a wheel question and answers it; the profile is named in it. */
   public Advice advise(Parameters parameters) {
-    String name =
-        parameters
-            .text("profile")
-            .orElseThrow(
-                () ->
-                    Refusal.wrongUse(
-                        "no-profile",
-                        "profile",
-                        "",
-                        "the name of a ready profile or one of your own"));
-    return advise(parameters, profiles.get(name));
+    return advise(parameters, profiles.get(profileName(parameters)));
   }
 
   /** The same for a profile of one's own. */
@@ -124,6 +116,22 @@ public final class Answers {
     PlaceQuestion question = PlaceQuestion.from(parameters);
     AdviceRequest request = Questions.wheel(parameters, profile);
     return advisor.get().advise(air(question), request);
+  }
+
+  /** How far the interval of the one pairing in question moves with each assumption. */
+  public Tornado sensitivity(Parameters parameters) {
+    AirClimate air = air(PlaceQuestion.from(parameters));
+    return new Sensitivity(catalogue)
+        .of(air, Questions.wheel(parameters, profiles.get(profileName(parameters))));
+  }
+
+  private static String profileName(Parameters parameters) {
+    return parameters
+        .text("profile")
+        .orElseThrow(
+            () ->
+                Refusal.wrongUse(
+                    "no-profile", "profile", "", "the name of a ready profile or one of your own"));
   }
 
   /** Language of a question, English when none is named. */

@@ -20,6 +20,7 @@ import saltspoke.values.Refusal;
       PlacesCommand.class,
       PairingsCommand.class,
       CompareCommand.class,
+      SensitivityCommand.class,
       ServeCommand.class,
       IngestCommand.class,
       AboutCommand.class,
