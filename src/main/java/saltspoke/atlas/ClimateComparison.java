@@ -30,8 +30,7 @@ public final class ClimateComparison {
 
   /** Compares a file with the columns of {@link ClimateStation}; closes the stream. */
   public Comparison run(InputStream in, String fileName) {
-    StationRows<ClimateStation> stations =
-        StationRows.read(in, fileName, StationFiles::climate);
+    StationRows<ClimateStation> stations = StationRows.read(in, fileName, StationFiles::climate);
     Tally tally = new Tally();
     for (ClimateStation station : stations.rows()) {
       tally.add(
@@ -59,8 +58,7 @@ public final class ClimateComparison {
 
     void add(ClimateStation s, List<MonthClimate> months) {
       monthly(monthlyTemperature, s.where(), s.temperatureC(), months, MonthClimate::temperatureC);
-      annualTemperature.add(
-          mean(s.where(), s.temperatureC(), months, MonthClimate::temperatureC));
+      annualTemperature.add(mean(s.where(), s.temperatureC(), months, MonthClimate::temperatureC));
       monthly(
           monthlyHumidity,
           s.where(),
@@ -71,14 +69,12 @@ public final class ClimateComparison {
           mean(s.where(), s.relativeHumidityPct(), months, MonthClimate::relativeHumidityPct);
       annualHumidity.add(humidity);
       humidityByContinent
-          .computeIfAbsent(
-              Continent.at(s.latitudeDeg(), s.longitudeDeg()), k -> new ArrayList<>())
+          .computeIfAbsent(Continent.at(s.latitudeDeg(), s.longitudeDeg()), k -> new ArrayList<>())
           .add(humidity);
       sums(frostDays, s, s.frostDays(), months, MonthClimate::frostDays);
       sums(rain, s, s.rainMm(), months, MonthClimate::rainMm);
       s.diurnalRangeC()
-          .ifPresent(
-              v -> monthly(diurnalRange, s.where(), v, months, MonthClimate::diurnalRangeC));
+          .ifPresent(v -> monthly(diurnalRange, s.where(), v, months, MonthClimate::diurnalRangeC));
       s.windMPerS().ifPresent(v -> monthly(wind, s.where(), v, months, MonthClimate::windMPerS));
     }
 

@@ -1,8 +1,8 @@
 package saltspoke.atlas;
 
 /**
- * Coarse continents for judging bias: boxes of latitude and longitude, tried in this order. They cut
- * corners (the Urals are 60° E, the Caucasus is Europe, Central America north of 13° N is North
+ * Coarse continents for judging bias: boxes of latitude and longitude, tried in this order. They
+ * cut corners (the Urals are 60° E, the Caucasus is Europe, Central America north of 13° N is North
  * America).
  */
 enum Continent {
@@ -36,7 +36,9 @@ enum Continent {
     if (latitudeDeg >= 36 && longitudeDeg < 60) {
       return EUROPE;
     }
-    if (latitudeDeg < 36 && longitudeDeg < 52 && !(latitudeDeg > 12 && longitudeDeg > 43)
+    if (latitudeDeg < 36
+        && longitudeDeg < 52
+        && !(latitudeDeg > 12 && longitudeDeg > 43)
         && !(latitudeDeg > 30 && longitudeDeg > 34)) {
       return AFRICA;
     }

@@ -86,9 +86,7 @@ final class PlaceFields {
       for (int j = -1; j <= 1; j++) {
         around +=
             temperatureHeight.sample(
-                    0,
-                    latitudeDeg + i * AROUND_STEP_DEG,
-                    longitudeDeg + j * AROUND_STEP_DEG)
+                    0, latitudeDeg + i * AROUND_STEP_DEG, longitudeDeg + j * AROUND_STEP_DEG)
                 / 9;
       }
     }
@@ -105,7 +103,10 @@ final class PlaceFields {
         sample(marineWind, latitudeDeg, longitudeDeg));
   }
 
-  /** Phase of the season in a month: cosine (first index 0) and sine, largest in the northern January. */
+  /**
+   * Phase of the season in a month: cosine (first index 0) and sine, largest in the northern
+   * January.
+   */
   static double[] season(int month) {
     double phase = 2 * Math.PI * (MID_MONTH_DAY[month] - MID_MONTH_DAY[0]) / 365.25;
     return new double[] {Math.cos(phase), Math.sin(phase)};

@@ -26,7 +26,9 @@ record Site(
   /** The lapse is carried on to twice that, then held. */
   private static final double MOST_AROUND_KM = 4;
 
-  /** Departure from the 10′ map up to which it counts less, m; chosen on the stations of the fit. */
+  /**
+   * Departure from the 10′ map up to which it counts less, m; chosen on the stations of the fit.
+   */
   private static final double SMALL_DEPARTURE_M = 400;
 
   /** Share of it that counts; chosen likewise among 0.3, 0.4, 0.5 and 1. */

@@ -78,8 +78,9 @@ public final class StationFiles {
   }
 
   /**
-   * A chloride site: {@code programme, station_id, distance_to_coast_km, elevation_m, wind_speed_m_s,
-   * saline_wind_fraction, roughness, chloride_mg_m2_day}. An empty elevation counts as 0 m.
+   * A chloride site: {@code programme, station_id, distance_to_coast_km, elevation_m,
+   * wind_speed_m_s, saline_wind_fraction, roughness, chloride_mg_m2_day}. An empty elevation counts
+   * as 0 m.
    */
   public record ChlorideSite(
       String where,

@@ -40,7 +40,8 @@ class JudgementTest {
   @Test
   void correlationIsOneForALineAndRatiosNeedATrueZero() {
     Judgement j =
-        Judgement.of("x", false, List.of(Pair.of("a", 1, 3), Pair.of("b", 2, 5), Pair.of("c", 4, 9)));
+        Judgement.of(
+            "x", false, List.of(Pair.of("a", 1, 3), Pair.of("b", 2, 5), Pair.of("c", 4, 9)));
     assertEquals(1, j.correlation(), 1e-12);
     assertNull(j.lnRmse());
     assertNull(j.bandCoveragePct());
@@ -69,8 +70,7 @@ class JudgementTest {
   @Test
   void aFileWithoutAUsableRowIsRefusedAsAWhole() {
     Refusal refusal =
-        assertThrows(
-            Refusal.class, () -> SiteComparison.chloride(csv("a,b\n1,2\n"), "wrong.csv"));
+        assertThrows(Refusal.class, () -> SiteComparison.chloride(csv("a,b\n1,2\n"), "wrong.csv"));
     assertEquals("missing-column", refusal.error());
     assertThrows(Refusal.class, () -> SiteComparison.chloride(csv("a,b\n"), "empty.csv"));
   }

@@ -23,11 +23,8 @@ class DayTypesTest {
     List<DayType> days = DayTypes.of(temperatureC, humidityPct, rangeC, spreadC);
     assertEquals(1, days.stream().mapToDouble(DayType::share).sum(), 1e-12);
     assertEquals(
-        temperatureC,
-        days.stream().mapToDouble(d -> d.share() * d.meanTemperatureC()).sum(),
-        1e-5);
-    assertEquals(
-        rangeC, days.stream().mapToDouble(d -> d.share() * d.diurnalRangeC()).sum(), 1e-9);
+        temperatureC, days.stream().mapToDouble(d -> d.share() * d.meanTemperatureC()).sum(), 1e-5);
+    assertEquals(rangeC, days.stream().mapToDouble(d -> d.share() * d.diurnalRangeC()).sum(), 1e-9);
     assertEquals(humidityPct, WetHours.meanRelativeHumidityPct(days), 1e-6);
   }
 

@@ -103,8 +103,7 @@ class MonthlyClimateTest {
           annual(months, MonthClimate::relativeHumidityPct),
           0.01,
           where);
-      assertEquals(
-          row.number("wet_hours"), 12 * annual(months, MonthClimate::wetHours), 1, where);
+      assertEquals(row.number("wet_hours"), 12 * annual(months, MonthClimate::wetHours), 1, where);
       assertEquals(
           row.number("frost_days"), 12 * annual(months, MonthClimate::frostDays), 0.05, where);
     }
@@ -130,7 +129,15 @@ class MonthlyClimateTest {
   private static Place place(double latitudeDeg, double longitudeDeg, double elevationM) {
     SeaView sea = new SeaView(500, new double[36], new double[36], new double[36]);
     return new Place(
-        "", "", "", latitudeDeg, longitudeDeg, elevationM, sea, new Surroundings(0, 0, 0), List.of());
+        "",
+        "",
+        "",
+        latitudeDeg,
+        longitudeDeg,
+        elevationM,
+        sea,
+        new Surroundings(0, 0, 0),
+        List.of());
   }
 
   private static double annual(

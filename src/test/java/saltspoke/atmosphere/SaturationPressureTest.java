@@ -14,8 +14,7 @@ class SaturationPressureTest {
   @Test
   @Tag("published")
   void meetsThePrintedTablesWithinTheFormulasStatedError() {
-    for (CsvTable.Row row :
-        Reference.rows("smithsonian-1951/saturation-vapour-pressure.csv")) {
+    for (CsvTable.Row row : Reference.rows("smithsonian-1951/saturation-vapour-pressure.csv")) {
       double t = row.number("temperature_c");
       double printed = row.number("pressure_hpa");
       boolean water = row.text("surface").equals("water");

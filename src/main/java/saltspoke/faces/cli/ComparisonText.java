@@ -6,7 +6,9 @@ import saltspoke.atlas.Judgement;
 import saltspoke.atlas.Pair;
 import saltspoke.values.Refusal;
 
-/** A comparison with a station file as plain text: one line per quantity, then the worst stations. */
+/**
+ * A comparison with a station file as plain text: one line per quantity, then the worst stations.
+ */
 final class ComparisonText {
   private static final int MOST_REFUSED = 20;
 

@@ -45,8 +45,7 @@ class CompareCommandTest {
         row.append(stem.startsWith("t") ? ",9.5" : stem.startsWith("r") ? ",78" : ",3");
       }
     }
-    Path file =
-        write("climate.csv", header + "\n50,8,120" + row + "\n95,8,120" + row + "\n");
+    Path file = write("climate.csv", header + "\n50,8,120" + row + "\n95,8,120" + row + "\n");
     JsonNode answer = answer("compare", "climate", file.toString(), "--json");
     JsonNode first = answer.get("results").get(0);
     for (String key : KEYS) {
