@@ -11,6 +11,8 @@ import * as words from "./words.js";
 
 const { t } = words;
 const KINDS = ["rim", "nipple", "interface", "spoke"];
+const SHOWN_CHANGES = 7;
+const WORTH_A_LINE = 1.1;
 const URGENT_MONTHS = 1.5;
 const OVERDUE_MONTHS = 0.1;
 
@@ -29,11 +31,10 @@ function asked(advice, question) {
   );
 }
 
-function reasonFor(pairing) {
-  return words.firstOf(
-    [`advice-limited-${pairing.limitedBy}`, `advice-${pairing.limitedBy}`, pairing.limitedBy],
-    pairing.reasons.length ? words.say(pairing.reasons[0]) : "",
-  );
+/** The reason that sets the interval, else the foremost. */
+function limit(pairing) {
+  const reason = pairing.reasons.find(({ code }) => code.endsWith(pairing.limitedBy)) ?? pairing.reasons[0];
+  return reason ? words.say(reason) : "";
 }
 
 const firstLook = (pairing) =>
@@ -91,10 +92,10 @@ function tag(answer, question, index) {
         { class: "then" },
         t("page-by-date", { date: words.date(words.dateIn(pairing.firstLookMonths)) }),
         " ",
-        h("strong", {}, t("page-then-every", { span: words.span(pairing.everyMonths) })),
+        h("strong", {}, t("page-then-every", { every: words.every(pairing.everyMonths) })),
       ),
     ),
-    h("p", { class: "because" }, reasonFor(pairing)),
+    h("p", { class: "because" }, limit(pairing)),
     h(
       "dl",
       { class: "facts" },
@@ -185,6 +186,7 @@ function takeAway() {
   const file = (extension, options) => {
     const label = t(`page-take-${extension}`);
     const path = extension === "json" ? "/api/advice" : `/api/advice.${extension}`;
+    const units = extension === "pdf" && app.view.units === "us" ? { units: "us" } : {};
     const posted = body(question, app.profiles, lang, options);
     if (posted) {
       return h(
@@ -194,7 +196,7 @@ function takeAway() {
           class: "quiet",
           onclick: async () => {
             try {
-              await download(path, posted, fileName(extension));
+              await download(path, { ...posted, ...units }, fileName(extension));
             } catch (failure) {
               byId("taken").textContent = app.wordsFor(
                 failure instanceof Refused ? failure : new Refused(0, { error: "unreachable" }),
@@ -205,7 +207,7 @@ function takeAway() {
         label,
       );
     }
-    const query = new URLSearchParams({ ...parameters(question, options), lang });
+    const query = new URLSearchParams({ ...parameters(question, options), lang, ...units });
     return h("a", { class: "button quiet", href: `${path}?${query}`, download: fileName(extension) }, label);
   };
   return h(
@@ -263,6 +265,26 @@ function why(advice, pairing) {
   );
 }
 
+/** The new part or choice of a change in words. */
+function valueTitle({ field, value }) {
+  if (KINDS.includes(field)) {
+    return partTitle(field, value);
+  }
+  if (value === "true" || value === "false") {
+    return t(value === "true" ? "page-saltedRoads-yes" : "page-saltedRoads-no");
+  }
+  if (field.endsWith("-share") || field.endsWith("Share")) {
+    return Number(value) < 0 ? t("page-by-climate") : words.percent(Number(value));
+  }
+  return words.firstOf([`page-${camel(field)}-${value}`], value);
+}
+
+/** What a change is, with the title of the new part or choice in place of its id. */
+function changeTitle(change) {
+  const title = valueTitle(change);
+  return words.fill(change.what, { value: title });
+}
+
 const camel = (name) => name.replace(/-(.)/g, (_, letter) => letter.toUpperCase());
 
 function tryChange(change) {
@@ -289,34 +311,47 @@ const canTry = (change) =>
   (app.profiles[0][camel(change.field)] !== undefined && camel(change.field) !== "months") ||
   ["risk", "tape-sound", "hidden-nipples", "build-month"].includes(change.field);
 
+function changeRow(change) {
+  const title = changeTitle(change);
+  return h(
+    "li",
+    {},
+    h("span", { class: "change-what" }, title),
+    h("span", { class: "cost", "data-cost": change.cost }, t(`page-cost-${change.cost}`)),
+    h(
+      "span",
+      { class: "change-gain" },
+      t("page-change-gain", { first: words.span(change.firstLookMonths), every: words.every(change.everyMonths) }),
+      h("small", {}, t("page-change-factor", { factor: words.number(change.factor, 1) })),
+    ),
+    canTry(change)
+      ? h(
+          "button",
+          { type: "button", class: "quiet small", onclick: () => tryChange(change), "aria-label": `${t("page-try")}: ${title}` },
+          t("page-try"),
+        )
+      : h("span", {}),
+  );
+}
+
 function changes(advice) {
-  if (advice.changes.length === 0) {
-    return null;
-  }
+  const helpful = advice.changes.filter((change) => change.factor >= WORTH_A_LINE);
+  const best = helpful.slice(0, SHOWN_CHANGES);
+  const rest = advice.changes.filter((change) => !best.includes(change));
   return block(
     "changes",
     t("page-changes"),
-    h(
-      "ul",
-      { class: "changes" },
-      advice.changes.map((change) =>
-        h(
-          "li",
+    best.length
+      ? h("ul", { class: "changes" }, best.map(changeRow))
+      : h("p", {}, t("page-changes-none")),
+    rest.length
+      ? h(
+          "details",
           {},
-          h("span", { class: "change-what" }, words.say(change.what)),
-          h("span", { class: "cost", "data-cost": change.cost }, t(`page-cost-${change.cost}`)),
-          h(
-            "span",
-            { class: "change-gain" },
-            t("page-change-gain", { first: words.span(change.firstLookMonths), every: words.span(change.everyMonths) }),
-            h("small", {}, t("page-change-factor", { factor: words.number(change.factor, 1) })),
-          ),
-          canTry(change)
-            ? h("button", { type: "button", class: "quiet small", onclick: () => tryChange(change), "aria-label": `${t("page-try")}: ${words.say(change.what)}` }, t("page-try"))
-            : h("span", {}),
-        ),
-      ),
-    ),
+          h("summary", {}, t("page-changes-rest", { count: rest.length })),
+          h("ul", { class: "changes" }, rest.map(changeRow)),
+        )
+      : null,
   );
 }
 
@@ -466,7 +501,7 @@ function detailsOf(answer, question) {
 /** What a screen reader hears and the strip on a phone shows once an answer is there. */
 function oneLine(answer, question) {
   const pairing = asked(answer.advice, question);
-  return t("page-one-line", { first: firstLook(pairing), every: words.span(pairing.everyMonths) });
+  return t("page-one-line", { first: firstLook(pairing), every: words.every(pairing.everyMonths) });
 }
 
 /** Draws everything that depends on the answers. */

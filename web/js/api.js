@@ -41,7 +41,7 @@ export async function ask(line, path, parameters = {}, body = null) {
   }
   try {
     const response = await fetch(query ? `${path}?${query}` : path, request);
-    const answer = await response.json().catch(() => ({ error: "unreadable" }));
+    const answer = await response.json();
     if (!response.ok) {
       throw new Refused(response.status, answer);
     }
@@ -50,7 +50,10 @@ export async function ask(line, path, parameters = {}, body = null) {
     if (failure.name === "AbortError") {
       return null;
     }
-    throw failure instanceof Refused ? failure : new Refused(0, { error: "unreachable" });
+    if (failure instanceof Refused) {
+      throw failure;
+    }
+    throw new Refused(0, { error: failure instanceof SyntaxError ? "unreadable" : "unreachable" });
   } finally {
     if (lines.get(line) === controller) {
       lines.delete(line);

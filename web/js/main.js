@@ -146,6 +146,7 @@ async function answerOne(index) {
   answer.waiting = false;
   answer.slow = false;
   draw();
+  performance.mark("answer");
   if (answer.advice) {
     try {
       const others = await fetchFor("others", { parts: ["rim"] });
@@ -195,7 +196,7 @@ async function pickPlace(at) {
       takePlace({ at });
       return;
     }
-    throw new Refused(404, { error: "at-sea", field: "at", was: at });
+    throw new Refused(404, { error: spot.error, field: "at", was: at, allowed: spot.allowed });
   } catch (refusal) {
     answerActive.cancel();
     hangUp(`advice-${app.active}`);
@@ -322,6 +323,7 @@ function initSettings() {
 
 function relabel() {
   dress();
+  showCredits(app.about);
   relabelPlace();
   redrawQuestion();
   relabelMap();
@@ -329,8 +331,11 @@ function relabel() {
 }
 
 function showCredits(about) {
-  const lines = about?.attributions ?? [];
-  byId("credits").textContent = [t("page-credits"), ...lines].join(" ");
+  const attributions = new Set((about.dataSet?.files ?? []).map((file) => file.attribution).filter(Boolean));
+  byId("credits").replaceChildren(
+    h("p", {}, t("page-credits")),
+    h("details", {}, h("summary", {}, t("page-sources")), h("ul", {}, [...attributions].map((line) => h("li", {}, line)))),
+  );
 }
 
 async function begin() {
@@ -356,8 +361,12 @@ async function begin() {
     relabelPlace();
     redrawQuestion();
     initMap(app);
+    app.about = about;
     showCredits(about);
     draw();
+    if (app.questions.some(hasPlace)) {
+      remember();
+    }
     app.questions.forEach((_, index) => answerOne(index));
     document.documentElement.dataset.ready = "yes";
   } catch (failure) {

@@ -118,9 +118,17 @@ async function showLayer() {
   tiles = L.tileLayer(`/api/tiles/${layer}/{z}/{x}/{y}.png`, {
     maxZoom: MOST_ZOOM,
     className: "value-tiles",
-  }).addTo(map);
+  });
+  tiles.on("loading", () => {
+    byId("pointer").textContent = t("page-map-drawing");
+  });
+  tiles.on("load", () => {
+    if (byId("pointer").textContent === t("page-map-drawing")) {
+      byId("pointer").textContent = "";
+    }
+  });
+  tiles.addTo(map);
   legend = null;
-  byId("pointer").textContent = "";
   try {
     legend = await ask("legend", `/api/legend/${layer}`);
   } catch {

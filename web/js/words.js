@@ -41,6 +41,17 @@ export function firstOf(codes, otherwise) {
 /** A note from the server: its own sentence in the page's language. */
 export const say = (note) => note.text ?? t(note.code, note.args);
 
+/** A note's sentence with some gaps filled by the page instead of the server. */
+export function fill(note, values) {
+  if (sentences[note.code] === undefined) {
+    return say(note);
+  }
+  const args = Object.fromEntries(
+    Object.entries(note.args ?? {}).map(([name, value]) => [name, typeof value === "number" ? rough(value) : value]),
+  );
+  return t(note.code, { ...args, ...values });
+}
+
 export function number(value, digits = 0) {
   return new Intl.NumberFormat(language, { maximumFractionDigits: digits }).format(value);
 }
@@ -83,14 +94,22 @@ const WEEKS_PER_MONTH = 365.25 / 12 / 7;
 const MONTHS_SHOWN_AS_YEARS = 36;
 
 /** A span to act within, always rounded down: better a week early than a week late. */
-export function span(months) {
+function rounded(months) {
   if (months < 1) {
-    return counted(Math.max(1, Math.floor(months * WEEKS_PER_MONTH)), "week");
+    return { unit: "week", value: Math.max(1, Math.floor(months * WEEKS_PER_MONTH)) };
   }
-  if (months < 6) {
-    return counted(Math.floor(months * 2) / 2, "month", 1);
-  }
-  return counted(Math.floor(months), "month");
+  return { unit: "month", value: months < 6 ? Math.floor(months * 2) / 2 : Math.floor(months) };
+}
+
+export function span(months) {
+  const { unit, value } = rounded(months);
+  return counted(value, unit, 1);
+}
+
+/** "every 3 months", as each language says it for one and for several. */
+export function every(months) {
+  const { unit, value } = rounded(months);
+  return value === 1 ? t(`page-each-${unit}`) : t(`page-each-${unit}s`, { span: span(months) });
 }
 
 /** When a state is reached, as a range; what lies beyond the horizon says so. */

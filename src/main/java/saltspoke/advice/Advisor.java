@@ -40,18 +40,9 @@ public final class Advisor {
    * @throws Refusal for parts that are unknown or do not fit, and numbers out of range
    */
   public Advice advise(AirClimate air, AdviceRequest request) {
-    check(request);
-    List<Pairing> pairings =
-        catalogue.pairings(request.rim(), request.nipple(), request.between(), request.spoke());
-    Workshop shop = open(air, request, DRAWS, WheelRisk.NIPPLE_SCATTER);
-    List<Case> cases = new ArrayList<>();
-    for (Pairing pairing : pairings) {
-      cases.add(shop.of(pairing));
-    }
+    Workshop shop = open(air, checked(request), DRAWS, WheelRisk.NIPPLE_SCATTER);
+    List<Case> cases = cases(shop, request);
     Case focus = focus(cases);
-    cases.sort(
-        Comparator.comparingDouble((Case c) -> -c.interval().freeFirstMonths())
-            .thenComparingDouble(c -> -c.interval().replaceByMonths()));
     List<Change> changes =
         new Changes(catalogue, request, other -> open(air, other, DRAWS, WheelRisk.NIPPLE_SCATTER))
             .of(focus, shop, air.place().latitudeDeg() < 0);
@@ -69,6 +60,27 @@ public final class Advisor {
         Looks.stopSigns(),
         Looks.cautions(),
         flags);
+  }
+
+  /**
+   * The pairings of {@link #advise} alone, without year and changes: a fraction of the work, for
+   * whoever asks for many places.
+   */
+  public List<PairingAdvice> pairings(AirClimate air, AdviceRequest request) {
+    Workshop shop = open(air, checked(request), DRAWS, WheelRisk.NIPPLE_SCATTER);
+    return cases(shop, request).stream().map(c -> Answer.of(c, request)).toList();
+  }
+
+  private List<Case> cases(Workshop shop, AdviceRequest request) {
+    List<Case> cases = new ArrayList<>();
+    for (Pairing pairing :
+        catalogue.pairings(request.rim(), request.nipple(), request.between(), request.spoke())) {
+      cases.add(shop.of(pairing));
+    }
+    cases.sort(
+        Comparator.comparingDouble((Case c) -> -c.interval().freeFirstMonths())
+            .thenComparingDouble(c -> -c.interval().replaceByMonths()));
+    return cases;
   }
 
   Workshop open(AirClimate air, AdviceRequest request, Draws draws, double scatter) {
@@ -90,7 +102,7 @@ public final class Advisor {
         .orElseThrow();
   }
 
-  private static void check(AdviceRequest request) {
+  private static AdviceRequest checked(AdviceRequest request) {
     if (request.buildMonth() < 1 || request.buildMonth() > 12) {
       throw Refusal.outOfRange("buildMonth", request.buildMonth(), "1..12");
     }
@@ -104,5 +116,6 @@ public final class Advisor {
           request.lastFinding().id(),
           "not-looked for a new wheel; give ageMonths for one in service");
     }
+    return request;
   }
 }

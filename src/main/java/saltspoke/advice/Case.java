@@ -1,6 +1,5 @@
 package saltspoke.advice;
 
-import java.util.List;
 import saltspoke.wheel.Pairing;
 import saltspoke.wheel.damage.Parts;
 import saltspoke.wheel.damage.Site;
@@ -8,23 +7,21 @@ import saltspoke.wheel.damage.Site;
 /**
  * One pairing worked out under one request.
  *
- * @param sites its ways of going bad
- * @param risk chances over time
- * @param look kind of look that shows it
- * @param interval the rule's answer
+ * @param fate what becomes of such a wheel
  */
-record Case(
-    Pairing pairing,
-    Parts parts,
-    List<Site> sites,
-    WheelRisk risk,
-    LookKind look,
-    Interval interval) {
+record Case(Pairing pairing, Parts parts, Fate fate) {
+
+  Interval interval() {
+    return fate.interval();
+  }
+
+  LookKind look() {
+    return fate.look();
+  }
 
   /** The site that brings a state about first; null when none can. */
   Site leader(State state) {
-    int i = risk.leader(state);
-    return i < 0 ? null : sites.get(i);
+    return fate.leader(state);
   }
 
   /** The site that decides the interval: what seizes first, else what is lost, else what shows. */

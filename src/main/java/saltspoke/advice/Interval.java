@@ -23,7 +23,9 @@ record Interval(
   /**
    * The rule. First look: when the chance of seized, or of a lost head, passes what is accepted.
    * Repeats: no farther apart than half the short warning (10 % quantile of first attack to
-   * seized), and no farther than the same chances allow once more after a clean look then.
+   * seized), and no farther than until the same chances are passed once more by wheels that look
+   * found clean, of all wheels looked at (delay-time rule): powder that is seen is acted upon. For
+   * a wheel of which the last look found something else, the chances are those given that finding.
    *
    * @param risk with seasons, for the first look and the replacement
    * @param steady at the year's mean pace, for the repeats
@@ -55,15 +57,18 @@ record Interval(
             steady.monthsTo(State.SEIZED, limits.seized(), history, horizon),
             steady.monthsTo(State.LOST, limits.lost(), history, horizon));
     if (paced < horizon) {
+      boolean plan = history.finding() == Finding.NOT_LOOKED;
       History then =
           new History(
               Math.max(history.ageMonths() + paced, SiteTable.FIRST_MONTHS),
-              history.finding() == Finding.NOT_LOOKED ? Finding.CLEAN : history.finding(),
+              plan ? Finding.CLEAN : history.finding(),
               look.finds(State.ATTACKED));
+      // A plan counts all wheels: those found clean are few when attack comes early.
+      double found = plan ? Math.max(steady.chanceOf(then), 0.01) : 1;
       double again =
           Math.min(
-              steady.monthsTo(State.SEIZED, limits.seized(), then, horizon),
-              steady.monthsTo(State.LOST, limits.lost(), then, horizon));
+              steady.monthsTo(State.SEIZED, level(limits.seized() / found), then, horizon),
+              steady.monthsTo(State.LOST, level(limits.lost() / found), then, horizon));
       if (again < every) {
         every = again;
         everyBy = "repeat-risk";
@@ -83,6 +88,10 @@ record Interval(
         replace,
         bound(first, heldFirst, limitedBy),
         bound(every, heldEvery, everyBy));
+  }
+
+  private static double level(double chance) {
+    return Math.min(chance, 0.99);
   }
 
   private static double hold(double months) {

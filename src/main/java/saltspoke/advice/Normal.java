@@ -25,6 +25,11 @@ final class Normal {
     return LN_CDF[i] + (at - i) * (LN_CDF[i + 1] - LN_CDF[i]);
   }
 
+  /** Φ(z) from the same table. */
+  static double table(double z) {
+    return Math.exp(lnCdf(z));
+  }
+
   /**
    * Φ(z) by its continued fraction in the tails and its power series in the middle (Abramowitz and
    * Stegun 26.2.11 and 26.2.14).

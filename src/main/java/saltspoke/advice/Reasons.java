@@ -16,6 +16,15 @@ final class Reasons {
   static List<Note> of(Case worked, AdviceRequest request) {
     List<Note> notes = new ArrayList<>();
     Interval interval = worked.interval();
+    if (interval.freeFirstMonths() <= 0) {
+      notes.add(Note.of("advice-look-now"));
+    }
+    if (request.lastFinding() == Finding.ONE_STIFF) {
+      notes.add(Note.of("advice-seized-already"));
+    }
+    if (worked.fate().surprising()) {
+      notes.add(Note.of("advice-finding-unexpected"));
+    }
     limit(worked, interval, notes);
     practice(interval, request, notes);
     cause(worked, notes);
@@ -98,7 +107,10 @@ final class Reasons {
     }
     String code =
         switch (limiting.cause()) {
-          case "thread" -> "advice-cause-thread";
+          case "thread" ->
+              limiting.part().equals("spoke") ? "advice-cause-spoke" : "advice-cause-thread";
+          case "wear" ->
+              worked.parts().nipple().gallsOnSpoke() ? "advice-cause-galling" : "advice-cause-wear";
           case "open-air" -> "advice-cause-open-air";
           default ->
               switch (limiting.part()) {

@@ -1,9 +1,11 @@
 package saltspoke.advice;
 
 import saltspoke.wheel.damage.DoseCurve;
-import saltspoke.wheel.damage.Site;
 
-/** ln dose of a site at fixed times, so that a chance costs a look-up and no power or logarithm. */
+/**
+ * ln dose of a site, over the scatter between nipples, at fixed times, so that a chance costs a
+ * look-up and no power or logarithm.
+ */
 final class SiteTable {
   /** First time of the table, months. */
   static final double FIRST_MONTHS = 0.02;
@@ -15,7 +17,10 @@ final class SiteTable {
   static final int POINTS = 132;
 
   private static final double STEP = Math.log(LAST_MONTHS / FIRST_MONTHS) / (POINTS - 1);
+
+  /** ln of a dose in µm that is as good as none. */
   private static final double NOTHING = -50;
+
   private static final double[] MONTHS = new double[POINTS];
 
   static {
@@ -24,23 +29,19 @@ final class SiteTable {
     }
   }
 
-  private final double[] lnUm = new double[POINTS];
+  private final double[] lnDose = new double[POINTS];
 
-  SiteTable(DoseCurve dose) {
+  SiteTable(DoseCurve dose, double scatter) {
     for (int i = 0; i < POINTS; i++) {
       double um = dose.um(MONTHS[i]);
-      lnUm[i] = um > 0 ? Math.max(NOTHING, Math.log(um)) : NOTHING;
+      lnDose[i] = (um > 0 ? Math.max(NOTHING, Math.log(um)) : NOTHING) / scatter;
     }
-  }
-
-  static SiteTable of(Site site, boolean steady) {
-    return new SiteTable(steady ? site.dose().steady() : site.dose());
   }
 
   /** Place of a time in the table, as whole and part of a step. */
   static double place(double months) {
-    return Math.min(
-        Math.max(Math.log(Math.max(months, 1e-9) / FIRST_MONTHS) / STEP, 0), POINTS - 1.000001);
+    double steps = Math.log(Math.max(months, FIRST_MONTHS) / FIRST_MONTHS) / STEP;
+    return Math.min(steps, POINTS - 1);
   }
 
   /** Time of a place in the table, months. */
@@ -48,31 +49,31 @@ final class SiteTable {
     return FIRST_MONTHS * Math.exp(STEP * place);
   }
 
-  /** ln dose at a place. */
-  double lnUmAt(double place) {
-    int i = (int) place;
-    return lnUm[i] + (place - i) * (lnUm[i + 1] - lnUm[i]);
+  /** ln dose over scatter at a place. */
+  double at(double place) {
+    int i = Math.min((int) place, POINTS - 2);
+    return lnDose[i] + (place - i) * (lnDose[i + 1] - lnDose[i]);
   }
 
-  /** Place at which ln dose reaches a value; the table's end when it does not. */
-  double placeOf(double lnWanted) {
-    if (lnWanted > lnUm[POINTS - 1]) {
+  /** Place at which ln dose over scatter reaches a value; the table's end when it does not. */
+  double placeOf(double wanted) {
+    if (wanted > lnDose[POINTS - 1]) {
       return POINTS - 1;
+    }
+    if (lnDose[0] >= wanted) {
+      return 0;
     }
     int low = 0;
     int high = POINTS - 1;
-    if (lnUm[0] >= lnWanted) {
-      return 0;
-    }
     while (high - low > 1) {
       int middle = (low + high) >>> 1;
-      if (lnUm[middle] >= lnWanted) {
+      if (lnDose[middle] >= wanted) {
         high = middle;
       } else {
         low = middle;
       }
     }
-    double rise = lnUm[high] - lnUm[low];
-    return low + (rise > 0 ? (lnWanted - lnUm[low]) / rise : 1);
+    double rise = lnDose[high] - lnDose[low];
+    return low + (rise > 0 ? (wanted - lnDose[low]) / rise : 1);
   }
 }

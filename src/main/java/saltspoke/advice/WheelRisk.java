@@ -1,8 +1,7 @@
 package saltspoke.advice;
 
+import java.util.Arrays;
 import java.util.List;
-import saltspoke.wheel.damage.Assumption;
-import saltspoke.wheel.damage.Site;
 
 /**
  * The chance that a wheel has reached a state, its worst nipple deciding.
@@ -11,8 +10,8 @@ import saltspoke.wheel.damage.Site;
  * a scatter of its own: nipple j loses exp(σ·z_j) times the median. A nipple is then in a state
  * from the time on at which z_j passes a threshold ζ = min over sites of (ln limit − ln dose)/σ,
  * and a wheel of N nipples is still free of it with chance Φ(ζ)^N. Chances are means over the
- * draws. With the scatter below and a common spread of ln 2 to ln 3 the correlation of ln life
- * between two nipples of a wheel is 0.7 to 0.85.
+ * draws. With the scatter below and a common spread of ln 1.8 to ln 2.5 the correlation of ln life
+ * between two nipples of a wheel is 0.7 to 0.85. Serves one thread.
  */
 final class WheelRisk {
   /**
@@ -21,242 +20,230 @@ final class WheelRisk {
    */
   static final double NIPPLE_SCATTER = 0.4;
 
-  private static final State[] STATES = State.values();
+  private final SiteRisk[] sites;
+  private final WorstOf worst;
+  private final boolean steady;
+  private final double[] zeta = new double[Draws.COUNT];
 
-  private final int nipples;
-  private final double scatter;
-  private final SiteTable[] dose;
-  private final boolean[] possible = new boolean[STATES.length];
-  private final Draws draws;
+  /** Chances already worked out, by state and step of time; −1 for none yet. */
+  private final double[][] known = new double[State.values().length][];
 
-  /** threshold[state][site][draw]: (ln limit − shift)/σ, infinite where the site cannot do it. */
-  private final double[][][] threshold;
-
-  /** Sites that can bring each state about. */
-  private final int[][] actors = new int[STATES.length][];
+  private Belief belief;
 
   /**
    * @param sites of one nipple hole
-   * @param nipples in the wheel
-   * @param draws of the assumptions
-   * @param scatter of ln rate between nipples
+   * @param worst of the wheel's nipples
    * @param steady whether to leave seasons out
    */
-  WheelRisk(List<Site> sites, int nipples, Draws draws, double scatter, boolean steady) {
-    this(sites, nipples, draws, scatter, tables(sites, steady), null);
-  }
-
-  private WheelRisk(
-      List<Site> sites,
-      int nipples,
-      Draws draws,
-      double scatter,
-      SiteTable[] dose,
-      double[][][] known) {
-    this.nipples = nipples;
-    this.scatter = scatter;
-    this.draws = draws;
-    this.dose = dose;
-    for (int s = 0; s < STATES.length; s++) {
-      int state = s;
-      actors[s] =
-          java.util.stream.IntStream.range(0, sites.size())
-              .filter(i -> Double.isFinite(limit(sites.get(i), STATES[state])))
-              .toArray();
-      possible[s] = actors[s].length > 0;
-    }
-    threshold = known != null ? known : thresholds(sites);
+  WheelRisk(List<SiteRisk> sites, WorstOf worst, boolean steady) {
+    this.sites = sites.toArray(SiteRisk[]::new);
+    this.worst = worst;
+    this.steady = steady;
   }
 
   /** The same risk at the year's mean pace. */
-  WheelRisk steady(List<Site> sites) {
-    return new WheelRisk(sites, nipples, draws, scatter, tables(sites, true), threshold);
+  WheelRisk atMeanPace() {
+    return new WheelRisk(List.of(sites), worst, true);
   }
 
-  private static SiteTable[] tables(List<Site> sites, boolean steady) {
-    return sites.stream().map(site -> SiteTable.of(site, steady)).toArray(SiteTable[]::new);
-  }
-
-  private double[][][] thresholds(List<Site> sites) {
-    double[][][] found = new double[STATES.length][sites.size()][Draws.COUNT];
-    for (int i = 0; i < sites.size(); i++) {
-      double[] shift = sites.get(i).lnShift();
-      for (int n = 0; n < Draws.COUNT; n++) {
-        double[] z = draws.row(n);
-        double moved = 0;
-        for (int k = 0; k < shift.length; k++) {
-          moved += shift[k] * z[k];
-        }
-        for (State state : STATES) {
-          double limit = limit(sites.get(i), state);
-          found[state.ordinal()][i][n] =
-              Double.isFinite(limit)
-                  ? (Math.log(limit) + limitShift(sites.get(i), state, z) - moved) / scatter
-                  : Double.POSITIVE_INFINITY;
-        }
-      }
-    }
-    return found;
-  }
-
-  private static double limit(Site site, State state) {
-    return switch (state) {
-      case ATTACKED -> site.visibleUm();
-      case SEIZED -> site.seizedUm();
-      case LOST -> site.lostUm();
-    };
-  }
-
-  /** What shows at a thread is part of what seizes it, so both limits move together there. */
-  private static double limitShift(Site site, State state, double[] z) {
-    double gap = z[Assumption.SEIZING_GAP.ordinal()] * Assumption.SEIZING_GAP.lnSpread();
-    double visible = z[Assumption.VISIBLE_DEPTH.ordinal()] * Assumption.VISIBLE_DEPTH.lnSpread();
-    return switch (state) {
-      case ATTACKED -> site.cause().equals("thread") ? gap + visible / 2 : visible;
-      case SEIZED -> gap;
-      case LOST -> z[Assumption.HEAD_MARGIN.ordinal()] * Assumption.HEAD_MARGIN.lnSpread();
-    };
-  }
-
-  /** Whether any site can bring the state about. */
-  boolean possible(State state) {
-    return possible[state.ordinal()];
-  }
-
-  /** The site whose median nipple gets there first; −1 for none. */
-  int leader(State state) {
-    int s = state.ordinal();
-    int first = -1;
+  /** The site whose median nipple gets to the state first; null when none has a limit for it. */
+  SiteRisk leader(State state) {
+    SiteRisk first = null;
     double least = Double.POSITIVE_INFINITY;
-    for (int i : actors[s]) {
-      double mean = 0;
-      for (int n = 0; n < Draws.COUNT; n++) {
-        mean += threshold[s][i][n] / Draws.COUNT;
-      }
-      double place = dose[i].placeOf(mean * scatter);
-      if (first < 0 || place < least) {
-        least = place;
-        first = i;
+    for (SiteRisk site : sites) {
+      if (site.has(state)) {
+        double place = site.medianPlace(state);
+        if (first == null || place < least) {
+          least = place;
+          first = site;
+        }
       }
     }
     return first;
   }
 
-  /** ζ of a state in draw n at ln doses already looked up; worse states count as this one too. */
-  private double zeta(int s, int n, double[] lnUm) {
-    double least = Double.POSITIVE_INFINITY;
-    for (int t = s; t < STATES.length; t++) {
-      for (int i : actors[t]) {
-        least = Math.min(least, threshold[t][i][n] - lnUm[i] / scatter);
+  /** Fills in the thresholds ζ of a state at a place in time, one per draw. */
+  private double[] zetas(State state, double place, double[] zeta) {
+    boolean first = true;
+    for (SiteRisk site : sites) {
+      if (site.canCause(state)) {
+        double done = site.table(steady).at(place);
+        double[] threshold = site.thresholds(state);
+        for (int n = 0; n < zeta.length; n++) {
+          double z = threshold[n] - done;
+          zeta[n] = first || z < zeta[n] ? z : zeta[n];
+        }
+        first = false;
       }
     }
-    return least;
-  }
-
-  private double[] lnUm(double months) {
-    double place = SiteTable.place(months);
-    double[] found = new double[dose.length];
-    for (int i = 0; i < found.length; i++) {
-      found[i] = dose[i].lnUmAt(place);
+    if (first) {
+      Arrays.fill(zeta, Double.POSITIVE_INFINITY);
     }
-    return found;
+    return zeta;
   }
 
-  /** Chance that a wheel has reached the state after some months in service. */
-  double chance(State state, double months) {
-    double[] at = lnUm(months);
+  private double chanceAt(State state, double place) {
     double free = 0;
-    for (int n = 0; n < Draws.COUNT; n++) {
-      free += Math.exp(nipples * Normal.lnCdf(zeta(state.ordinal(), n, at)));
+    for (double z : zetas(state, place, zeta)) {
+      free += worst.none(z);
     }
-    return 1 - free / Draws.COUNT;
+    return 1 - free / zeta.length;
+  }
+
+  /** Chance that a new wheel has reached the state after some months in service. */
+  double chance(State state, double months) {
+    return chanceAt(state, SiteTable.place(months));
   }
 
   /** Chance of it some months from now, for a wheel of which the last look found something. */
   double chance(State state, double months, History history) {
-    if (history.isNew()) {
-      return chance(state, months);
+    return history.isNew() ? chance(state, months) : believing(history).chance(state, months);
+  }
+
+  private Belief believing(History history) {
+    if (belief == null || !belief.history.equals(history)) {
+      belief = new Belief(history);
     }
-    double[] then = lnUm(history.ageMonths());
-    double[] at = lnUm(history.ageMonths() + months);
-    double[] lnWeight = new double[Draws.COUNT];
-    double[] free = new double[Draws.COUNT];
-    double most = Double.NEGATIVE_INFINITY;
-    for (int n = 0; n < Draws.COUNT; n++) {
-      double[] zetas = {zeta(0, n, then), zeta(1, n, then), zeta(2, n, then)};
-      Evidence evidence = Evidence.of(history, zetas, nipples);
-      lnWeight[n] = evidence.lnWeight();
-      free[n] = evidence.freeShare(state, zeta(state.ordinal(), n, at));
-      most = Math.max(most, lnWeight[n]);
-    }
-    double weights = 0;
-    double sum = 0;
-    for (int n = 0; n < Draws.COUNT; n++) {
-      double weight = Math.exp(lnWeight[n] - most);
-      weights += weight;
-      sum += weight * free[n];
-    }
-    return 1 - sum / weights;
+    return belief;
   }
 
   /** Months from now at which the chance reaches a level; infinite beyond the horizon. */
   double monthsTo(State state, double level, History history, double horizonMonths) {
-    if (!possibleOrWorse(state)) {
+    if (Arrays.stream(sites).noneMatch(site -> site.canCause(state))) {
       return Double.POSITIVE_INFINITY;
     }
-    double low = 0;
-    double high = SiteTable.place(horizonMonths);
-    if (chance(state, horizonMonths, history) < level) {
+    Belief given = history.isNew() ? null : believing(history);
+    int low = 0;
+    int high = (int) Math.ceil(SiteTable.place(horizonMonths));
+    double atHigh = chanceAtStep(state, high, given);
+    if (atHigh < level) {
       return Double.POSITIVE_INFINITY;
     }
-    if (chance(state, SiteTable.FIRST_MONTHS, history) >= level) {
+    double atLow = chanceAtStep(state, low, given);
+    if (atLow >= level) {
       return history.isNew() ? SiteTable.FIRST_MONTHS : 0;
     }
-    for (int i = 0; i < 13; i++) {
-      double middle = (low + high) / 2;
-      if (chance(state, SiteTable.months(middle), history) >= level) {
+    while (high - low > 1) {
+      int middle = (low + high) >>> 1;
+      double at = chanceAtStep(state, middle, given);
+      if (at >= level) {
         high = middle;
+        atHigh = at;
       } else {
         low = middle;
+        atLow = at;
       }
     }
-    return SiteTable.months(high);
+    double months = SiteTable.months(low + (level - atLow) / (atHigh - atLow));
+    return months > horizonMonths ? Double.POSITIVE_INFINITY : months;
   }
 
-  private boolean possibleOrWorse(State state) {
-    for (int s = state.ordinal(); s < STATES.length; s++) {
-      if (possible[s]) {
-        return true;
-      }
+  /** Chance that a look at such a wheel finds what the history says, 0..1. */
+  double chanceOf(History history) {
+    return believing(history).weights / Draws.COUNT;
+  }
+
+  /** Whether no draw explains the finding, so that the look is to be trusted over the model. */
+  boolean surprisedBy(History history) {
+    return !history.isNew() && believing(history).surprising;
+  }
+
+  private double chanceAtStep(State state, int step, Belief given) {
+    if (given != null) {
+      return given.chance(state, SiteTable.months(step));
     }
-    return false;
+    double[] chances = known[state.ordinal()];
+    if (chances == null) {
+      chances = new double[SiteTable.POINTS];
+      Arrays.fill(chances, -1);
+      known[state.ordinal()] = chances;
+    }
+    if (chances[step] < 0) {
+      chances[step] = chanceAt(state, step);
+    }
+    return chances[step];
   }
 
   /**
-   * The 10 % quantile of the time from first attack to seized, months; infinite when none seizes.
+   * The 10 % quantile of the time from first attack to seized at the place that gives the shortest
+   * warning, months; infinite when fewer than that seize with a warning. What shows elsewhere first
+   * is not counted on, so that a rate that rises never lengthens it; a spoke under zinc is left
+   * out, since the zinc's own white rust comes long before.
    */
   double shortWarningMonths() {
     double[] gaps = new double[Draws.COUNT];
-    for (int n = 0; n < Draws.COUNT; n++) {
-      double worst = Normal.quantile(Math.pow(draws.worst(n), 1.0 / nipples));
-      double attacked = SiteTable.months(place(State.ATTACKED, n, worst));
-      double place = place(State.SEIZED, n, worst);
-      gaps[n] =
-          place >= SiteTable.POINTS - 1
-              ? Double.POSITIVE_INFINITY
-              : SiteTable.months(place) - attacked;
-    }
-    java.util.Arrays.sort(gaps);
-    return gaps[Draws.COUNT / 10];
-  }
-
-  private double place(State state, int n, double worst) {
-    double first = SiteTable.POINTS - 1;
-    for (int t = state.ordinal(); t < STATES.length; t++) {
-      for (int i : actors[t]) {
-        first = Math.min(first, dose[i].placeOf((threshold[t][i][n] - worst) * scatter));
+    Arrays.fill(gaps, Double.POSITIVE_INFINITY);
+    for (SiteRisk site : sites) {
+      if (site.warns()) {
+        for (int n = 0; n < gaps.length; n++) {
+          gaps[n] = Math.min(gaps[n], warningMonths(site, n));
+        }
       }
     }
-    return first;
+    Arrays.sort(gaps);
+    return gaps[gaps.length / 10];
+  }
+
+  private double warningMonths(SiteRisk site, int n) {
+    SiteTable table = site.table(steady);
+    double seized = table.placeOf(site.thresholds(State.SEIZED)[n] - worst.worst(n));
+    if (seized >= SiteTable.POINTS - 1) {
+      return Double.POSITIVE_INFINITY;
+    }
+    double attacked = table.placeOf(site.thresholds(State.ATTACKED)[n] - worst.worst(n));
+    return SiteTable.months(seized) - SiteTable.months(attacked);
+  }
+
+  /**
+   * What a finding at an age leaves of each draw. A finding that no draw can explain (a clean wheel
+   * where all say it should be eaten) leaves the half of the draws that come nearest: those in
+   * which the worst nipple is slowest.
+   */
+  private final class Belief {
+    private final History history;
+    private final Evidence evidence;
+    private final double[] attacked;
+    private final double[] seized;
+    private final double[] lost;
+    private final boolean surprising;
+    private double weights;
+
+    Belief(History history) {
+      this.history = history;
+      evidence = new Evidence(history, worst);
+      double place = SiteTable.place(history.ageMonths());
+      attacked = zetas(State.ATTACKED, place, new double[Draws.COUNT]);
+      seized = zetas(State.SEIZED, place, new double[Draws.COUNT]);
+      lost = zetas(State.LOST, place, new double[Draws.COUNT]);
+      for (int n = 0; n < attacked.length; n++) {
+        weights += evidence.weight(attacked[n], seized[n], lost[n]);
+      }
+      surprising = weights < 1e-9;
+    }
+
+    double chance(State state, double months) {
+      double[] zeta =
+          zetas(state, SiteTable.place(history.ageMonths() + months), WheelRisk.this.zeta);
+      if (surprising) {
+        return surprised(zeta);
+      }
+      double free = 0;
+      for (int n = 0; n < zeta.length; n++) {
+        free += evidence.free(state, zeta[n], attacked[n], seized[n], lost[n]);
+      }
+      return Math.max(0, 1 - free / weights);
+    }
+
+    private double surprised(double[] zeta) {
+      double[] sorted = zeta.clone();
+      Arrays.sort(sorted);
+      int half = sorted.length / 2;
+      int from = history.finding() == Finding.CLEAN ? half : 0;
+      double free = 0;
+      for (int n = from; n < from + half; n++) {
+        free += worst.none(sorted[n]);
+      }
+      return 1 - free / half;
+    }
   }
 }

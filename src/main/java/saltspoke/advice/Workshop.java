@@ -1,6 +1,10 @@
 package saltspoke.advice;
 
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.IdentityHashMap;
 import java.util.List;
+import java.util.Map;
 import saltspoke.atmosphere.AirClimate;
 import saltspoke.wheel.Catalogue;
 import saltspoke.wheel.Pairing;
@@ -23,6 +27,10 @@ final class Workshop {
   private final Sites sites;
   private final Draws draws;
   private final double scatter;
+  private final WorstOf worst;
+  private final Map<Site, SiteRisk> ready = new IdentityHashMap<>();
+  private final Map<List<SiteRisk>, Fate> fates = new HashMap<>();
+  private final Map<Pairing, Case> worked = new HashMap<>();
 
   Workshop(
       Catalogue catalogue,
@@ -39,7 +47,8 @@ final class Workshop {
     RidingProfile profile = request.profile();
     WheelBuild build = request.build();
     this.year = weather.over(air, profile, build);
-    this.sites = new Sites(air, profile, build, request.buildMonth(), rates);
+    this.sites = new Sites(air, profile, build, request.buildMonth(), year, rates);
+    this.worst = new WorstOf(build.spokeCount(), draws);
   }
 
   WheelYear year() {
@@ -48,30 +57,21 @@ final class Workshop {
 
   /** The pairing with its chances and its interval. */
   Case of(Pairing pairing) {
+    return worked.computeIfAbsent(pairing, this::workOut);
+  }
+
+  private Case workOut(Pairing pairing) {
     Parts parts =
         new Parts(
             catalogue.rim(pairing.rim()),
             catalogue.nipple(pairing.nipple()),
             catalogue.between(pairing.between()),
             catalogue.spoke(pairing.spoke()));
-    List<Site> found = sites.of(parts, year);
-    WheelRisk risk = new WheelRisk(found, request.build().spokeCount(), draws, scatter, false);
-    int leader = Math.max(risk.leader(State.SEIZED), risk.leader(State.LOST));
-    LookKind look =
-        LookKind.of(
-            request.build().hiddenNipples(), leader < 0 ? "nipple" : found.get(leader).part());
-    History history =
-        request.ageMonths() <= 0
-            ? History.NEW
-            : new History(request.ageMonths(), request.lastFinding(), look.finds(State.ATTACKED));
-    Interval interval =
-        Interval.of(
-            risk,
-            risk.steady(found),
-            history,
-            RiskLimits.of(request.risk()),
-            look,
-            request.practiceLimits());
-    return new Case(pairing, parts, found, risk, look, interval);
+    List<SiteRisk> found = new ArrayList<>();
+    for (Site site : sites.of(parts)) {
+      found.add(ready.computeIfAbsent(site, s -> new SiteRisk(s, draws, scatter)));
+    }
+    Fate fate = fates.computeIfAbsent(found, f -> new Fate(f, worst, request));
+    return new Case(pairing, parts, fate);
   }
 }

@@ -90,18 +90,27 @@ public final class AirModel {
       List<MonthClimate> months,
       AirOverrides overrides,
       Set<Note> flags) {
+    double rainMmPerYear = months.stream().mapToDouble(MonthClimate::rainMm).sum();
     SeaSalt model =
         new SeaSalt(
             place.sea(),
-            SaltPaths.crestsAbovePlaceM(place, elevation),
+            SaltPaths.crestsAboveLowAirM(place, elevation),
             SaltPaths.roughness(setting, place.sea().distanceKm()),
-            place.elevationM());
-    double rainMmPerYear = months.stream().mapToDouble(MonthClimate::rainMm).sum();
+            place.elevationM(),
+            rainMmPerYear);
     List<Double> monthly = new ArrayList<>();
+    double calmestHeld = Double.POSITIVE_INFINITY;
     for (MonthClimate month : months) {
-      monthly.add(model.monthMgPerM2Day(winds.at(place, month), rainMmPerYear));
+      if (SaltKernel.heldWind(month.windMPerS()) != month.windMPerS()) {
+        calmestHeld = Math.min(calmestHeld, month.windMPerS());
+      }
+      monthly.add(model.monthMgPerM2Day(winds.at(place, month)));
+    }
+    if (calmestHeld < Double.POSITIVE_INFINITY) {
+      flags.add(SaltKernel.windHeld(calmestHeld));
     }
     Quantiles annual = SeaSalt.annual(monthly);
+    ChlorideFromSite.distanceFlag(place.sea().distanceKm()).ifPresent(flags::add);
     double scale = 1;
     double lnSpread = SeaSalt.LN_SPREAD;
     if (overrides.chlorideMgPerM2Day().isPresent()) {

@@ -2,6 +2,7 @@ package saltspoke.atmosphere;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import saltspoke.values.Note;
 import saltspoke.values.Quantiles;
 import saltspoke.values.Refusal;
@@ -21,13 +22,20 @@ public final class ChlorideFromSite {
   /** Directions of the seaward half-plane, as angles from the shore's normal. */
   private static final int HALF_DIRECTIONS = 18;
 
+  /** Fetch of the stand-in ocean, km: the cap of {@link saltspoke.places.SeaView}. */
+  private static final double OCEAN_FETCH_KM = 500;
+
+  /** Farthest station of the fit, km. */
+  private static final double FITTED_TO_KM = 351;
+
   private ChlorideFromSite() {}
 
   /**
    * @param distanceKm to the coast, km, 0..5000
-   * @param windMPerS mean wind speed at 10 m, m/s, 0..40
+   * @param windMPerS mean wind speed at 10 m, m/s, 0..40; held within the winds of the fitted
+   *     stations
    * @param salineWindShare share of months with wind from the sea above some 3 m/s, 0..1
-   * @param roughness 0 open water … 1
+   * @param roughness 0 open water … 0.5 town or forest, at most 10
    * @param elevationM height above sea level, m; 0 when unknown
    * @return p10, median, p90, mg Cl/(m² d), wet candle
    */
@@ -40,9 +48,9 @@ public final class ChlorideFromSite {
     check("distance_to_coast_km", distanceKm, 0, 5000);
     check("wind_speed_m_s", windMPerS, 0, 40);
     check("saline_wind_fraction", salineWindShare, 0, 1);
-    check("roughness", roughness, 0, 1);
+    check("roughness", roughness, 0, 10);
     check("elevation_m", elevationM, -500, 9000);
-    double speed = Math.max(CALMEST_M_PER_S, windMPerS);
+    double speed = SaltKernel.heldWind(windMPerS);
     double coarse = 0;
     double fine = 0;
     double background = 0;
@@ -64,37 +72,28 @@ public final class ChlorideFromSite {
     return SeaSalt.spread(median, LN_SPREAD);
   }
 
-  /** Fetch of the stand-in ocean, km: the cap of {@link saltspoke.places.SeaView}. */
-  private static final double OCEAN_FETCH_KM = 500;
-
-  /** Least mean wind that the law of speeds is asked for, m/s; below it is calm. */
-  private static final double CALMEST_M_PER_S = 0.3;
-
   /** What the prediction stands outside of: the stations that the constants were fitted on. */
   public static List<Note> flags(double distanceKm, double windMPerS) {
     List<Note> flags = new ArrayList<>();
-    if (distanceKm > FITTED_TO_KM) {
-      flags.add(Note.of("air-salt-beyond-fit", "distanceKm", distanceKm, "limitKm", FITTED_TO_KM));
-    }
-    if (windMPerS < FITTED_WIND_FROM_M_PER_S || windMPerS > FITTED_WIND_TO_M_PER_S) {
-      flags.add(
-          new Note(
-              "air-salt-wind-outside-fit",
-              java.util.Map.of(
-                  "windMPerS", windMPerS,
-                  "from", FITTED_WIND_FROM_M_PER_S,
-                  "to", FITTED_WIND_TO_M_PER_S)));
+    distanceFlag(distanceKm).ifPresent(flags::add);
+    if (SaltKernel.heldWind(windMPerS) != windMPerS) {
+      flags.add(SaltKernel.windHeld(windMPerS));
     }
     return flags;
   }
 
-  /** Farthest station of the fit, km. */
-  private static final double FITTED_TO_KM = 351;
-
-  /** Calmest and windiest station of the fit, m/s. */
-  private static final double FITTED_WIND_FROM_M_PER_S = 1.6;
-
-  private static final double FITTED_WIND_TO_M_PER_S = 8.5;
+  /** A flag when the place lies farther from the sea than any station of the fit. */
+  static Optional<Note> distanceFlag(double distanceKm) {
+    return distanceKm > FITTED_TO_KM
+        ? Optional.of(
+            Note.of(
+                "air-salt-beyond-fit",
+                "distanceKm",
+                Math.round(distanceKm),
+                "limitKm",
+                Math.round(FITTED_TO_KM)))
+        : Optional.empty();
+  }
 
   private static void check(String field, double value, double low, double high) {
     if (!(value >= low && value <= high)) {

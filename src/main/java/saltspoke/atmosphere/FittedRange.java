@@ -1,5 +1,7 @@
 package saltspoke.atmosphere;
 
+import java.math.BigDecimal;
+import java.math.MathContext;
 import java.util.ArrayList;
 import java.util.List;
 import saltspoke.values.Note;
@@ -64,11 +66,11 @@ public record FittedRange(Exposure exposure, List<Note> flags, int steps) {
 
   private static int outside(List<Note> flags, String what, double value, double low, double high) {
     if (value < low) {
-      flags.add(Note.of("air-" + what + "-below-range", "value", value, "limit", low));
+      flags.add(Note.of("air-" + what + "-below-range", "value", rounded(value), "limit", low));
       return 1;
     }
     if (value > high) {
-      flags.add(Note.of("air-" + what + "-above-range", "value", value, "limit", high));
+      flags.add(Note.of("air-" + what + "-above-range", "value", rounded(value), "limit", high));
       return 1;
     }
     return 0;
@@ -76,9 +78,15 @@ public record FittedRange(Exposure exposure, List<Note> flags, int steps) {
 
   private static double raised(List<Note> flags, String what, double value, double floor) {
     if (value < floor) {
-      flags.add(Note.of("air-" + what + "-raised-to-floor", "value", value, "limit", floor));
+      flags.add(
+          Note.of("air-" + what + "-raised-to-floor", "value", rounded(value), "limit", floor));
       return floor;
     }
     return value;
+  }
+
+  /** To three significant digits, for people. */
+  private static double rounded(double value) {
+    return new BigDecimal(value).round(new MathContext(3)).doubleValue();
   }
 }

@@ -6,21 +6,21 @@ import saltspoke.values.Quantiles;
 
 /**
  * The distribution of a metal's first-year loss: the inputs' spreads carried through the
- * dose–response function by Gauss–Hermite quadrature (Pd and Sd log-normal, five nodes; T and RH
- * normal, three), each node widened by the standard's own log-normal spread. No random numbers: the
- * same inputs give the same bits.
+ * dose–response function, Pd and Sd (log-normal) by Gauss–Hermite quadrature with five nodes each,
+ * T and RH (normal) by half the change of ln r over two deviations at each node; every node is
+ * widened by the standard's own log-normal spread. No random numbers: the same inputs give the same
+ * bits.
  */
 final class LossDistribution {
   /**
-   * ISO 9223 states −33…+50 % (aluminium −50…+100 %; from memory) for a loss that is log-normal
-   * (published). ASSUMPTION: taken as one standard deviation of ln r, since no coverage is stated.
+   * ISO 9223:2012 annex A: errors are log-normal and stated as one standard deviation s of ln r,
+   * the interval being e^−s … e^s (published; s = 0.7 stands for −50…+100 % there). The sizes
+   * −33…+50 % for steel, zinc and copper and −50…+100 % for aluminium are from memory.
    */
   static double ownLnSpread(Metal metal) {
     return metal == Metal.ALUMINIUM ? 0.693 : 0.405;
   }
 
-  private static final double[] NODE3 = {-Math.sqrt(3), 0, Math.sqrt(3)};
-  private static final double[] WEIGHT3 = {1 / 6.0, 2 / 3.0, 1 / 6.0};
   private static final double[] NODE5 = hermiteNodes5();
   private static final double[] WEIGHT5 = hermiteWeights5();
   private static final int NEWTON_STEPS = 60;
@@ -28,7 +28,7 @@ final class LossDistribution {
   private final Metal metal;
   private final double[] lnUm;
   private final double[] weight;
-  private final double lnSpread;
+  private final double[] lnSpread;
 
   /**
    * @param x exposure with its floors raised
@@ -36,36 +36,48 @@ final class LossDistribution {
    */
   LossDistribution(Metal metal, Exposure x, InputSpread spread, double extraLnSpread) {
     this.metal = metal;
-    this.lnSpread = Math.hypot(ownLnSpread(metal), extraLnSpread);
+    double own = Math.hypot(ownLnSpread(metal), extraLnSpread);
     DoseResponse law = DoseResponse.of(metal);
-    int n = 3 * 3 * 5 * 5;
+    double t = x.temperatureC();
+    double rh = x.relativeHumidityPct();
+    double[][] unit = {
+      parts(law, t, rh),
+      parts(law, t - spread.temperatureK(), rh),
+      parts(law, t + spread.temperatureK(), rh),
+      parts(law, t, Math.max(0, rh - spread.relativeHumidityPct())),
+      parts(law, t, Math.min(100, rh + spread.relativeHumidityPct()))
+    };
+    int n = NODE5.length * NODE5.length;
     lnUm = new double[n];
     weight = new double[n];
-    int k = 0;
-    for (int t = 0; t < 3; t++) {
-      double tC = bounded(x.temperatureC() + NODE3[t] * spread.temperatureK(), -90, 60);
-      for (int h = 0; h < 3; h++) {
-        double rh =
-            bounded(x.relativeHumidityPct() + NODE3[h] * spread.relativeHumidityPct(), 0, 100);
-        double sulfur1 = law.sulfurPartUm(new Exposure(tC, rh, 1, 1));
-        double chloride1 = law.chloridePartUm(new Exposure(tC, rh, 1, 1));
-        for (int p = 0; p < 5; p++) {
-          double pd =
-              Math.max(
-                  FittedRange.PD_MIN_MG_PER_M2_DAY,
-                  x.so2MgPerM2Day() * Math.exp(NODE5[p] * spread.so2Ln()));
-          double sulfur = sulfur1 * Math.pow(pd, law.b());
-          for (int s = 0; s < 5; s++) {
-            double sd =
-                Math.max(
-                    FittedRange.SD_MIN_MG_PER_M2_DAY,
-                    x.chlorideMgPerM2Day() * Math.exp(NODE5[s] * spread.chlorideLn()));
-            lnUm[k] = Math.log(sulfur + chloride1 * Math.pow(sd, law.e()));
-            weight[k++] = WEIGHT3[t] * WEIGHT3[h] * WEIGHT5[p] * WEIGHT5[s];
-          }
-        }
+    lnSpread = new double[n];
+    double[] at = new double[unit.length];
+    for (int k = 0; k < n; k++) {
+      int p = k / NODE5.length;
+      int s = k % NODE5.length;
+      double pd =
+          Math.max(
+              FittedRange.PD_MIN_MG_PER_M2_DAY,
+              x.so2MgPerM2Day() * Math.exp(NODE5[p] * spread.so2Ln()));
+      double sd =
+          Math.max(
+              FittedRange.SD_MIN_MG_PER_M2_DAY,
+              x.chlorideMgPerM2Day() * Math.exp(NODE5[s] * spread.chlorideLn()));
+      double sulfur = Math.pow(pd, law.b());
+      double chloride = Math.pow(sd, law.e());
+      for (int i = 0; i < unit.length; i++) {
+        at[i] = Math.log(unit[i][0] * sulfur + unit[i][1] * chloride);
       }
+      lnUm[k] = at[0];
+      lnSpread[k] = Math.hypot(own, Math.hypot((at[2] - at[1]) / 2, (at[4] - at[3]) / 2));
+      weight[k] = WEIGHT5[p] * WEIGHT5[s];
     }
+  }
+
+  /** The two terms for Pd = Sd = 1. */
+  private static double[] parts(DoseResponse law, double temperatureC, double humidityPct) {
+    Exposure one = new Exposure(temperatureC, humidityPct, 1, 1);
+    return new double[] {law.sulfurPartUm(one), law.chloridePartUm(one)};
   }
 
   /** Probability that the loss is at most {@code um}. */
@@ -95,8 +107,8 @@ final class LossDistribution {
     double high = Double.NEGATIVE_INFINITY;
     double mean = 0;
     for (int i = 0; i < lnUm.length; i++) {
-      low = Math.min(low, lnUm[i] - 6 * lnSpread);
-      high = Math.max(high, lnUm[i] + 6 * lnSpread);
+      low = Math.min(low, lnUm[i] - 6 * lnSpread[i]);
+      high = Math.max(high, lnUm[i] + 6 * lnSpread[i]);
       mean += weight[i] * lnUm[i];
     }
     double x = mean;
@@ -122,7 +134,7 @@ final class LossDistribution {
   private double cdf(double lnLoss) {
     double sum = 0;
     for (int i = 0; i < lnUm.length; i++) {
-      sum += weight[i] * Normal.below((lnLoss - lnUm[i]) / lnSpread);
+      sum += weight[i] * Normal.below((lnLoss - lnUm[i]) / lnSpread[i]);
     }
     return Math.min(1, sum);
   }
@@ -130,14 +142,10 @@ final class LossDistribution {
   private double density(double lnLoss) {
     double sum = 0;
     for (int i = 0; i < lnUm.length; i++) {
-      double z = (lnLoss - lnUm[i]) / lnSpread;
-      sum += weight[i] * Math.exp(-z * z / 2);
+      double z = (lnLoss - lnUm[i]) / lnSpread[i];
+      sum += weight[i] / lnSpread[i] * Math.exp(-z * z / 2);
     }
-    return sum / (lnSpread * Math.sqrt(2 * Math.PI));
-  }
-
-  private static double bounded(double value, double low, double high) {
-    return Math.max(low, Math.min(high, value));
+    return sum / Math.sqrt(2 * Math.PI);
   }
 
   /** Zeros of the fifth Hermite polynomial for weight exp(−z²/2): 0, ±√(5 ∓ √10). */

@@ -1,5 +1,8 @@
 package saltspoke.atmosphere;
 
+import java.util.Map;
+import saltspoke.values.Note;
+
 /**
  * How much sea salt one stretch of shore brings to a place, by distance: the one home of the sea
  * salt constants, used by the field form ({@link SeaSalt}) and the site form ({@link
@@ -46,10 +49,13 @@ final class SaltKernel {
   /** FITTED coarsely: the marine background at the coast, mg/(m² d). */
   private static final double BACKGROUND_MG = 5;
 
-  /** ASSUMPTION: its length of decay at 1000 mm rain a year, km; spread 500–1000. */
-  private static final double BACKGROUND_KM = 700;
+  /** ASSUMPTION: its length of decay at 1000 mm rain a year, km; spread 450–900. */
+  private static final double BACKGROUND_KM = 600;
 
-  /** ASSUMPTION: half of wash-out is rain's at 1000 mm a year, half settles dry. */
+  /**
+   * ASSUMPTION: half of wash-out is rain's at 1000 mm a year, half settles dry. Drier air keeps the
+   * lengths of 1000 mm: it mixes salt over a deeper layer, which thins what missing rain spares.
+   */
   private static final double RAIN_SHARE = 0.5;
 
   /** ASSUMPTION: rain a year for which the lengths above hold, mm. */
@@ -71,12 +77,32 @@ final class SaltKernel {
   private static final double FINE_FETCH_KM = 50;
 
   /**
-   * ASSUMPTION: a crest that stands this much above place and sea lets 37 % of the salt over, km;
-   * spread 0.4–1.2.
+   * ASSUMPTION: a crest that stands this much above the low marine air lets 37 % of the salt over,
+   * km; spread 0.4–1.2.
    */
   private static final double CREST_KM = 0.7;
 
+  /** Calmest and windiest station of the fit, m/s; beyond them the nearer is used, and flagged. */
+  private static final double FITTED_WIND_FROM_M_PER_S = 1.6;
+
+  private static final double FITTED_WIND_TO_M_PER_S = 8.5;
+
   private SaltKernel() {}
+
+  /** A mean wind held within those of the fitted stations, m/s. */
+  static double heldWind(double meanMPerS) {
+    return Math.max(FITTED_WIND_FROM_M_PER_S, Math.min(FITTED_WIND_TO_M_PER_S, meanMPerS));
+  }
+
+  /** What to say when a wind was held. */
+  static Note windHeld(double meanMPerS) {
+    return new Note(
+        "air-salt-wind-held",
+        Map.of(
+            "windMPerS", Math.round(10 * meanMPerS) / 10.0,
+            "from", FITTED_WIND_FROM_M_PER_S,
+            "to", FITTED_WIND_TO_M_PER_S));
+  }
 
   /** Coarse droplets, mg/(m² d) at the reference wind, before shelter. */
   static double coarseMg(double shoreKm, double fetchKm) {
@@ -103,11 +129,11 @@ final class SaltKernel {
   }
 
   /** Share that a crest between sea and place lets over, 0..1. */
-  static double overCrest(double crestAbovePlaceM) {
-    return Math.exp(-Math.max(0, crestAbovePlaceM) / 1000 / CREST_KM);
+  static double overCrest(double crestAboveLowAirM) {
+    return Math.exp(-Math.max(0, crestAboveLowAirM) / 1000 / CREST_KM);
   }
 
   private static double washout(double rainMmPerYear) {
-    return 1 - RAIN_SHARE + RAIN_SHARE * rainMmPerYear / REFERENCE_RAIN_MM_PER_YEAR;
+    return 1 + RAIN_SHARE * Math.max(0, rainMmPerYear / REFERENCE_RAIN_MM_PER_YEAR - 1);
   }
 }

@@ -24,25 +24,28 @@ final class SaltPaths {
 
   private SaltPaths() {}
 
-  /** Per direction of the sea view, how far land before the shore rises above the place, m. */
-  static double[] crestsAbovePlaceM(Place place, FieldStack elevation) {
+  /**
+   * ASSUMPTION: marine air below this height spreads over land unhindered, m; spread 100–500. What
+   * rises above it, the place itself included, holds salt back.
+   */
+  private static final double LOW_AIR_M = 300;
+
+  /** Per direction of the sea view, how far land up to the shore rises above the low air, m. */
+  static double[] crestsAboveLowAirM(Place place, FieldStack elevation) {
     double[] crest = new double[SeaView.DIRECTIONS];
-    double floorM = Math.max(0, place.elevationM());
     for (int k = 0; k < SeaView.DIRECTIONS; k++) {
       double shoreKm = place.sea().shoreKm()[k];
       double endKm = Math.min(shoreKm, FARTHEST_KM);
       if (Double.isInfinite(shoreKm) || endKm < NEAREST_KM) {
         continue;
       }
+      crest[k] = Math.max(0, place.elevationM() - LOW_AIR_M);
       double azimuth = Math.toRadians(k * 360.0 / SeaView.DIRECTIONS);
       for (int i = 1; i <= SAMPLES; i++) {
         // Samples crowd near the place, where a crest is seen best.
         double share = i / (double) SAMPLES;
         double km = NEAREST_KM / 2 + (endKm - NEAREST_KM / 2) * share * share;
-        double heightM = heightAt(place, azimuth, km, elevation);
-        if (heightM - floorM > crest[k]) {
-          crest[k] = heightM - floorM;
-        }
+        crest[k] = Math.max(crest[k], heightAt(place, azimuth, km, elevation) - LOW_AIR_M);
       }
     }
     return crest;

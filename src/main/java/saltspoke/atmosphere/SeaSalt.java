@@ -19,6 +19,9 @@ public final class SeaSalt {
   /** Sums over the two halves of a straight coast, so that half of all winds counts as 1. */
   private static final double HALF_PLANE = 2;
 
+  /** Coarse deposition not worth its exponentials, mg/(m² d). */
+  private static final double NEGLIGIBLE_MG = 1e-6;
+
   private static final double SECTOR_RADIAN = 2 * Math.PI / SeaView.DIRECTIONS;
   private static final double SECTOR_DEG = 360.0 / SeaView.DIRECTIONS;
 
@@ -29,53 +32,57 @@ public final class SeaSalt {
   private static final double FINE_UNIT =
       fineCarried(WindMonth.fromAllSides(SaltKernel.REFERENCE_WIND_M_PER_S));
 
-  private final SeaView sea;
-  private final double[] crestAbovePlaceM;
-  private final double shelter;
+  private final double[] coarseMg = new double[SeaView.DIRECTIONS];
+  private final double[] fineMg = new double[SeaView.DIRECTIONS];
+  private final double steadyMg;
 
   /**
    * @param sea shore, fetch and salinity in 36 directions
-   * @param crestAbovePlaceM per direction, how far land between shore and place rises above the
-   *     place, m, ≥ 0
+   * @param crestAboveLowAirM per direction, how far land up to the shore rises above the low marine
+   *     air, m, ≥ 0
    * @param roughness 0 open water … 0.5 town or forest
    * @param elevationM height of the place, m
+   * @param rainMmPerYear rain that washes salt out on the way, mm
    */
-  public SeaSalt(SeaView sea, double[] crestAbovePlaceM, double roughness, double elevationM) {
-    if (crestAbovePlaceM.length != SeaView.DIRECTIONS) {
+  public SeaSalt(
+      SeaView sea,
+      double[] crestAboveLowAirM,
+      double roughness,
+      double elevationM,
+      double rainMmPerYear) {
+    if (crestAboveLowAirM.length != SeaView.DIRECTIONS) {
       throw new IllegalArgumentException("crests are given for 36 directions");
     }
-    this.sea = sea;
-    this.crestAbovePlaceM = crestAbovePlaceM.clone();
-    this.shelter = SaltKernel.shelter(roughness, elevationM);
-  }
-
-  /**
-   * Median deposition of one month.
-   *
-   * @param rainMmPerYear the month's rain times twelve, mm
-   */
-  public double monthMgPerM2Day(WindMonth wind, double rainMmPerYear) {
-    SectorWind sectors = new SectorWind(wind);
-    double carried = 0;
+    double shelter = SaltKernel.shelter(roughness, elevationM);
     double background = 0;
     for (int k = 0; k < SeaView.DIRECTIONS; k++) {
       double shoreKm = sea.shoreKm()[k];
       if (Double.isInfinite(shoreKm)) {
         continue;
       }
-      double reaching = sea.salinityRatio()[k] * SaltKernel.overCrest(crestAbovePlaceM[k]);
+      double reaching = sea.salinityRatio()[k] * SaltKernel.overCrest(crestAboveLowAirM[k]);
       double fetchKm = sea.fetchKm()[k];
-      double fine = SaltKernel.fineMg(shoreKm, fetchKm, rainMmPerYear);
-      carried += reaching * fine * fineShare(sectors, k * SECTOR_DEG) / FINE_UNIT;
-      double coarse = SaltKernel.coarseMg(shoreKm, fetchKm);
-      if (coarse > 1e-6) {
-        carried += reaching * coarse * coarseShare(sectors, k * SECTOR_DEG) / COARSE_UNIT;
-      }
+      coarseMg[k] = HALF_PLANE * shelter * reaching * SaltKernel.coarseMg(shoreKm, fetchKm);
+      fineMg[k] =
+          HALF_PLANE * shelter * reaching * SaltKernel.fineMg(shoreKm, fetchKm, rainMmPerYear);
       background += reaching * SaltKernel.backgroundMg(shoreKm, rainMmPerYear);
     }
-    return SaltKernel.CONTINENTAL_MG
-        + HALF_PLANE * shelter * carried
-        + HALF_PLANE / SeaView.DIRECTIONS * background;
+    steadyMg = SaltKernel.CONTINENTAL_MG + HALF_PLANE / SeaView.DIRECTIONS * background;
+  }
+
+  /** Median deposition of one month, mg/(m² d). */
+  public double monthMgPerM2Day(WindMonth wind) {
+    SectorWind sectors = new SectorWind(wind);
+    double carried = 0;
+    for (int k = 0; k < SeaView.DIRECTIONS; k++) {
+      if (fineMg[k] > 0) {
+        carried += fineMg[k] * fineShare(sectors, k * SECTOR_DEG) / FINE_UNIT;
+      }
+      if (coarseMg[k] > NEGLIGIBLE_MG) {
+        carried += coarseMg[k] * coarseShare(sectors, k * SECTOR_DEG) / COARSE_UNIT;
+      }
+    }
+    return steadyMg + carried;
   }
 
   /** Annual median with 10 % and 90 % from the spread of the estimate. */

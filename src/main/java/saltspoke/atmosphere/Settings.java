@@ -27,13 +27,21 @@ public final class Settings {
 
   private static final double TOWN_PEOPLE_5_KM = 8_000;
 
+  /**
+   * ASSUMPTION: a big city is one gazetteer point; within it, far from that point, people within 25
+   * km and bright nights (grey level, 0..255) together tell city and town.
+   */
+  private static final double CITY_PEOPLE_25_KM = 1_000_000;
+
+  private static final double CITY_LIGHT = 150;
+  private static final double TOWN_PEOPLE_25_KM = 150_000;
+  private static final double TOWN_LIGHT = 120;
+
   /** ASSUMPTION: people within 25 km below which, in the dark, a place is remote. */
   private static final double REMOTE_PEOPLE_25_KM = 3_000;
 
-  /** ASSUMPTION: grey levels of the night-light map that a dark and a city place have, 0..255. */
-  private static final double DARK_LIGHT = 30;
-
-  private static final double CITY_LIGHT = 200;
+  /** ASSUMPTION: grey level below which nights are dark; bare desert shows about 50. */
+  private static final double DARK_LIGHT = 55;
 
   private Settings() {}
 
@@ -59,14 +67,15 @@ public final class Settings {
    */
   public static Setting guess(Surroundings around) {
     double near = around.populationWithin5Km();
+    double wide = around.populationWithin25Km();
     double light = around.nightLight();
-    if (near >= CITY_PEOPLE_5_KM || (near >= TOWN_PEOPLE_5_KM && light >= CITY_LIGHT)) {
+    if (near >= CITY_PEOPLE_5_KM || (wide >= CITY_PEOPLE_25_KM && light >= CITY_LIGHT)) {
       return Setting.CITY;
     }
-    if (near >= TOWN_PEOPLE_5_KM) {
+    if (near >= TOWN_PEOPLE_5_KM || (wide >= TOWN_PEOPLE_25_KM && light >= TOWN_LIGHT)) {
       return Setting.TOWN;
     }
-    boolean remote = around.populationWithin25Km() < REMOTE_PEOPLE_25_KM && light < DARK_LIGHT;
+    boolean remote = wide < REMOTE_PEOPLE_25_KM && light < DARK_LIGHT;
     return remote ? Setting.REMOTE : Setting.RURAL;
   }
 

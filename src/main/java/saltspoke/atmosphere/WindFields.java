@@ -15,9 +15,6 @@ final class WindFields {
    */
   private static final double VECTOR_STRETCH = 1.3;
 
-  /** Least mean wind that the law of directions is asked for, m/s. */
-  private static final double CALMEST_M_PER_S = 0.5;
-
   private final FieldStack eastward;
   private final FieldStack northward;
 
@@ -32,7 +29,7 @@ final class WindFields {
   }
 
   WindMonth at(Place place, MonthClimate month) {
-    double speed = Math.max(CALMEST_M_PER_S, month.windMPerS());
+    double speed = SaltKernel.heldWind(month.windMPerS());
     int band = month.month() - 1;
     double u = eastward.sample(band, place.latitudeDeg(), place.longitudeDeg());
     double v = northward.sample(band, place.latitudeDeg(), place.longitudeDeg());

@@ -86,11 +86,18 @@ public final class Texts {
     StringBuilder text = new StringBuilder();
     while (matcher.find()) {
       Object value = note.args().get(matcher.group(1));
-      String filled = value == null ? matcher.group() : format(value);
+      String filled = value == null ? matcher.group() : fill(matcher.group(1), value);
       matcher.appendReplacement(text, Matcher.quoteReplacement(filled));
     }
     matcher.appendTail(text);
     return text.toString();
+  }
+
+  /** A value for a gap; the id of a part or choice gives way to its title on the page. */
+  private String fill(String gap, Object value) {
+    String title =
+        sentences.get(gap.equals("part") ? "page-" + value : "page-" + gap + "-" + value);
+    return value instanceof String && title != null ? title : format(value);
   }
 
   /** A number in few digits with this language's decimal sign; other values as they are. */

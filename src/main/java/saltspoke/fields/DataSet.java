@@ -4,11 +4,7 @@ import java.io.ByteArrayInputStream;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
-import java.net.URISyntaxException;
-import java.nio.file.Files;
 import java.nio.file.Path;
-import java.security.CodeSource;
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.concurrent.ConcurrentHashMap;
@@ -55,16 +51,7 @@ public final class DataSet {
    * @throws Refusal naming every missing or damaged file
    */
   public static DataSet shipped() {
-    String named = System.getProperty(FOLDER_PROPERTY);
-    if (named != null) {
-      return in(Path.of(named));
-    }
-    for (Path folder : candidates()) {
-      if (Files.isRegularFile(folder.resolve(Manifest.FILE_NAME))) {
-        return in(folder);
-      }
-    }
-    return new DataSet(DataHome.classPath(FOLDER_NAME));
+    return new DataSet(DataHome.shipped());
   }
 
   /**
@@ -74,23 +61,6 @@ public final class DataSet {
    */
   public static DataSet in(Path folder) {
     return new DataSet(DataHome.folder(folder));
-  }
-
-  private static List<Path> candidates() {
-    List<Path> folders = new ArrayList<>();
-    CodeSource code = DataSet.class.getProtectionDomain().getCodeSource();
-    if (code != null) {
-      try {
-        Path program = Path.of(code.getLocation().toURI());
-        if (Files.isRegularFile(program)) {
-          folders.add(program.resolveSibling(FOLDER_NAME));
-        }
-      } catch (URISyntaxException | IllegalArgumentException e) {
-        // A program that was not loaded from a file has no folder beside it.
-      }
-    }
-    folders.add(Path.of(FOLDER_NAME));
-    return folders;
   }
 
   /** Where the files lie, for people. */

@@ -9,8 +9,10 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
 import java.util.TreeSet;
+import java.util.function.Supplier;
 import java.util.stream.Stream;
 import saltspoke.sources.LayerBuilder;
 import saltspoke.sources.SourcePackage;
@@ -25,20 +27,25 @@ import saltspoke.values.Refusal;
 public final class DefaultIngest {
   private final List<LayerBuilder> builders;
   private final List<SourcePackage> declared;
+  private final Supplier<DataHome> tablesForNewFolder;
 
   /** An ingest of the declared packages with these builders, in this order. */
   public DefaultIngest(List<LayerBuilder> builders) {
-    this(builders, SourcePackage.declared());
+    this(builders, SourcePackage.declared(), DataHome::shipped);
   }
 
-  DefaultIngest(List<LayerBuilder> builders, List<SourcePackage> declared) {
+  DefaultIngest(
+      List<LayerBuilder> builders,
+      List<SourcePackage> declared,
+      Supplier<DataHome> tablesForNewFolder) {
     this.builders = List.copyOf(builders);
     this.declared = List.copyOf(declared);
+    this.tablesForNewFolder = tablesForNewFolder;
   }
 
   /**
    * Builds the folder. Tables kept by hand, and files that the old folder's manifest does not know,
-   * are taken over from the old folder.
+   * are taken over from the old folder; a new folder gets the tables of the shipped world.
    *
    * @param sourcesFolder packages as the registries serve them
    * @param target the data folder to write or replace
@@ -77,7 +84,7 @@ public final class DefaultIngest {
             ? Manifest.read(Files.readAllBytes(file))
             : new Manifest(List.of(), List.of(), List.of());
     List<Manifest.Entry> files = new ArrayList<>(old.files());
-    files.removeIf(f -> f.path().startsWith(HandTables.FOLDER + "/"));
+    files.removeIf(f -> HandTables.owns(f.path()));
     files.addAll(HandTables.entries(dataFolder));
     return write(dataFolder, new Manifest(old.sources(), sorted(files), old.notes()));
   }
@@ -137,7 +144,7 @@ public final class DefaultIngest {
       files.addAll(sink.entries(view.used()));
       used.addAll(view.used());
     }
-    copyTables(old, aside);
+    takeTables(old, aside);
     files.addAll(HandTables.entries(aside));
     progress.report(builders.size(), builders.size(), Manifest.FILE_NAME);
     List<Manifest.Source> sources = new ArrayList<>();
@@ -178,9 +185,23 @@ public final class DefaultIngest {
     }
   }
 
-  private static void copyTables(Path old, Path aside) throws IOException {
-    if (Files.isDirectory(old.resolve(HandTables.FOLDER))) {
-      copyMissing(old.resolve(HandTables.FOLDER), aside.resolve(HandTables.FOLDER), Set.of());
+  private void takeTables(Path old, Path aside) throws IOException {
+    Path tables = old.resolve(HandTables.FOLDER);
+    if (Files.isDirectory(tables)) {
+      copyMissing(tables, aside.resolve(HandTables.FOLDER), Set.of());
+      return;
+    }
+    DataHome home = tablesForNewFolder.get();
+    Optional<byte[]> manifest = home.find(Manifest.FILE_NAME);
+    if (manifest.isPresent()) {
+      for (Manifest.Entry entry : Manifest.read(manifest.get()).files()) {
+        Optional<byte[]> table =
+            HandTables.owns(entry.path()) ? home.find(entry.path()) : Optional.empty();
+        if (table.isPresent()) {
+          Files.createDirectories(aside.resolve(HandTables.FOLDER));
+          Files.write(aside.resolve(entry.path()), table.get());
+        }
+      }
     }
   }
 

@@ -23,6 +23,11 @@ final class HandTables {
 
   private HandTables() {}
 
+  /** Whether a path in a data folder belongs to a table kept by hand. */
+  static boolean owns(String path) {
+    return path.startsWith(FOLDER + "/");
+  }
+
   /** Manifest rows of all tables in a data folder, by name. */
   static List<Manifest.Entry> entries(Path dataFolder) throws IOException {
     Path tables = dataFolder.resolve(FOLDER);

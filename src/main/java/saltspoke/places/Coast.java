@@ -37,7 +37,7 @@ final class Coast {
   private final DataSet data;
   private final Map<Integer, Map<Integer, CoastBin>> fineTiles = new ConcurrentHashMap<>();
   private final ClosedSeas closedSeas = new ClosedSeas();
-  private Map<Integer, CoastBin> coarse;
+  private List<CoastBin> coarse;
 
   Coast(DataSet data) {
     this.data = data;
@@ -54,15 +54,15 @@ final class Coast {
   Shore nearest(double latitudeDeg, double longitudeDeg) {
     Vantage from = new Vantage(latitudeDeg, longitudeDeg);
     NearestShore search = new NearestShore(from);
-    search.offerNearestFirst(coarse().values());
+    search.offer(coarse());
     if (search.bestM() < FINE_M + COARSE_ERROR_M) {
       double reach = search.bestM() + COARSE_ERROR_M;
       NearestShore fine = new NearestShore(from);
-      fine.offerNearestFirst(fineBins(latitudeDeg, longitudeDeg, reach));
+      fine.offer(fineBins(latitudeDeg, longitudeDeg, reach));
       search = fine;
     } else {
       NearestShore fine = new NearestShore(from);
-      fine.offerNearestFirst(fineBins(search.latitudeDeg(), search.longitudeDeg(), COARSE_ERROR_M));
+      fine.offer(fineBins(search.latitudeDeg(), search.longitudeDeg(), COARSE_ERROR_M));
       if (fine.bestM() < search.bestM() + COARSE_ERROR_M) {
         search = fine;
       }
@@ -116,7 +116,7 @@ final class Coast {
     }
     double horizonM = SeaRays.SHORE_LIMIT_M + SeaRays.FETCH_LIMIT_M;
     double chord = Vantage.chordOfArcM(horizonM);
-    for (CoastBin bin : coarse().values()) {
+    for (CoastBin bin : coarse()) {
       if (bin.leastM(from) < chord) {
         rays.add(bin.shape(), fineM, horizonM);
       }
@@ -139,14 +139,16 @@ final class Coast {
     return closedSeas.ratioAt(Math.toDegrees(Math.asin(sin)), wrapped);
   }
 
-  private synchronized Map<Integer, CoastBin> coarse() {
+  private synchronized List<CoastBin> coarse() {
     if (coarse == null) {
-      Map<Integer, CoastBin> bins = new HashMap<>();
+      List<CoastBin> bins = new ArrayList<>();
       new TiledTable(data, "coast-coarse")
           .all(
               line -> {
-                CoastBin bin = CoastBin.parse(line);
-                bins.put(bin.key(), bin);
+                // A row without a fraction is a whole bin of land and has no coast.
+                if (line.indexOf('.') >= 0) {
+                  bins.add(CoastBin.parse(line));
+                }
               });
       coarse = bins;
     }

@@ -1,14 +1,9 @@
 package saltspoke.places;
 
-import java.util.ArrayList;
-import java.util.Collection;
-import java.util.Comparator;
 import java.util.List;
 
 /** Finds the point of the coast that is nearest to a place, by straight lines through the earth. */
 final class NearestShore {
-  private record Candidate(CoastBin bin, double leastM) {}
-
   private final Vantage from;
   private double bestM = Double.POSITIVE_INFINITY;
   private double latitudeDeg = Double.NaN;
@@ -30,18 +25,23 @@ final class NearestShore {
     return longitudeDeg;
   }
 
-  /** Searches bins from the nearest outwards, until the rest cannot hold a nearer point. */
-  void offerNearestFirst(Collection<CoastBin> bins) {
-    List<Candidate> candidates = new ArrayList<>();
-    for (CoastBin bin : bins) {
-      candidates.add(new Candidate(bin, bin.leastM(from)));
-    }
-    candidates.sort(Comparator.comparingDouble(Candidate::leastM));
-    for (Candidate candidate : candidates) {
-      if (candidate.leastM >= bestM) {
-        return;
+  /** Searches the bin that may hold the nearest coast, then those that may still hold a nearer. */
+  void offer(List<CoastBin> bins) {
+    double[] leastM = new double[bins.size()];
+    int nearest = -1;
+    for (int b = 0; b < leastM.length; b++) {
+      leastM[b] = bins.get(b).leastM(from);
+      if (nearest < 0 || leastM[b] < leastM[nearest]) {
+        nearest = b;
       }
-      offer(candidate.bin.shape());
+    }
+    if (nearest >= 0) {
+      offer(bins.get(nearest).shape());
+    }
+    for (int b = 0; b < leastM.length; b++) {
+      if (b != nearest && leastM[b] < bestM) {
+        offer(bins.get(b).shape());
+      }
     }
   }
 

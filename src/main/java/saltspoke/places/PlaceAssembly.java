@@ -3,6 +3,7 @@ package saltspoke.places;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import net.sf.geographiclib.Geodesic;
@@ -23,8 +24,16 @@ final class PlaceAssembly {
    */
   private static final double TOWN_ELEVATION_REACH_KM = 3;
 
+  /** Looked at first, so that a cold question rarely unpacks a second tile of towns, km. */
+  private static final double FIRST_REACH_KM = 25;
+
   /** A point moved to the shore is set this far inland, km, so that it lies on land. */
   private static final double INLAND_KM = 0.03;
+
+  /** Reaches of the two counts of people in {@link Surroundings}, km. */
+  private static final double NARROW_KM = 5;
+
+  private static final double WIDE_KM = 25;
 
   private final DataSet data;
   private final Gazetteer gazetteer;
@@ -67,16 +76,23 @@ final class PlaceAssembly {
     Point point = new Point(latitudeDeg, longitudeDeg);
     if (!coast.isLand(latitudeDeg, longitudeDeg)) {
       Coast.Shore shore = coast.nearest(latitudeDeg, longitudeDeg);
-      if (shore.distanceKm() > PlaceDirectory.SHORE_REACH_KM) {
+      if (shore.distanceKm() <= PlaceDirectory.SHORE_REACH_KM) {
+        point = movedTo(shore, flags);
+      } else if (nearestTown(point, PlaceDirectory.SHORE_REACH_KM).isPresent()) {
+        flags.add(Note.of("place-missing-from-coast", "distanceKm", shore.distanceKm()));
+      } else {
         throw new Refusal(
             Refusal.Kind.OUT_OF_RANGE,
             "at-sea",
             "at",
             String.format(
-                "%s,%s, %.1f km from land", latitudeDeg, longitudeDeg, shore.distanceKm()),
+                Locale.ROOT,
+                "%s,%s, %.1f km from land",
+                latitudeDeg,
+                longitudeDeg,
+                shore.distanceKm()),
             "a point on land, or at most 2 km off the shore");
       }
-      point = movedTo(shore, flags);
     }
     Named named =
         nearestTown(point, NAMING_REACH_KM)
@@ -142,9 +158,9 @@ final class PlaceAssembly {
   private Surroundings surroundings(Point point) {
     double within5 = 0;
     double within25 = 0;
-    for (Gazetteer.Town town : gazetteer.near(point.latitudeDeg, point.longitudeDeg, 25)) {
+    for (Gazetteer.Town town : gazetteer.near(point.latitudeDeg, point.longitudeDeg, WIDE_KM)) {
       within25 += town.population();
-      if (Gazetteer.distanceKm(town, point.latitudeDeg, point.longitudeDeg) <= 5) {
+      if (Gazetteer.distanceKm(town, point.latitudeDeg, point.longitudeDeg) <= NARROW_KM) {
         within5 += town.population();
       }
     }
@@ -153,7 +169,12 @@ final class PlaceAssembly {
   }
 
   private Optional<Gazetteer.Town> nearestTown(Point point, double reachKm) {
-    return gazetteer.near(point.latitudeDeg, point.longitudeDeg, reachKm).stream()
+    List<Gazetteer.Town> towns =
+        gazetteer.near(point.latitudeDeg, point.longitudeDeg, Math.min(reachKm, FIRST_REACH_KM));
+    if (towns.isEmpty() && reachKm > FIRST_REACH_KM) {
+      towns = gazetteer.near(point.latitudeDeg, point.longitudeDeg, reachKm);
+    }
+    return towns.stream()
         .min(
             Comparator.comparingDouble(
                 t -> Gazetteer.distanceKm(t, point.latitudeDeg, point.longitudeDeg)));

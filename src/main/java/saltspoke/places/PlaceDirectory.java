@@ -146,22 +146,18 @@ public final class PlaceDirectory {
             .map(gazetteer::hit)
             .filter(h -> h.name().equalsIgnoreCase(chosen.name()) && h.lat() != chosen.lat())
             .limit(3)
-            .map(
-                h ->
-                    h.name()
-                        + ", "
-                        + (h.regionName().isEmpty() ? "" : h.regionName() + ", ")
-                        + h.countryName())
+            .map(PlaceDirectory::inFull)
             .toList();
     return others.isEmpty()
         ? Optional.empty()
         : Optional.of(
             Note.of(
-                "place-namesakes",
-                "chosen",
-                chosen.name() + ", " + chosen.regionName() + ", " + chosen.countryName(),
-                "others",
-                String.join("; ", others)));
+                "place-namesakes", "chosen", inFull(chosen), "others", String.join("; ", others)));
+  }
+
+  private static String inFull(PlaceHit hit) {
+    String region = hit.regionName().isEmpty() ? "" : hit.regionName() + ", ";
+    return hit.name() + ", " + region + hit.countryName();
   }
 
   private static String checked(String query, String field) {

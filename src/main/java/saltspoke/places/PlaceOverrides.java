@@ -1,5 +1,6 @@
 package saltspoke.places;
 
+import java.util.Locale;
 import java.util.OptionalDouble;
 import saltspoke.values.Refusal;
 
@@ -21,7 +22,7 @@ public record PlaceOverrides(OptionalDouble elevationM, OptionalDouble seaDistan
   private static void check(String field, OptionalDouble given, double least, double most) {
     if (given.isPresent() && !(given.getAsDouble() >= least && given.getAsDouble() <= most)) {
       throw Refusal.outOfRange(
-          field, given.getAsDouble(), String.format("%.0f..%.0f", least, most));
+          field, given.getAsDouble(), String.format(Locale.ROOT, "%.0f..%.0f", least, most));
     }
   }
 }

@@ -84,7 +84,10 @@ final class PostalFile {
       // Falls through to the refusal below, which says where and what.
     }
     throw Refusal.wrongUse(
-        "not-a-" + name, where + " " + name, text, String.format("-%.0f..%.0f", limit, limit));
+        "not-a-" + name,
+        where + " " + name,
+        text,
+        String.format(Locale.ROOT, "-%.0f..%.0f", limit, limit));
   }
 
   private static PostalPoint median(List<Row> places) {

@@ -48,10 +48,23 @@ final class SeaRays {
   void add(CoastBin.Shape shape, double fromM, double toM) {
     double chordLimit = Vantage.chordOfArcM(toM);
     for (int c = 0; c < shape.chunks(); c++) {
-      if (shape.leastM(c, from) < chordLimit) {
+      if (shape.leastM(c, from) < chordLimit && touchesRay(shape, c)) {
         add(shape, shape.chunk[2 * c], shape.chunk[2 * c + 1], fromM, toM);
       }
     }
+  }
+
+  /** Whether a chunk's sphere reaches a ray, or lies wholly between two. */
+  private boolean touchesRay(CoastBin.Shape shape, int c) {
+    double x = shape.sphere[4 * c];
+    double y = shape.sphere[4 * c + 1];
+    double e = from.east(x, y);
+    double n = from.north(x, y, shape.sphere[4 * c + 2]);
+    double radius = shape.sphere[4 * c + 3];
+    int left = sector(e, n);
+    int right = left == SeaView.DIRECTIONS - 1 ? 0 : left + 1;
+    return Math.abs(e * COS[left] - n * SIN[left]) <= radius
+        || Math.abs(e * COS[right] - n * SIN[right]) <= radius;
   }
 
   private void add(CoastBin.Shape shape, int first, int last, double fromM, double toM) {

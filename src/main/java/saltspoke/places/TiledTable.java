@@ -1,6 +1,7 @@
 package saltspoke.places;
 
 import java.io.BufferedReader;
+import java.io.ByteArrayInputStream;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.InputStreamReader;
@@ -27,6 +28,7 @@ final class TiledTable {
   private final DataSet data;
   private final String layerId;
   private Map<Integer, Member> index;
+  private byte[] stored;
 
   TiledTable(DataSet data, String layerId) {
     this.data = data;
@@ -46,10 +48,10 @@ final class TiledTable {
     if (member == null) {
       return;
     }
-    try (InputStream in = data.openStored(layerId)) {
-      in.skipNBytes(member.offset());
-      byte[] packed = in.readNBytes(member.length());
-      lines(new GZIPInputStream(new java.io.ByteArrayInputStream(packed)), line);
+    try {
+      InputStream packed =
+          new ByteArrayInputStream(stored(), Math.toIntExact(member.offset()), member.length());
+      lines(new GZIPInputStream(packed), line);
     } catch (IOException e) {
       throw damaged(e);
     }
@@ -79,6 +81,15 @@ final class TiledTable {
         line.accept(text);
       }
     }
+  }
+
+  private synchronized byte[] stored() throws IOException {
+    if (stored == null) {
+      try (InputStream in = data.openStored(layerId)) {
+        stored = in.readAllBytes();
+      }
+    }
+    return stored;
   }
 
   private synchronized Map<Integer, Member> index() {

@@ -11,6 +11,7 @@ import org.locationtech.jts.geom.LinearRing;
 import org.locationtech.jts.geom.Polygon;
 import org.locationtech.jts.io.ParseException;
 import org.locationtech.jts.io.WKTReader;
+import org.locationtech.jts.operation.union.UnaryUnionOp;
 import saltspoke.values.Refusal;
 
 /** Adds lakes behind dams, which the shoreline source draws as sea, to the land of a bin. */
@@ -57,16 +58,16 @@ final class FreshWaters {
   }
 
   private static Geometry polygons(List<double[]> rings) {
-    Geometry all = FACTORY.createPolygon();
+    List<Geometry> all = new ArrayList<>();
     for (double[] ring : rings) {
       Coordinate[] points = new Coordinate[ring.length / 2];
       for (int i = 0; i < points.length; i++) {
         points[i] = new Coordinate(ring[2 * i], ring[2 * i + 1]);
       }
       // A buffer of nothing heals rings that touch themselves.
-      all = all.union(FACTORY.createPolygon(points).buffer(0));
+      all.add(FACTORY.createPolygon(points).buffer(0));
     }
-    return all;
+    return UnaryUnionOp.union(all, FACTORY);
   }
 
   private static List<double[]> rings(Geometry land) {

@@ -47,6 +47,10 @@ public record GeoTiffRaster(
   private static final int GEO_KEYS = 34735;
   private static final int RASTER_TYPE_KEY = 1025;
   private static final int PIXEL_IS_POINT = 2;
+
+  /** Deflate packs at most 1032 to 1 (zlib technical details); more is a damaged header. */
+  private static final long DEFLATE_LIMIT = 1040;
+
   private static final int[] SIZE_OF_TYPE = {0, 1, 1, 2, 4, 8, 1, 1, 2, 4, 8, 4, 8};
 
   /**
@@ -60,7 +64,8 @@ public record GeoTiffRaster(
       return new Reader(file).read();
     } catch (BufferUnderflowException
         | IllegalArgumentException
-        | ArrayIndexOutOfBoundsException
+        | IndexOutOfBoundsException
+        | ArithmeticException
         | DataFormatException e) {
       throw Refusal.dataDamaged(
           "not-a-geotiff",
@@ -85,7 +90,12 @@ public record GeoTiffRaster(
       int columns = (int) first(COLUMNS, 0);
       int rows = (int) first(ROWS, 0);
       int samples = (int) first(SAMPLES, 1);
-      if (rows < 1 || columns < 1 || samples < 1 || first(PREDICTOR, 1) != 1) {
+      double bytes = (double) rows * columns * samples * first(BITS, 1) / 8;
+      if (rows < 1
+          || columns < 1
+          || samples < 1
+          || bytes > (double) file.length * DEFLATE_LIMIT
+          || first(PREDICTOR, 1) != 1) {
         throw new IllegalArgumentException("size or predictor");
       }
       float[][] bands = new float[samples][Math.multiplyExact(rows, columns)];
@@ -115,7 +125,7 @@ public record GeoTiffRaster(
       }
       double[] scale = tags.get(PIXEL_SCALE);
       double[] tie = tags.get(TIE_POINT);
-      if (scale == null || tie == null || tie.length != 6) {
+      if (scale == null || tie == null || tie.length != 6 || !(scale[0] > 0) || !(scale[1] > 0)) {
         throw new IllegalArgumentException("no georeference");
       }
       return new double[] {
@@ -149,7 +159,7 @@ public record GeoTiffRaster(
         int type = in.getShort();
         int count = in.getInt();
         int next = in.position() + 4;
-        if (type < SIZE_OF_TYPE.length && count > 0 && type != 2 && type != 7) {
+        if (type > 0 && type < SIZE_OF_TYPE.length && count > 0 && type != 2 && type != 7) {
           if ((long) count * SIZE_OF_TYPE[type] > 4) {
             in.position(in.getInt());
           }
@@ -188,12 +198,15 @@ public record GeoTiffRaster(
         throws DataFormatException {
       int bits = (int) first(BITS, 1);
       int format = (int) first(SAMPLE_FORMAT, 1);
-      int rowsPerStrip = (int) Math.min(rows, first(ROWS_PER_STRIP, rows));
+      int rowsPerStrip = (int) Math.max(1, Math.min(rows, first(ROWS_PER_STRIP, rows)));
       int stripsPerPlane = (rows + rowsPerStrip - 1) / rowsPerStrip;
       double[] offsets = tags.get(STRIP_OFFSETS);
       double[] lengths = tags.get(STRIP_BYTES);
       int perPixel = planes ? 1 : bands.length;
-      if (offsets == null || offsets.length != stripsPerPlane * (planes ? bands.length : 1)) {
+      if (offsets == null
+          || lengths == null
+          || lengths.length != offsets.length
+          || offsets.length != stripsPerPlane * (planes ? bands.length : 1)) {
         throw new IllegalArgumentException("strips missing");
       }
       for (int strip = 0; strip < offsets.length; strip++) {
@@ -201,12 +214,23 @@ public record GeoTiffRaster(
         int pixels = Math.min(rowsPerStrip, rows - firstRow) * columns;
         ByteBuffer data =
             unpack((int) offsets[strip], (int) lengths[strip], pixels * perPixel * (bits / 8));
-        int plane = planes ? strip / stripsPerPlane : 0;
-        for (int i = 0; i < pixels; i++) {
+        float[] samples = numbers(data, pixels * perPixel, bits, format);
+        int start = firstRow * columns;
+        if (perPixel == 1) {
+          System.arraycopy(samples, 0, bands[strip / stripsPerPlane], start, pixels);
+        } else {
           for (int b = 0; b < perPixel; b++) {
-            bands[plane + b][firstRow * columns + i] = sample(data, bits, format);
+            pick(samples, b, perPixel, bands[b], start, pixels);
           }
         }
+      }
+    }
+
+    /** Every {@code step}-th sample from {@code first} on. */
+    private static void pick(
+        float[] samples, int first, int step, float[] band, int start, int count) {
+      for (int i = 0, from = first; i < count; i++, from += step) {
+        band[start + i] = samples[from];
       }
     }
 
@@ -236,17 +260,26 @@ public record GeoTiffRaster(
       return ByteBuffer.wrap(plain).order(in.order());
     }
 
-    private static float sample(ByteBuffer data, int bits, int format) {
+    private static float[] numbers(ByteBuffer data, int count, int bits, int format) {
+      float[] numbers = new float[count];
       if (bits == 32 && format == 3) {
-        return data.getFloat();
+        data.asFloatBuffer().get(numbers);
+      } else if (bits == 16 && format != 3) {
+        short[] words = new short[count];
+        data.asShortBuffer().get(words);
+        int mask = format == 2 ? -1 : 0xFFFF;
+        for (int i = 0; i < count; i++) {
+          numbers[i] = words[i] & mask;
+        }
+      } else if (bits == 8 && format == 1) {
+        byte[] octets = data.array();
+        for (int i = 0; i < count; i++) {
+          numbers[i] = octets[i] & 0xFF;
+        }
+      } else {
+        throw new IllegalArgumentException(bits + " bits, sample format " + format);
       }
-      if (bits == 16 && format != 3) {
-        return format == 2 ? data.getShort() : Short.toUnsignedInt(data.getShort());
-      }
-      if (bits == 8 && format == 1) {
-        return Byte.toUnsignedInt(data.get());
-      }
-      throw new IllegalArgumentException(bits + " bits, sample format " + format);
+      return numbers;
     }
   }
 }

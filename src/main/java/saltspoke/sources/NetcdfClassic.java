@@ -78,7 +78,7 @@ public final class NetcdfClassic {
       }
       globalAttributes = attributes();
       readVariables();
-    } catch (BufferUnderflowException | IllegalArgumentException e) {
+    } catch (BufferUnderflowException | IllegalArgumentException | IndexOutOfBoundsException e) {
       throw refuse("a header that breaks off", "a complete netCDF classic file");
     }
   }
@@ -110,29 +110,38 @@ public final class NetcdfClassic {
     if (variable.type() == CHAR) {
       throw refuse(name + " is text", "a numeric variable");
     }
-    int total =
-        variable.dimensions().stream().mapToInt(Dimension::length).reduce(1, Math::multiplyExact);
-    boolean byRecord = isRecord(variable);
-    int perRecord = byRecord ? total / Math.max(1, variable.dimensions().get(0).length()) : total;
-    double[] values = new double[total];
+    double[] values;
     try {
-      for (int i = 0; i < total; i += Math.max(1, perRecord)) {
-        long start = variable.begin() + (byRecord ? (long) (i / perRecord) * recordSize : 0);
-        in.position(Math.toIntExact(start));
-        for (int k = i; k < i + perRecord; k++) {
-          values[k] = number(variable.type());
-        }
-      }
+      values = readValues(variable);
     } catch (BufferUnderflowException | IllegalArgumentException | ArithmeticException e) {
-      throw refuse(name + " breaks off", total + " values");
+      throw refuse(name + " breaks off", "all its values");
     }
     for (String key : List.of("missing_value", "_FillValue")) {
       if (variable.attributes().get(key) instanceof double[] missing && missing.length > 0) {
-        for (int i = 0; i < total; i++) {
+        for (int i = 0; i < values.length; i++) {
           if (values[i] == missing[0]) {
             values[i] = Double.NaN;
           }
         }
+      }
+    }
+    return values;
+  }
+
+  private double[] readValues(Variable variable) {
+    int total =
+        variable.dimensions().stream().mapToInt(Dimension::length).reduce(1, Math::multiplyExact);
+    if (total < 0 || total > in.limit()) {
+      throw new IllegalArgumentException("more values than bytes");
+    }
+    boolean byRecord = isRecord(variable);
+    int records = byRecord ? variable.dimensions().get(0).length() : 1;
+    double[] values = new double[total];
+    for (int record = 0; record < records; record++) {
+      in.position(Math.toIntExact(variable.begin() + record * recordSize));
+      int perRecord = total / records;
+      for (int k = record * perRecord; k < (record + 1) * perRecord; k++) {
+        values[k] = number(variable.type());
       }
     }
     return values;
@@ -194,6 +203,9 @@ public final class NetcdfClassic {
       if (type == CHAR) {
         attributes.put(name, text(length));
       } else {
+        if (length < 0 || length > in.remaining()) {
+          throw new IllegalArgumentException("length " + length);
+        }
         double[] values = new double[length];
         for (int k = 0; k < length; k++) {
           values[k] = number(type);

@@ -2,6 +2,7 @@ package saltspoke.sources;
 
 import java.io.ByteArrayInputStream;
 import java.io.DataInputStream;
+import java.io.EOFException;
 import java.io.IOException;
 import java.io.InputStream;
 import java.nio.ByteBuffer;
@@ -47,8 +48,21 @@ public record NumpyArray(int[] shape, double[] values) {
     throw refuse(name, "no .npy member", "a ZIP archive of NumPy arrays");
   }
 
-  /** Reads one array. */
+  /**
+   * Reads one array.
+   *
+   * @param name file name for messages
+   * @throws Refusal when the bytes are no array of this kind
+   */
   public static NumpyArray fromNpy(InputStream in, String name) throws IOException {
+    try {
+      return parse(in, name);
+    } catch (EOFException | IllegalArgumentException | ArithmeticException e) {
+      throw refuse(name, String.valueOf(e.getMessage()), "a complete NumPy array");
+    }
+  }
+
+  private static NumpyArray parse(InputStream in, String name) throws IOException {
     DataInputStream data = new DataInputStream(in);
     byte[] magic = data.readNBytes(MAGIC.length);
     if (!Arrays.equals(magic, MAGIC)) {
@@ -86,6 +100,17 @@ public record NumpyArray(int[] shape, double[] values) {
       values[i] = width == 4 ? buffer.getFloat() : buffer.getDouble();
     }
     return new NumpyArray(shape, values);
+  }
+
+  /** Values of a matrix without the outermost rows and columns. */
+  public double[] inner(int margin) {
+    int rows = shape[0] - 2 * margin;
+    int columns = shape[1] - 2 * margin;
+    double[] inner = new double[rows * columns];
+    for (int row = 0; row < rows; row++) {
+      System.arraycopy(values, (row + margin) * shape[1] + margin, inner, row * columns, columns);
+    }
+    return inner;
   }
 
   private static Refusal refuse(String name, String was, String expected) {

@@ -10,7 +10,6 @@ import java.util.Locale;
 import java.util.function.Predicate;
 import java.util.zip.GZIPInputStream;
 import java.util.zip.ZipEntry;
-import java.util.zip.ZipException;
 import java.util.zip.ZipFile;
 import org.apache.commons.compress.archivers.ar.ArArchiveEntry;
 import org.apache.commons.compress.archivers.ar.ArArchiveInputStream;
@@ -43,7 +42,7 @@ final class PackageArchive {
       } else {
         throw Refusal.wrongUse("unknown-archive", "file", file, ".tgz, .tar.gz, .deb, .whl, .jar");
       }
-    } catch (ZipException | java.io.EOFException e) {
+    } catch (IOException e) {
       throw damaged(file, e);
     }
   }

@@ -41,7 +41,7 @@ final class PostcodeTable {
             text.append(
                 String.format(
                     Locale.ROOT,
-                    "%s,%s,%s,%.3f,%.3f,%s%n",
+                    "%s,%s,%s,%.3f,%.3f,%s\n",
                     code,
                     GazetteerBuilder.cell(r.name),
                     GazetteerBuilder.cell(r.region),
@@ -49,7 +49,7 @@ final class PostcodeTable {
                     r.lon,
                     r.approximate ? "yes" : "no")));
     try (OutputStream stream = out.file(file)) {
-      stream.write(text.toString().replace("\r\n", "\n").getBytes(StandardCharsets.UTF_8));
+      stream.write(text.toString().getBytes(StandardCharsets.UTF_8));
     }
   }
 

@@ -35,7 +35,8 @@ public enum Registry {
     @Override
     Pattern filePattern(String name) {
       return Pattern.compile(
-          Pattern.quote(name).replace("-", "\\E[-_]\\Q")
+          // PEP 503 and PEP 427: a hyphen in a name may be written as an underscore.
+          Pattern.quote(name.replace('-', '_')).replace("_", "\\E[-_]\\Q")
               + "-(\\d[^-/]*?)(?:-[^/]*\\.whl|\\.tar\\.gz)",
           Pattern.CASE_INSENSITIVE);
     }

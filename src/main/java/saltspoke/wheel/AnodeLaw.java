@@ -18,8 +18,8 @@ final class AnodeLaw implements Polarisation {
   private final double hydrogenScale;
   private final double hydrogenPerVolt;
 
-  AnodeLaw(Kinetics kinetics, Film film) {
-    double warm = Kinetics.temperatureFactor(film.temperatureC());
+  AnodeLaw(Kinetics kinetics, FilmFactors film) {
+    double warm = film.warmth();
     passive = warm * kinetics.passiveUAPerCm2();
     pitPerVolt = LN10 / kinetics.pitSlopeV();
     pitScale =
@@ -29,8 +29,8 @@ final class AnodeLaw implements Polarisation {
     activePerVolt = kinetics.active().perVolt();
     activeScale = warm * kinetics.active().at(0);
     oxygenPerVolt = kinetics.oxygen().perVolt();
-    oxygenScale = Kinetics.oxygenFactor(film) * kinetics.oxygen().at(0);
-    perOxygenLimit = 1 / ThinFilm.oxygenLimitUAPerCm2(film);
+    oxygenScale = film.oxygen() * kinetics.oxygen().at(0);
+    perOxygenLimit = 1 / film.oxygenLimitUAPerCm2();
     hydrogenPerVolt = kinetics.hydrogen().perVolt();
     hydrogenScale = warm * kinetics.hydrogen().at(0);
   }

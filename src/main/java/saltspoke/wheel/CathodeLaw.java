@@ -5,8 +5,8 @@ package saltspoke.wheel;
  * with potential and passes through 0 where the material rests.
  *
  * <p>All of it, its own anodic branch included, is divided by the factor of oxygen's kinetics in
- * the film ({@link Kinetics#oxygenFactor}); what is left depends on the film only through the
- * oxygen limit over that factor. So one table serves every film ({@link StripTable}). The pitting
+ * the film ({@link FilmFactors#oxygen}); what is left depends on the film only through the oxygen
+ * limit over that factor. So one table serves every film ({@link StripTable}). The pitting
  * potential of the cathode is that at 1 mol/kg: a cathode is far below it.
  */
 final class CathodeLaw implements Polarisation {

@@ -6,8 +6,8 @@ package saltspoke.wheel;
  * <p>Only the strip of film over the cathode is interpolated ({@link StripTable}); the anode's
  * kinetics, the ring and the metallic contact are solved at each question, by a safeguarded Newton
  * iteration for one potential. So ring width, chloride and temperature carry no interpolation
- * error. Against {@link GalvanicCell#solve} penetration differs by under 2 % (tested over random
- * films and cells).
+ * error. Against {@link GalvanicCell#solve} penetration differs by under 4 %, 95 times of 100 by
+ * under 1 % (tested over random films and cells).
  *
  * <p>Uncertain inputs enter as dimensionless scales. {@code cathodeScale} multiplies the cathode's
  * current density everywhere; dividing the film's equations by it shows that it acts as a cathode
@@ -19,8 +19,11 @@ package saltspoke.wheel;
 public final class CellTable {
   private static final int MOST_STEPS = 80;
 
-  /** Newton's error falls as the square of its step: after one of 0.2 mV it is below 1 µV. */
-  private static final double LAST_STEP_V = 2e-4;
+  /**
+   * Dissolution and demand agree within this before the last step; its error falls as the square,
+   * to about 1e-6.
+   */
+  private static final double LAST_LN_RATIO = 1e-3;
 
   private static final double LOWEST_V = -1.6;
   private static final double HIGHEST_V = 1.0;
@@ -58,108 +61,85 @@ public final class CellTable {
 
   /** All currents of the cell, as {@link GalvanicCell#solve} gives them. */
   public CellCurrents currents(Film film, double ringWidthMm, double cathodeScale) {
-    return in(film).currents(ringWidthMm, cathodeScale);
+    if (!(film.thicknessUm() > 0) || spec.anode() == Material.POLYMER) {
+      return GalvanicCell.NOTHING;
+    }
+    return new Question(film, ringWidthMm, cathodeScale).answer();
   }
 
-  /** The cell in one film, for many widths and strengths. */
-  InFilm in(Film film) {
-    return new InFilm(film);
-  }
-
-  /** Holds what depends on the film alone. Not for more than one thread. */
-  final class InFilm {
+  /** One film, width and strength. */
+  private final class Question {
     private final Film film;
-    private final boolean dry;
+    private final double ringCm2;
+    private final double ohm = 1e-6 * spec.contactResistanceOhm();
     private final AnodeLaw anode;
     private final CathodeLaw cathode;
-    private final double oxygenFactor;
-    private final double limitUAPerCm2;
-    private final double sheetMicroS;
+    private final double cathodeFactor;
+    private final StripTable.Place place;
     private final double[] anodeOut = new double[2];
     private final double[] cathodeOut = new double[2];
     private final double[] areaOut = new double[2];
-    private double startV;
-    private double lnLoad;
-    private double voltsPerLnLoad;
 
-    private InFilm(Film film) {
+    private Question(Film film, double ringWidthMm, double cathodeScale) {
       this.film = film;
-      dry = !(film.thicknessUm() > 0) || spec.anode() == Material.POLYMER;
-      oxygenFactor = Kinetics.oxygenFactor(film);
-      limitUAPerCm2 = dry ? 0 : ThinFilm.oxygenLimitUAPerCm2(film) / oxygenFactor;
-      sheetMicroS = ThinFilm.sheetMicroS(film) / (oxygenFactor * skirtFactor);
-      anode = dry ? null : new AnodeLaw(anodeKinetics, film);
-      cathode = dry || strip == null ? null : new CathodeLaw(cathodeKinetics, limitUAPerCm2);
-      startV = dry ? 0 : anodeKinetics.startV(film);
+      ringCm2 = spec.ringCircumferenceMm() * ringWidthMm / 100;
+      FilmFactors factors = FilmFactors.of(film);
+      anode = new AnodeLaw(anodeKinetics, factors);
+      cathodeFactor = factors.oxygen() * skirtFactor * cathodeScale;
+      double limit = factors.scaledLimitUAPerCm2();
+      cathode = strip == null ? null : new CathodeLaw(cathodeKinetics, limit);
+      place =
+          strip == null ? null : StripTable.Place.of(limit, factors.sheetMicroS() / cathodeFactor);
     }
 
-    CellCurrents currents(double ringWidthMm, double cathodeScale) {
-      double ringCm2 = spec.ringCircumferenceMm() * ringWidthMm / 100;
-      if (dry) {
-        return GalvanicCell.NOTHING;
-      }
-      StripTable.Place place =
-          strip == null ? null : StripTable.Place.of(limitUAPerCm2, sheetMicroS / cathodeScale);
-      double cathodeV = solve(ringCm2, place, cathodeScale);
-      double currentUA = place == null ? 0 : cathodeCurrent(place, cathodeScale, cathodeV);
-      double anodeV = cathodeV - currentUA * 1e-6 * spec.contactResistanceOhm();
-      double reachMm = place == null ? 0 : strip.reachMm(place, cathodeV);
-      return GalvanicCell.currents(anodeKinetics, anode, film, anodeV, currentUA, ringCm2, reachMm);
+    private CellCurrents answer() {
+      double cathodeV = solve();
+      double currentUA = cathodeCurrent(cathodeV);
+      double reachMm = strip == null ? 0 : strip.reachMm(place, cathodeV);
+      return GalvanicCell.currents(
+          anodeKinetics, anode, film, cathodeV - currentUA * ohm, currentUA, ringCm2, reachMm);
     }
 
     /**
      * The cathode's potential at the anode's end of the film: where dissolution meets the demand
      * for it. Both are near exponential in potential, so Newton's method is applied to the
-     * difference of their logarithms, within a bracket. It starts from the last answer in this
-     * film, moved along its tangent to the new load (cathode strength over ring area).
+     * difference of their logarithms, within a bracket.
      */
-    private double solve(double ringCm2, StripTable.Place place, double cathodeScale) {
+    private double solve() {
       double low = LOWEST_V;
       double high = HIGHEST_V;
-      double load = Math.log(cathodeScale / ringCm2);
-      double v = startV + voltsPerLnLoad * (load - lnLoad);
-      double ohm = 1e-6 * spec.contactResistanceOhm();
+      double v = anodeKinetics.startV(film.chlorideMolPerKg());
       for (int i = 0; i < MOST_STEPS; i++) {
-        double current = 0;
-        double slope = 0;
-        if (place != null) {
-          current = cathodeCurrent(place, cathodeScale, v);
-          slope = current * (areaOut[1] + cathodeOut[1] / cathodeOut[0]);
-        }
+        double current = cathodeCurrent(v);
+        double slope = strip == null ? 0 : current * (areaOut[1] + cathodeOut[1] / cathodeOut[0]);
         double rise = 1 - slope * ohm;
         anode.cathodic(v - current * ohm, anodeOut);
         double demand = current / ringCm2 + anodeOut[0];
         double demandSlope = slope / ringCm2 + anodeOut[1] * rise;
         anode.dissolution(v - current * ohm, anodeOut);
-        double next = Double.NaN;
         double lnSlope = anodeOut[1] * rise / anodeOut[0] - demandSlope / demand;
-        if (demand > anodeOut[0]) {
+        double lnRatio = demand > 0 ? Math.log(anodeOut[0] / demand) : Double.POSITIVE_INFINITY;
+        if (Math.abs(lnRatio) < LAST_LN_RATIO) {
+          return v - lnRatio / lnSlope;
+        }
+        if (lnRatio < 0) {
           low = v;
         } else {
           high = v;
         }
-        if (demand > 0) {
-          next = v - Math.log(anodeOut[0] / demand) / lnSlope;
-        }
-        if (!(next > low && next < high)) {
-          next = 0.5 * (low + high);
-        }
-        double moved = Math.abs(next - v);
-        v = next;
-        if (moved < LAST_STEP_V) {
-          voltsPerLnLoad = current > 0 ? current / (ringCm2 * demand * lnSlope) : 0;
-          break;
-        }
+        double next = v - lnRatio / lnSlope;
+        v = next > low && next < high ? next : 0.5 * (low + high);
       }
-      startV = v;
-      lnLoad = load;
       return v;
     }
 
-    private double cathodeCurrent(StripTable.Place place, double cathodeScale, double v) {
+    private double cathodeCurrent(double v) {
+      if (strip == null) {
+        return 0;
+      }
       cathode.at(v, cathodeOut);
       strip.lnArea(place, v, areaOut);
-      return cathodeScale * skirtFactor * oxygenFactor * Math.exp(areaOut[0]) * cathodeOut[0];
+      return cathodeFactor * Math.exp(areaOut[0]) * cathodeOut[0];
     }
   }
 }

@@ -5,11 +5,11 @@ import java.util.Map;
 
 /**
  * Keeps the {@link StripTable}s of the cathodes in use, so that cells with the same cathode and
- * hole share one. Holds at most a given number, the least recently used going first (88 kB each).
+ * hole share one. Holds at most a given number, the least recently used going first (111 kB each).
  * Safe for many threads.
  */
 public final class CellTables {
-  /** Room for every cathode of a catalogue several times over: 64 tables, 5.6 MB at most. */
+  /** Room for every cathode of a catalogue several times over: 64 tables, 7.1 MB at most. */
   public static final int USUAL_CAPACITY = 64;
 
   private final Map<Key, StripTable> tables;
@@ -48,6 +48,11 @@ public final class CellTables {
     synchronized (tables) {
       return new CellTable(spec, tables.computeIfAbsent(key, k -> new StripTable(spec)));
     }
+  }
+
+  /** Currents of a cell in a film, off the table: {@link GalvanicCell#solve} for many questions. */
+  public CellCurrents at(CellSpec spec, Film film) {
+    return table(spec).currents(film, spec.ringWidthMm(), 1);
   }
 
   /** Tables held now. */

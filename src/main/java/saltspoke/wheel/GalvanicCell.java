@@ -53,18 +53,18 @@ public final class GalvanicCell {
       return NOTHING;
     }
     Kinetics kinetics = Kinetics.of(spec.anode());
-    AnodeLaw anode = new AnodeLaw(kinetics, film);
+    FilmFactors factors = FilmFactors.of(film);
+    AnodeLaw anode = new AnodeLaw(kinetics, factors);
     double restV = anode.restV();
     if (hasNoCathode(spec)) {
       return currents(kinetics, anode, film, restV, 0, spec.ringAreaCm2(), 0);
     }
-    double factor = cathodeScale * skirtFactor(spec.skirtMm()) * Kinetics.oxygenFactor(film);
-    double limit = ThinFilm.oxygenLimitUAPerCm2(film) / Kinetics.oxygenFactor(film);
-    CathodeLaw law = new CathodeLaw(Kinetics.of(spec.cathode()), limit);
+    double factor = cathodeScale * skirtFactor(spec.skirtMm()) * factors.oxygen();
+    CathodeLaw law = new CathodeLaw(Kinetics.of(spec.cathode()), factors.scaledLimitUAPerCm2());
     FilmStrip strip =
         FilmStrip.joined(
             StripGrid.of(spec, cells),
-            ThinFilm.sheetMicroS(film) / factor,
+            factors.sheetMicroS() / factor,
             law,
             anode,
             spec.ringAreaCm2() / factor,

@@ -1,5 +1,8 @@
 package saltspoke.wheel;
 
+import java.util.EnumMap;
+import java.util.Map;
+
 /**
  * What the surface of one material does at a potential: how fast it reduces oxygen, evolves
  * hydrogen, and dissolves. Potentials V(SCE), current densities µA/cm² at 25 °C.
@@ -81,8 +84,21 @@ record Kinetics(
   private static final double BRASS_UM =
       0.5 * (Faraday.BRASS_1.umPerYearPerUAPerCm2() + Faraday.BRASS_2.umPerYearPerUAPerCm2());
 
-  /** Constants of a material, with the reason for each beside it. */
+  private static final Map<Material, Kinetics> ALL = new EnumMap<>(Material.class);
+
+  static {
+    for (Material material : Material.values()) {
+      ALL.put(material, constants(material));
+    }
+  }
+
+  /** Constants of a material. */
   static Kinetics of(Material material) {
+    return ALL.get(material);
+  }
+
+  /** The table, with the reason for each row beside it. */
+  private static Kinetics constants(Material material) {
     return switch (material) {
       // Poor oxygen electrode, passive at 0.5 µA/cm² (5 µm/a in sea water, from memory). Pitting
       // −0.75 V at 1 mol/kg: Kaesche −0.746 V from memory; slope −0.09 V per decade, from memory of
@@ -174,18 +190,12 @@ record Kinetics(
   }
 
   /** Where a search for the potential of this metal as an anode may start, V(SCE). */
-  double startV(Film film) {
-    return active.atReference() > 0 ? active.referenceV() : pitV(film.chlorideMolPerKg());
+  double startV(double chlorideMolPerKg) {
+    return active.atReference() > 0 ? active.referenceV() : pitV(chlorideMolPerKg);
   }
 
   /** Arrhenius factor of all charge-transfer currents against 25 °C. */
   static double temperatureFactor(double temperatureC) {
     return Math.exp(-ACTIVATION_J_PER_MOL / 8.314462 * (1 / (temperatureC + 273.15) - 1 / 298.15));
-  }
-
-  /** Factor of oxygen's kinetics in a film: temperature and salted-out oxygen. */
-  static double oxygenFactor(Film film) {
-    double salted = film.oxygenUmolPerL() / Oxygen.freshUmolPerL(film.temperatureC());
-    return temperatureFactor(film.temperatureC()) * Math.pow(salted, SALTING_ORDER);
   }
 }

@@ -32,8 +32,6 @@ public final class ThinFilm {
   /** Below this thickness, µm, the total falls with it (published). */
   static final double FALLS_BELOW_UM = 10;
 
-  private static final double OXYGEN_CAP_SHARPNESS = 4;
-
   private ThinFilm() {}
 
   /** A dry surface at a temperature; its other values are those of pure water. */
@@ -182,8 +180,9 @@ public final class ThinFilm {
     double free =
         Oxygen.diffusionLimitUAPerCm2(
             film.oxygenDiffusivityCm2PerS(), film.oxygenUmolPerL(), film.thicknessUm());
-    double capped =
-        free / Math.pow(1 + Math.pow(free / OXYGEN_CAP_UA_PER_CM2, OXYGEN_CAP_SHARPNESS), 0.25);
+    double overCap = free / OXYGEN_CAP_UA_PER_CM2;
+    double squared = overCap * overCap;
+    double capped = free / Math.sqrt(Math.sqrt(1 + squared * squared));
     return capped * Math.min(1, film.thicknessUm() / FALLS_BELOW_UM);
   }
 

@@ -72,6 +72,7 @@ class CountryAirTest {
     assertEquals(Setting.RURAL, Settings.guess(new Surroundings(900, 30_000, 40)));
     assertEquals(Setting.TOWN, Settings.guess(new Surroundings(20_000, 60_000, 90)));
     assertEquals(Setting.CITY, Settings.guess(new Surroundings(300_000, 900_000, 250)));
+    assertEquals(Setting.CITY, Settings.guess(new Surroundings(0, 3_600_000, 175)));
   }
 
   @Test

@@ -8,7 +8,6 @@ import java.util.List;
 import java.util.Optional;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
-import saltspoke.sources.CsvTable;
 
 class RoadSaltModelTest {
   private static MonthAir month(
@@ -43,24 +42,6 @@ class RoadSaltModelTest {
               : month(m, 15, 70, 10, 0));
     }
     return months;
-  }
-
-  @Test
-  @Tag("published")
-  void treatmentsASeasonAsPublishedWithinAFactorOfOneAndAHalf() {
-    for (CsvTable.Row row : Reference.rows("road-salt-published/treatments-a-season.csv")) {
-      List<MonthAir> months =
-          winter(
-              row.number("near_freezing_days_nov_to_mar"),
-              row.number("wet_day_share"),
-              row.number("relative_humidity_pct"),
-              row.number("mean_temperature_c"));
-      RoadSalt salt =
-          RoadSaltModel.of(months, CountryAirTest.shipped().find(row.text("country"))).roadSalt();
-      double found = salt.treatmentsPerWinter().median();
-      assertTrue(found >= row.number("treatments_low") / 1.5, row.where() + ": " + found);
-      assertTrue(found <= row.number("treatments_high") * 1.5, row.where() + ": " + found);
-    }
   }
 
   @Test

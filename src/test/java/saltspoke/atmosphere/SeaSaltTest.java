@@ -9,6 +9,7 @@ import java.util.List;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 import saltspoke.places.SeaView;
+import saltspoke.sources.CsvTable;
 import saltspoke.values.Quantiles;
 import saltspoke.values.Refusal;
 
@@ -35,7 +36,7 @@ class SeaSaltTest {
   }
 
   private static double at(SeaView sea, WindMonth wind) {
-    return new SeaSalt(sea, FLAT, 0.2, 10).monthMgPerM2Day(wind, 1000);
+    return new SeaSalt(sea, FLAT, 0.2, 10, 1000).monthMgPerM2Day(wind);
   }
 
   @Test
@@ -77,8 +78,8 @@ class SeaSaltTest {
     double[] crest = new double[36];
     Arrays.fill(crest, 2500);
     SeaView inland = coast(80, 500, 1);
-    double behind = new SeaSalt(inland, crest, 0.2, 500).monthMgPerM2Day(ALL_SIDES, 800);
-    double open = new SeaSalt(inland, FLAT, 0.2, 500).monthMgPerM2Day(ALL_SIDES, 800);
+    double behind = new SeaSalt(inland, crest, 0.2, 500, 800).monthMgPerM2Day(ALL_SIDES);
+    double open = new SeaSalt(inland, FLAT, 0.2, 500, 800).monthMgPerM2Day(ALL_SIDES);
     assertTrue(behind < 0.1 * open);
     double[] none = new double[36];
     Arrays.fill(none, Double.POSITIVE_INFINITY);
@@ -88,9 +89,12 @@ class SeaSaltTest {
 
   @Test
   void rainWashesSaltOutInland() {
-    SeaSalt inland = new SeaSalt(coast(150, 500, 1), FLAT, 0.2, 50);
-    assertTrue(
-        inland.monthMgPerM2Day(ALL_SIDES, 2500) < 0.8 * inland.monthMgPerM2Day(ALL_SIDES, 300));
+    SeaView inland = coast(150, 500, 1);
+    double wet = new SeaSalt(inland, FLAT, 0.2, 50, 2500).monthMgPerM2Day(ALL_SIDES);
+    double usual = new SeaSalt(inland, FLAT, 0.2, 50, 1000).monthMgPerM2Day(ALL_SIDES);
+    double dry = new SeaSalt(inland, FLAT, 0.2, 50, 100).monthMgPerM2Day(ALL_SIDES);
+    assertTrue(wet < 0.85 * usual, wet + " of " + usual);
+    assertEquals(usual, dry, 1e-12, "drier air mixes salt deeper");
   }
 
   @Test
@@ -130,5 +134,34 @@ class SeaSaltTest {
     double calm = ChlorideFromSite.predict(5, 1.5, 0, 0.2, 10).median();
     double windy = ChlorideFromSite.predict(5, 5, 1, 0.2, 10).median();
     assertTrue(calm < 0.5 * windy);
+  }
+
+  @Test
+  void spreadOfDirectionsHoldsOnHourlyWinds() {
+    String[] octants = {"n", "ne", "e", "se", "s", "sw", "w", "nw"};
+    double error = 0;
+    double withoutDirection = 0;
+    List<CsvTable.Row> rows = Reference.rows("tmy-winds/octant-shares.csv");
+    for (CsvTable.Row row : rows) {
+      double speed = row.number("mean_speed");
+      WindMonth wind = new WindMonth(speed, row.number("eastward"), row.number("northward"));
+      for (int o = 0; o < octants.length; o++) {
+        double counted = row.number(octants[o]);
+        error += Math.abs(octant(wind, o) - counted);
+        withoutDirection += Math.abs(octant(WindMonth.fromAllSides(speed), o) - counted);
+      }
+    }
+    int n = rows.size() * octants.length;
+    assertTrue(error / n < 0.04, "mean error of an octant's share: " + error / n);
+    assertTrue(error < 0.8 * withoutDirection, error + " against " + withoutDirection);
+  }
+
+  private static double octant(WindMonth wind, int index) {
+    SectorWind sectors = new SectorWind(wind);
+    double share = 0;
+    for (int i = 0; i < 9; i++) {
+      share += Math.toRadians(5) * sectors.carriedPerRadian(45 * index - 20 + 5 * i, 3, 0, 5);
+    }
+    return share;
   }
 }

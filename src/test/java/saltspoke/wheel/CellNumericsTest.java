@@ -6,6 +6,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Random;
+import java.util.stream.IntStream;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 
@@ -78,7 +79,8 @@ class CellNumericsTest {
     Film film = CellFixtures.rain();
     CellCurrents c = GalvanicCell.solve(CellFixtures.nippleOnCarbon(0.05), film);
     double[] out = new double[2];
-    new AnodeLaw(Kinetics.of(Material.ALUMINIUM_WROUGHT), film).at(c.couplePotentialVSce(), out);
+    new AnodeLaw(Kinetics.of(Material.ALUMINIUM_WROUGHT), FilmFactors.of(film))
+        .at(c.couplePotentialVSce(), out);
     assertEquals(out[0], c.galvanicUAPerCm2(), 1e-6 * out[0]);
   }
 
@@ -147,28 +149,6 @@ class CellNumericsTest {
         random.nextInt(4) == 0 ? 1 : 0);
   }
 
-  @Test
-  void surfaceAgainstTable() {
-    List<WheelYear.FilmHours> films = new ArrayList<>();
-    for (int rh = 50; rh < 98; rh += 4) {
-      SaltMix salt = new SaltMix(100, 600, 100, 0);
-      films.add(new WheelYear.FilmHours(ThinFilm.inEquilibrium(salt, rh, rh / 5.0 - 8), 300));
-    }
-    films.add(new WheelYear.FilmHours(CellFixtures.rain(), 200));
-    films.add(new WheelYear.FilmHours(ThinFilm.dry(5), 4000));
-    CellTable table = new CellTables(1).table(CellFixtures.nippleOnCarbon(0.02));
-    RateSurface surface = RateSurface.of(table, films, 0.05, 5, 0.1, 10);
-    for (double widthMm : new double[] {0.05, 0.13, 0.4, 1.7, 5}) {
-      for (double scale : new double[] {0.1, 0.3, 1, 2.4, 10}) {
-        double exact = 0;
-        for (WheelYear.FilmHours part : films) {
-          exact += table.rate(part.film(), widthMm, scale) * part.hours() / 8766;
-        }
-        assertEquals(exact, surface.um(widthMm, scale, 1), 0.03 * exact);
-      }
-    }
-  }
-
   /** Bounded: the least recently used cathode goes first, and answers do not change. */
   @Test
   void tablesAreBounded() {
@@ -180,5 +160,21 @@ class CellNumericsTest {
     }
     assertEquals(2, tables.size());
     assertEquals(first, tables.table(spec).rate(CellFixtures.shed(80), 0.3, 1), 0);
+  }
+
+  /** Many threads on one cold table get the bits that one thread gets. */
+  @Test
+  void tableServesManyThreads() {
+    CellSpec spec = CellFixtures.nippleOnCarbon(0.02);
+    CellTables shared = new CellTables(1);
+    CellTables own = new CellTables(1);
+    double[] together =
+        IntStream.range(0, 400)
+            .parallel()
+            .mapToDouble(i -> shared.at(spec, CellFixtures.shed(76 + 0.05 * i)).reachMm())
+            .toArray();
+    for (int i = 0; i < together.length; i++) {
+      assertEquals(own.at(spec, CellFixtures.shed(76 + 0.05 * i)).reachMm(), together[i], 0);
+    }
   }
 }

@@ -138,7 +138,7 @@ class CellPublishedTest {
     Kinetics inert =
         new Kinetics(
             eager.oxygen(), eager.hydrogen(), new Tafel(1, 1e-9, 0.1), 0, 9, 0, 0.06, 0, 0);
-    AnodeLaw anode = new AnodeLaw(eager, film);
+    AnodeLaw anode = new AnodeLaw(eager, FilmFactors.of(film));
     CellSpec ten =
         new CellSpec(Material.ALUMINIUM_WROUGHT, Material.PLATINUM, 2.25, 10, 1, 1, 0, 2.25, 0, 0);
     FilmStrip strip =
@@ -161,7 +161,9 @@ class CellPublishedTest {
   void potentialsInFlowingSeaWater() {
     for (CsvTable.Row row : Reference.rows("astm-g82-laque/potentials.csv")) {
       Material metal = Material.valueOf(row.text("material"));
-      double restV = new AnodeLaw(Kinetics.of(metal), CellFixtures.sea(FLOWING_WATER_UM)).restV();
+      double restV =
+          new AnodeLaw(Kinetics.of(metal), FilmFactors.of(CellFixtures.sea(FLOWING_WATER_UM)))
+              .restV();
       assertTrue(
           restV >= row.number("low_v") - 0.005 && restV <= row.number("high_v") + 0.005,
           row.where() + " " + metal + " rests at " + restV);

@@ -133,16 +133,18 @@ public final class CustomerSheetPdf {
     Paragraph lead = SheetStyle.paragraph(wording.say("page-first-look"), 11, false, ink);
     lead.setSpacingBefore(8);
     box.addElement(lead);
-    box.addElement(
+    Paragraph interval =
         SheetStyle.paragraph(
-            wording.span(pairing.firstLookMonths()), 30, true, SheetStyle.VERDIGRIS));
+            wording.span(pairing.firstLookMonths()), 30, true, SheetStyle.VERDIGRIS);
+    interval.setSpacingAfter(8);
+    box.addElement(interval);
     LocalDate first = Wording.after(today, pairing.firstLookMonths());
     box.addElement(
         SheetStyle.paragraph(
             wording.say("page-by-date", Map.of("date", wording.date(first)))
                 + " "
                 + wording.say(
-                    "page-then-every", Map.of("span", wording.span(pairing.everyMonths()))),
+                    "page-then-every", Map.of("every", wording.every(pairing.everyMonths()))),
             11,
             true,
             ink));

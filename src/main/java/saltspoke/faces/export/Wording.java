@@ -73,21 +73,36 @@ final class Wording {
     return String.join(" · ", parts);
   }
 
-  /** The sentence on what sets the interval, else the foremost reason. */
+  /** The reason that sets the interval, else the foremost. */
   String limit(PairingAdvice advice) {
-    String code = "advice-limited-" + advice.limitedBy();
-    if (texts.all().containsKey(code)) {
-      return say(code);
-    }
-    return advice.reasons().isEmpty() ? "" : say(advice.reasons().get(0));
+    return advice.reasons().stream()
+        .filter(reason -> reason.code().endsWith(advice.limitedBy()))
+        .findFirst()
+        .or(() -> advice.reasons().stream().findFirst())
+        .map(this::say)
+        .orElse("");
   }
 
   /** A span to act within, rounded down: better a week early than a week late. */
   String span(double months) {
+    return counted(unit(months), floored(months));
+  }
+
+  /** "every 3 months", as each language says it for one and for several. */
+  String every(double months) {
+    String code = "page-each-" + unit(months);
+    return floored(months) == 1 ? say(code) : say(code + "s", Map.of("span", span(months)));
+  }
+
+  private static String unit(double months) {
+    return months < 1 ? "week" : "month";
+  }
+
+  private static double floored(double months) {
     if (months < 1) {
-      return counted("week", Math.max(1, Math.floor(months * WEEKS_PER_MONTH)));
+      return Math.max(1, Math.floor(months * WEEKS_PER_MONTH));
     }
-    return counted("month", months < 6 ? Math.floor(months * 2) / 2 : Math.floor(months));
+    return months < 6 ? Math.floor(months * 2) / 2 : Math.floor(months);
   }
 
   /** When a state is reached, as a range; what lies beyond the horizon says so. */

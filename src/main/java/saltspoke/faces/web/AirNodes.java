@@ -15,8 +15,8 @@ import saltspoke.atmosphere.AirClimate;
  * the map grows as sharp as the model is.
  */
 final class AirNodes {
-  /** Nodes along a tile's edge: one every 8 pixels. */
-  static final int PER_TILE = 32;
+  /** Nodes along a tile's edge: one every 16 pixels. */
+  static final int PER_TILE = 16;
 
   private static final int MOST_KEPT = 300_000;
   private static final int LAYERS = MapLayer.values().length;

@@ -4,6 +4,7 @@ import static java.nio.charset.StandardCharsets.UTF_8;
 
 import com.fasterxml.jackson.core.JsonProcessingException;
 import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.node.ArrayNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.time.LocalDate;
 import java.util.LinkedHashMap;
@@ -160,7 +161,10 @@ public final class Api {
   }
 
   private Reply about(Ask ask) {
-    return Reply.json(About.json(answers.dataSet()));
+    ObjectNode node = About.json(answers.dataSet());
+    ArrayNode countries = node.putArray("postcodeCountries");
+    answers.postcodeCountries().forEach(countries::add);
+    return Reply.json(node);
   }
 
   private Reply texts(Ask ask) {

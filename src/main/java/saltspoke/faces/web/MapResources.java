@@ -100,13 +100,16 @@ final class MapResources {
     return Reply.json(node);
   }
 
-  /** Whether a point can be asked about, which it can up to 2 km off the shore. */
+  /**
+   * Whether a point can be asked about, which it can up to 2 km off the shore. "No" is an answer
+   * here and no error, so that a click at sea is nothing a browser would complain about.
+   */
   Reply spot(Ask ask) {
     double[] point = point(new Parameters(ask.query(), Set.of("at")));
     ObjectNode node = Json.object();
     boolean land = true;
     try {
-      answers.place(question(point[0], point[1]));
+      answers.air(question(point[0], point[1]));
     } catch (Refusal refusal) {
       land = false;
       node.put("error", refusal.error());

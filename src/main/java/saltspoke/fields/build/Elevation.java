@@ -6,13 +6,19 @@ import saltspoke.fields.Grid;
 import saltspoke.sources.LayerBuilder;
 import saltspoke.sources.LayerFile;
 import saltspoke.sources.LayerSink;
+import saltspoke.sources.NumpyArray;
 import saltspoke.sources.SourcePackages;
 
 /**
- * Height of the land from ETOPO5: at 10′ for places, and as means over the cells of the temperature
- * maps, which carry no height field of their own.
+ * Height of the land from the 5′ topography of Recommendation ITU-R P.1511-2: at 10′ for places,
+ * and as means around the points of the temperature maps, which carry no height field of their own.
  */
 final class Elevation implements LayerBuilder {
+  private static final String PACKAGE = "itur";
+
+  /** Points of margin around the world in the file. */
+  private static final int MARGIN = 2;
+
   @Override
   public String id() {
     return "elevation";
@@ -20,79 +26,77 @@ final class Elevation implements LayerBuilder {
 
   @Override
   public List<String> needs() {
-    return List.of(NetcdfSheets.PACKAGE);
+    return List.of(PACKAGE);
   }
 
   @Override
   public void build(SourcePackages in, LayerSink out) throws IOException {
-    Sheet relief = NetcdfSheets.read(NetcdfSheets.open(in, "etopo5.cdf"), "ROSE").get(0);
-    Sheet land = relief.map(v -> v < 0 ? 0 : v);
+    NumpyArray metres = NumpyArray.fromNpz(in.bytes(PACKAGE, "1511/v2_topo.npz"), "v2_topo.npz");
+    int columns = metres.shape()[1] - 2 * MARGIN;
+    double stepDeg = 360.0 / columns;
+    Sheet land =
+        Sheet.world(
+            90 - stepDeg / 2,
+            -stepDeg,
+            -180 + stepDeg / 2,
+            stepDeg,
+            metres.shape()[0] - 2 * MARGIN,
+            columns,
+            metres.inner(MARGIN));
     RasterLayer.write(
         out,
-        file(
-            "elevation",
-            "Height of the land, 10′",
-            "Mean of the 5′ heights within 5′ around each point, weighted 1-2-1 each way; the sea"
-                + " counts as 0, so does land below sea level."),
-        List.of(pointMean(land, 2, 1).roundTo(1)));
+        file("elevation", "Height of the land, 10′", "Means of 2 × 2 cells of 5′; the sea is 0."),
+        List.of(land.blockMean(2).roundTo(1)));
     RasterLayer.write(
         out,
         file(
             "temperature-height",
             "Height of the ground that goes with the temperature maps, 0.75°",
-            "Mean of the 5′ heights over each cell of the layer temperature-monthly, the sea as 0:"
-                + " the maps come without the height field of their model."),
-        List.of(pointMean(land, 9, 8).roundTo(1)));
+            "Mean of the 5′ heights around each point of the layer temperature-monthly, with weights"
+                + " that fall to nothing one step of 0.75° away; the sea is 0. The maps come without"
+                + " the height field of their own model."),
+        List.of(around(land, Grid.of(90, -180, 0.75, 0.75, 241, 480)).roundTo(1)));
   }
 
-  /**
-   * Means around every {@code stride}-th point with weights that fall off linearly to nothing one
-   * step beyond {@code reach} points.
-   */
-  private static Sheet pointMean(Sheet fine, int stride, int reach) {
+  /** Means around the points of another grid, weights falling linearly to nothing one step away. */
+  private static Sheet around(Sheet fine, Grid target) {
     Grid from = fine.grid();
-    int rows = (from.rows() - 1) / stride + 1;
-    int columns = from.columns() / stride;
-    double[] means = new double[rows * columns];
-    for (int row = 0; row < rows; row++) {
-      for (int column = 0; column < columns; column++) {
-        double sum = 0;
-        double weights = 0;
-        for (int dy = -reach; dy <= reach; dy++) {
-          int y = row * stride + dy;
-          if (y < 0 || y >= from.rows()) {
-            continue;
-          }
-          for (int dx = -reach; dx <= reach; dx++) {
-            double weight = (reach + 1 - Math.abs(dy)) * (double) (reach + 1 - Math.abs(dx));
-            sum += weight * fine.at(y, column * stride + dx);
-            weights += weight;
-          }
+    double[] means = new double[target.rows() * target.columns()];
+    int reach = (int) Math.ceil(target.stepLatDeg() / from.stepLatDeg());
+    for (int i = 0; i < means.length; i++) {
+      double latitudeDeg = target.latitudeDeg(i / target.columns());
+      double longitudeDeg = target.longitudeDeg(i % target.columns());
+      int middleRow = (int) Math.round((from.northDeg() - latitudeDeg) / from.stepLatDeg());
+      int middleColumn = (int) Math.round((longitudeDeg - from.westDeg()) / from.stepLonDeg());
+      double sum = 0;
+      double weights = 0;
+      for (int row = Math.max(0, middleRow - reach);
+          row <= Math.min(from.rows() - 1, middleRow + reach);
+          row++) {
+        double north = Math.abs(from.latitudeDeg(row) - latitudeDeg) / target.stepLatDeg();
+        for (int column = middleColumn - reach; column <= middleColumn + reach; column++) {
+          double east = Math.abs(from.longitudeDeg(column) - longitudeDeg) / target.stepLonDeg();
+          double weight = Math.max(0, 1 - north) * Math.max(0, 1 - east);
+          sum += weight * fine.at(row, column);
+          weights += weight;
         }
-        means[row * columns + column] = sum / weights;
       }
+      means[i] = sum / weights;
     }
-    return new Sheet(
-        Grid.of(
-            from.northDeg(),
-            from.westDeg(),
-            from.stepLatDeg() * stride,
-            from.stepLonDeg() * stride,
-            rows,
-            columns),
-        means);
+    return new Sheet(target, means);
   }
 
   private static LayerFile file(String layer, String title, String remark) {
     return new LayerFile(
         layer,
-        "elevation/" + layer + ".tif",
+        "itu/" + layer + ".tif",
         title,
         "m",
         "",
         List.of("height"),
-        NetcdfSheets.LICENCE,
-        "NOAA ETOPO5, as distributed with Ferret (NOAA/PMEL/TMAP)",
+        ItuMaps.LICENCE,
+        "© International Telecommunication Union, Recommendation ITU-R P.1511-2, by way of the"
+            + " Python package itur",
         remark);
   }
 }

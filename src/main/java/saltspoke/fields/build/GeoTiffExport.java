@@ -54,6 +54,8 @@ public final class GeoTiffExport {
     parameters
         .parameter(GeoTiffFormat.GEOTOOLS_WRITE_PARAMS.getName().toString())
         .setValue(compression);
+    // The writer would declare 0 or the lowest integer as missing; NaN needs no declaration.
+    parameters.parameter(GeoTiffFormat.WRITE_NODATA.getName().toString()).setValue(false);
 
     ByteArrayOutputStream out = new ByteArrayOutputStream();
     GeoTiffWriter writer = new GeoTiffWriter(out);

@@ -145,7 +145,6 @@ final class ItuMaps implements LayerBuilder {
     // The map carries a margin of one point around the world; the margin is left out.
     int rows = km.shape()[0] - 2;
     int columns = km.shape()[1] - 2;
-    double[] inner = inner(km);
     Sheet metres =
         Sheet.world(
                 lat.values()[km.shape()[1]],
@@ -154,7 +153,7 @@ final class ItuMaps implements LayerBuilder {
                 lon.values()[1] - lon.values()[0],
                 rows,
                 columns,
-                inner)
+                km.inner(1))
             .map(v -> Math.rint(v * 1000));
     RasterLayer.write(
         out,
@@ -184,8 +183,8 @@ final class ItuMaps implements LayerBuilder {
               lon.values()[1] - lon.values()[0],
               mm.shape()[0] - 2,
               mm.shape()[1] - 2,
-              inner(mm));
-      months.add(quarter.blockMean(2).roundToBits(6, 0.25));
+              mm.inner(1));
+      months.add(quarter.blockMean(2).roundToBits(5, 0.5));
     }
     RasterLayer.write(
         out,
@@ -196,8 +195,8 @@ final class ItuMaps implements LayerBuilder {
             "long-term mean",
             RasterLayer.MONTHS,
             "P.837-7",
-            "Area means of 2 × 2 cells of 0.25°. Rounded to 6 binary digits, not finer than"
-                + " 0.25 mm."),
+            "Area means of 2 × 2 cells of 0.25°. Rounded to 5 binary digits, not finer than"
+                + " 0.5 mm."),
         months);
   }
 
@@ -218,7 +217,7 @@ final class ItuMaps implements LayerBuilder {
           """
           The maps in this folder are made from the digital maps that go with Recommendations of the
           International Telecommunication Union, Radiocommunication Sector: P.834 (vapour pressure),
-          P.836-6 (water-vapour density), P.837-7 (rain) and P.1510-1 (temperature).
+          P.836-6 (water-vapour density), P.837-7 (rain), P.1510-1 (temperature) and P.1511-2 (height).
           © International Telecommunication Union.
 
           The ITU publishes these maps free of charge together with the Recommendations. Others pass
@@ -259,17 +258,6 @@ final class ItuMaps implements LayerBuilder {
           "missing-entry", PACKAGE + " " + name, "", "itur 0.4.0, which holds this file");
     }
     return array;
-  }
-
-  private static double[] inner(NumpyArray map) {
-    int rows = map.shape()[0];
-    int columns = map.shape()[1];
-    double[] inner = new double[(rows - 2) * (columns - 2)];
-    for (int row = 1; row < rows - 1; row++) {
-      System.arraycopy(
-          map.values(), row * columns + 1, inner, (row - 1) * (columns - 2), columns - 2);
-    }
-    return inner;
   }
 
   private static LayerFile file(

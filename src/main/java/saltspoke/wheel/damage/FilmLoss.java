@@ -4,7 +4,6 @@ import java.util.function.Function;
 import saltspoke.wheel.CellCurrents;
 import saltspoke.wheel.CellSpec;
 import saltspoke.wheel.Film;
-import saltspoke.wheel.WheelYear;
 
 /**
  * What one cell loses to the films of one year, as mean depth over its bare ring.
@@ -18,27 +17,27 @@ public record FilmLoss(double[] monthlyUm, double galvanicShare, double localSha
   static final double HOURS_PER_YEAR = 8766;
 
   /** Adds up the year's films. */
-  public static FilmLoss over(WheelYear year, CellSpec spec, CellRates rates) {
+  public static FilmLoss over(FilmPool films, CellSpec spec, CellRates rates) {
     Function<Film, CellCurrents> cell = rates.of(spec);
     double[] monthly = new double[12];
     double galvanic = 0;
     double local = 0;
     double all = 0;
-    for (WheelYear.Month month : year.months()) {
-      for (WheelYear.FilmHours film : month.films()) {
-        if (film.hours() <= 0 || film.film().thicknessUm() <= 0) {
-          continue;
-        }
-        CellCurrents now = cell.apply(film.film());
-        double um = now.penetrationUmPerYear() * film.hours() / HOURS_PER_YEAR;
-        double driven = Math.max(0, now.galvanicUAPerCm2());
-        double sum = driven + now.selfUAPerCm2() + now.localUAPerCm2();
-        monthly[month.month() - 1] += um;
-        if (sum > 0) {
-          galvanic += um * driven / sum;
-          local += um * now.localUAPerCm2() / sum;
-          all += um;
-        }
+    for (int i = 0; i < films.size(); i++) {
+      CellCurrents now = cell.apply(films.film(i));
+      double[] hours = films.hours(i);
+      double umPerHour = now.penetrationUmPerYear() / HOURS_PER_YEAR;
+      double um = 0;
+      for (int m = 0; m < 12; m++) {
+        monthly[m] += umPerHour * hours[m];
+        um += umPerHour * hours[m];
+      }
+      double driven = Math.max(0, now.galvanicUAPerCm2());
+      double sum = driven + now.selfUAPerCm2() + now.localUAPerCm2();
+      if (sum > 0) {
+        galvanic += um * driven / sum;
+        local += um * now.localUAPerCm2() / sum;
+        all += um;
       }
     }
     return new FilmLoss(monthly, all > 0 ? galvanic / all : 0, all > 0 ? local / all : 0);

@@ -9,13 +9,13 @@ import saltspoke.wheel.RidingProfile;
  *
  * <p>Archard's law: depth an hour = k·p·s. k = 5e-14 m²/N for fretting of aluminium on steel (from
  * memory, reported 1e-14 to 1e-13); p = 85 MPa, 1100 N over eight engaged flanks (computed); s =
- * 11,900 turns an hour at 25 km/h × a stroke of 0.28 µm (ASSUMPTION, elastic working of the first
- * flanks). Together 14 nm an hour, spread in {@link Assumption#FRETTING}. It was set knowing the
+ * 11,900 turns an hour at 25 km/h × a stroke of 0.34 µm (ASSUMPTION, elastic working of the first
+ * flanks). Together 17 nm an hour, spread in {@link Assumption#FRETTING}. It was set knowing the
  * dry trade case, which is so no test of it.
  */
 final class Fretting {
   /** Wear of an aluminium thread, µm per hour of riding. */
-  static final double ALUMINIUM_UM_PER_HOUR = 5e-14 * 85e6 * 11_900 * 0.28e-6 * 1e6;
+  static final double ALUMINIUM_UM_PER_HOUR = 5e-14 * 85e6 * 11_900 * 0.34e-6 * 1e6;
 
   private static final double WEEKS_PER_MONTH = 365.25 / 12 / 7;
 

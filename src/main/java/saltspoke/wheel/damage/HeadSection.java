@@ -6,9 +6,9 @@ import saltspoke.wheel.Material;
 public final class HeadSection {
   /**
    * Peak stress in the fillet over the mean stress, with the swing of each turn of the wheel.
-   * ASSUMPTION 1.5, spread ×/÷ 1.3; a blunt fillet under mostly steady load.
+   * ASSUMPTION 1.2, spread ×/÷ 1.3: a blunt fillet in ductile metal under mostly steady load.
    */
-  public static final double NOTCH = 1.5;
+  public static final double NOTCH = 1.2;
 
   private HeadSection() {}
 

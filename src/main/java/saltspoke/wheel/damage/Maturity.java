@@ -19,7 +19,11 @@ final class Maturity {
   private static final double LN_STEP = 0.04;
   private static final int POINTS = 340;
 
+  /** Whole months for which the integral is kept ready. */
+  static final int MONTHS = 481;
+
   private final double[] integral = new double[POINTS];
+  private final double[] atMonth = new double[MONTHS + 1];
   private final double compoundMonths;
 
   /**
@@ -34,6 +38,9 @@ final class Maturity {
       double a = months(i - 1);
       double b = months(i);
       integral[i] = integral[i - 1] + (b - a) / 6 * (at(a) + 4 * at((a + b) / 2) + at(b));
+    }
+    for (int m = 1; m <= MONTHS; m++) {
+      atMonth[m] = settledMonths((double) m);
     }
   }
 
@@ -53,6 +60,11 @@ final class Maturity {
     double a = months(i);
     double part = (months - a) / (months(i + 1) - a);
     return Math.max(0, integral[i] + part * (integral[i + 1] - integral[i]));
+  }
+
+  /** The same after whole months, 0..{@link #MONTHS}. */
+  double settledMonths(int months) {
+    return atMonth[months];
   }
 
   private static double months(int i) {

@@ -10,7 +10,7 @@ package saltspoke.wheel.damage;
  */
 final class SeasonalDose implements DoseCurve {
   /** Longest time it is asked for, months; it goes on straight beyond. */
-  private static final int MONTHS = 480;
+  private static final int MONTHS = Maturity.MONTHS - 1;
 
   /** Months of the start in which winter weighs more. ASSUMPTION: one season. */
   private static final int START_MONTHS = 3;

@@ -8,7 +8,7 @@ import saltspoke.wheel.Material;
  * about that state.
  *
  * @param part {@code nipple}, {@code rim}, {@code interface} or {@code spoke}
- * @param cause code word: {@code seat}, {@code thread}, {@code coating} or {@code open-air}
+ * @param cause code word: {@code seat}, {@code thread}, {@code wear} or {@code open-air}
  * @param metal what is eaten
  * @param dose loss in µm
  * @param monthlyUm loss of a settled year, January to December, µm

@@ -14,6 +14,7 @@ import saltspoke.values.Quantiles;
 import saltspoke.wheel.CellSpec;
 import saltspoke.wheel.Coating;
 import saltspoke.wheel.Material;
+import saltspoke.wheel.Nipple;
 import saltspoke.wheel.RidingProfile;
 import saltspoke.wheel.Spoke;
 import saltspoke.wheel.ThreadCompound;
@@ -44,6 +45,9 @@ public final class Sites {
   /** Loss of the rim bed over its thickness at which it cracks at the hole. ASSUMPTION. */
   private static final double BED_SHARE = 0.5;
 
+  /** A coating that outlives this, twice what the advice looks ahead, is taken as lasting. */
+  private static final double HORIZON_MONTHS = 480;
+
   /** Tensile strength of spoke wire, MPa, common practice. */
   private static final double WIRE_MPA = 1000;
 
@@ -61,11 +65,23 @@ public final class Sites {
   private final int buildMonth;
   private final CellRates rates;
   private final double[] winter;
-  private final Map<WheelYear, Map<CellSpec, FilmLoss>> losses = new HashMap<>();
+  private final FilmPool films;
+  private final double wetShare;
+  private final Map<CellSpec, FilmLoss> losses = new HashMap<>();
+  private final Map<Object, Site> made = new HashMap<>();
 
   public Sites(
-      AirClimate air, RidingProfile profile, WheelBuild build, int buildMonth, CellRates rates) {
+      AirClimate air,
+      RidingProfile profile,
+      WheelBuild build,
+      int buildMonth,
+      WheelYear year,
+      CellRates rates) {
     this.air = air;
+    this.films = FilmPool.of(year);
+    this.wetShare =
+        year.months().stream().mapToDouble(WheelYear.Month::wetHours).sum()
+            / FilmLoss.HOURS_PER_YEAR;
     this.profile = profile;
     this.build = build;
     this.buildMonth = buildMonth;
@@ -74,36 +90,39 @@ public final class Sites {
   }
 
   /** All sites of a pairing. */
-  public List<Site> of(Parts parts, WheelYear year) {
+  public List<Site> of(Parts parts) {
     List<Site> sites = new ArrayList<>();
-    double wetShare =
-        year.months().stream().mapToDouble(WheelYear.Month::wetHours).sum()
-            / FilmLoss.HOURS_PER_YEAR;
-    boolean nippleThread = false;
     for (Couple couple : SpokeHole.couples(parts)) {
-      add(sites, parts, couple, year, wetShare);
-      nippleThread |= wornThread(couple);
+      sites.add(made.computeIfAbsent(key(parts, couple), k -> site(parts, couple)));
     }
-    if (!nippleThread) {
-      dryThread(parts).ifPresent(sites::add);
+    Nipple nipple = parts.nipple();
+    if (Fretting.relative(nipple.material()) > 0) {
+      sites.add(made.computeIfAbsent(List.of("wear", nipple.id()), k -> wornThread(nipple)));
     }
-    openAir(parts).ifPresent(sites::add);
+    if (showsInOpenAir(nipple)) {
+      sites.add(made.computeIfAbsent(List.of("open-air", nipple.id()), k -> openAir(nipple)));
+    }
     return sites;
   }
 
-  private void add(List<Site> sites, Parts parts, Couple couple, WheelYear year, double wetShare) {
+  /** Everything that a couple's site depends on besides the question itself. */
+  private static Object key(Parts parts, Couple couple) {
+    boolean thread = couple.where() == Couple.Where.THREAD;
+    return List.of(couple, parts.nipple().id(), thread ? parts.spoke().id() : parts.rim().id());
+  }
+
+  private Site site(Parts parts, Couple couple) {
     boolean thread = couple.where() == Couple.Where.THREAD;
     double factor = Calibration.RATE * (thread ? access(profile.threadCompound()) : 1);
     Maturity maturity = thread ? threadMaturity(profile.threadCompound()) : SEAT;
-    FilmLoss bare = loss(year, couple.spec());
+    FilmLoss bare = loss(couple.spec());
     double share = couple.bareShare().median();
     double[] monthly = bare.scaled(factor * share);
-    double worn = wornThread(couple) ? addWear(monthly, couple.metal()) : 0;
     DoseCurve dose = new SeasonalDose(monthly, buildMonth, winter, maturity);
     Coating coating = coatingOf(parts, couple);
     double through = CoatingLife.months(coating, wetShare);
-    if (share < 1 && Double.isFinite(through)) {
-      FilmLoss whole = loss(year, couple.wholeRing());
+    if (share < 1 && through < HORIZON_MONTHS) {
+      FilmLoss whole = loss(couple.wholeRing());
       double[] more = whole.scaled(factor);
       double[] less = bare.scaled(factor * share);
       for (int i = 0; i < 12; i++) {
@@ -114,65 +133,48 @@ public final class Sites {
     double delay = couple.delayMonths(wetShare);
     DoseCurve unshielded = dose;
     dose = dose.after(delay);
-    double[] ln = shifts(couple, bare, thread, worn);
+    double[] ln = shifts(couple, bare, thread);
     set(ln, Assumption.COATING_LIFE, coatingShift(dose, unshielded, through, delay));
-    sites.add(
-        new Site(
-            couple.part(),
-            thread ? "thread" : "seat",
-            couple.metal(),
-            dose,
-            monthly,
-            thread
-                ? seized(parts, couple) * Products.STIFF_SHARE
-                : Products.visibleAtSeatUm(couple.metal()),
-            seized(parts, couple),
-            lost(parts, couple),
-            ln));
+    return new Site(
+        couple.part(),
+        thread ? "thread" : "seat",
+        couple.metal(),
+        dose,
+        monthly,
+        thread
+            ? seized(parts, couple) * Products.STIFF_SHARE
+            : Products.visibleAtSeatUm(couple.metal()),
+        seized(parts, couple),
+        lost(parts, couple),
+        ln);
   }
 
-  private static boolean wornThread(Couple couple) {
-    return couple.where() == Couple.Where.THREAD && couple.part().equals("nipple");
-  }
-
-  /** Adds a thread's wear to its corrosion; gives the share of the sum that is wear. */
-  private double addWear(double[] monthlyUm, Material metal) {
+  /**
+   * A thread wears whether or not it corrodes. The two are kept apart and the faster counts, so
+   * that each keeps its own spread; where they are equal that is late by at most a factor 2.
+   */
+  private Site wornThread(Nipple nipple) {
+    Material metal = nipple.material();
+    double[] monthly = Fretting.monthlyUm(metal, profile);
     double access = access(profile.threadCompound());
-    double[] wear = Fretting.monthlyUm(metal, profile);
-    double worn = 0;
-    double all = 0;
-    for (int m = 0; m < 12; m++) {
-      monthlyUm[m] += access * wear[m];
-      worn += access * wear[m];
-      all += monthlyUm[m];
+    for (int m = 0; m < monthly.length; m++) {
+      monthly[m] *= access;
     }
-    return all > 0 ? worn / all : 0;
-  }
-
-  /** A thread that does not corrode still wears and galls. */
-  private Optional<Site> dryThread(Parts parts) {
-    Material metal = parts.nipple().material();
-    if (Fretting.relative(metal) == 0) {
-      return Optional.empty();
-    }
-    double[] monthly = new double[12];
-    addWear(monthly, metal);
     double[] ln = new double[Assumption.values().length];
     set(ln, Assumption.FRETTING, Assumption.FRETTING.lnSpread());
     set(ln, Assumption.THREAD_ACCESS, Assumption.THREAD_ACCESS.lnSpread());
     double seized = Fretting.toFillUm(metal);
-    return Optional.of(
-        new Site(
-            "nipple",
-            "galling",
-            metal,
-            new SeasonalDose(
-                monthly, buildMonth, new double[12], threadMaturity(profile.threadCompound())),
-            monthly,
-            Double.POSITIVE_INFINITY,
-            seized,
-            Double.POSITIVE_INFINITY,
-            ln));
+    return new Site(
+        "nipple",
+        "wear",
+        metal,
+        new SeasonalDose(
+            monthly, buildMonth, new double[12], threadMaturity(profile.threadCompound())),
+        monthly,
+        Nobility.corrodes(metal) ? seized * Products.STIFF_SHARE : Double.POSITIVE_INFINITY,
+        seized,
+        Double.POSITIVE_INFINITY,
+        ln);
   }
 
   /**
@@ -197,10 +199,8 @@ public final class Sites {
     return um > 0 && longer > 0 ? Math.max(-1, Math.min(0, Math.log(longer / um))) : 0;
   }
 
-  private FilmLoss loss(WheelYear year, CellSpec spec) {
-    return losses
-        .computeIfAbsent(year, y -> new HashMap<>())
-        .computeIfAbsent(spec, s -> FilmLoss.over(year, s, rates));
+  private FilmLoss loss(CellSpec spec) {
+    return losses.computeIfAbsent(spec, s -> FilmLoss.over(films, s, rates));
   }
 
   /**
@@ -295,7 +295,7 @@ public final class Sites {
     return Double.POSITIVE_INFINITY;
   }
 
-  private static double[] shifts(Couple couple, FilmLoss loss, boolean thread, double worn) {
+  private static double[] shifts(Couple couple, FilmLoss loss, boolean thread) {
     double[] ln = new double[Assumption.values().length];
     double driven = loss.galvanicShare() + loss.localShare();
     double self = 1 - driven;
@@ -311,10 +311,6 @@ public final class Sites {
     set(ln, Assumption.WET_HOURS, Assumption.WET_HOURS.lnSpread());
     set(ln, Assumption.SALT_STORE, Assumption.SALT_ELASTICITY * Assumption.SALT_STORE.lnSpread());
     set(ln, Assumption.CALIBRATION, Assumption.CALIBRATION.lnSpread());
-    for (int k = 0; k < ln.length; k++) {
-      ln[k] *= 1 - worn;
-    }
-    set(ln, Assumption.FRETTING, worn * Assumption.FRETTING.lnSpread());
     set(ln, Assumption.THREAD_ACCESS, thread ? Assumption.THREAD_ACCESS.lnSpread() : 0);
     return ln;
   }
@@ -327,38 +323,38 @@ public final class Sites {
     return share.p10() > 0 ? Math.log(share.p90() / share.p10()) / (2 * Z90) : 0;
   }
 
-  private Optional<Site> openAir(Parts parts) {
-    Material metal = SpokeHole.surface(parts.nipple());
-    Optional<Metal> standard = standard(metal);
-    double visible = Products.visibleInOpenUm(metal);
-    if (build.hiddenNipples() || standard.isEmpty()) {
-      return Optional.empty();
-    }
+  /** Whether the outside of a nipple can be seen to suffer from the air alone. */
+  private boolean showsInOpenAir(Nipple nipple) {
+    Material metal = SpokeHole.surface(nipple);
+    return !build.hiddenNipples()
+        && nipple.coating().kind() != Coating.Kind.ANODIC
+        && standard(metal).isPresent()
+        && Double.isFinite(Products.visibleInOpenUm(metal));
+  }
+
+  private Site openAir(Nipple nipple) {
+    Material metal = SpokeHole.surface(nipple);
     MetalCorrosivity loss =
         air.corrosivity().stream()
-            .filter(entry -> entry.metal() == standard.get())
+            .filter(entry -> entry.metal() == standard(metal).orElseThrow())
             .findFirst()
             .orElseThrow();
-    if (parts.nipple().coating().kind() == Coating.Kind.ANODIC) {
-      return Optional.empty();
-    }
     PowerLawDose dose = PowerLawDose.of(loss, Shelter.share(profile));
     double[] monthly = new double[12];
     Arrays.fill(monthly, dose.firstYearUm() / 12);
     double[] ln = new double[Assumption.values().length];
     set(ln, Assumption.AIR_LOSS, lnSpread(loss.firstYearLossUm()));
     set(ln, Assumption.SHELTER, Assumption.SHELTER.lnSpread());
-    return Optional.of(
-        new Site(
-            "nipple",
-            "open-air",
-            metal,
-            dose,
-            monthly,
-            visible,
-            Double.POSITIVE_INFINITY,
-            Double.POSITIVE_INFINITY,
-            ln));
+    return new Site(
+        "nipple",
+        "open-air",
+        metal,
+        dose,
+        monthly,
+        Products.visibleInOpenUm(metal),
+        Double.POSITIVE_INFINITY,
+        Double.POSITIVE_INFINITY,
+        ln);
   }
 
   private static Optional<Metal> standard(Material material) {

@@ -68,7 +68,13 @@ final class FilmBins {
   }
 
   private void add(List<FilmHours> films, Film film, double filmHours) {
-    if (film.thicknessUm() >= leastUm) {
+    if (film.thicknessUm() < leastUm) {
+      return;
+    }
+    int last = films.size() - 1;
+    if (last >= 0 && films.get(last).film().equals(film)) {
+      films.set(last, new FilmHours(film, films.get(last).hours() + filmHours));
+    } else {
       films.add(new FilmHours(film, filmHours));
     }
   }

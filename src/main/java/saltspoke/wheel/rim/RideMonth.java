@@ -52,12 +52,9 @@ record RideMonth(
     double wetRides =
         wetHours / Math.min(assumptions.get(RimAssumption.RIDE_HOURS), Math.max(1e-9, rideHours));
     double rinses = ridden ? rinses(profile.rinsing(), weeks, wetRides) : 0;
-    RoadSalt.Month road = road(air, monthIndex, profile.saltedRoads());
-    double lies =
-        road.treatments()
-            * assumptions.get(RimAssumption.SALT_LIES_DAYS)
-            / Calendar.days(monthIndex);
-    double saltedShare = road.saltOnRoadGPerM2() > 0 ? 1 - Math.exp(-lies) : 0;
+    RoadSalt.Month road = road(air, monthIndex, profile.saltedRoads(), assumptions);
+    double saltedShare =
+        road.saltOnRoadGPerM2() > 0 ? saltedShare(road.treatments(), monthIndex, assumptions) : 0;
     // The month's mean lies on the salted days only.
     double onRoad = saltedShare > 0 ? road.saltOnRoadGPerM2() / saltedShare : 0;
     double waterG = 1000 * assumptions.get(RimAssumption.ROAD_WATER_MM);
@@ -97,7 +94,8 @@ record RideMonth(
     };
   }
 
-  private static RoadSalt.Month road(AirClimate air, int monthIndex, SaltedRoads salted) {
+  private static RoadSalt.Month road(
+      AirClimate air, int monthIndex, SaltedRoads salted, RimAssumptions assumptions) {
     RoadSalt.Month byClimate = air.roadSalt().months().get(monthIndex);
     return switch (salted) {
       case NO -> new RoadSalt.Month(monthIndex + 1, 0, 0);
@@ -108,12 +106,20 @@ record RideMonth(
                 byClimate.treatments(),
                 TREATMENTS_PER_FREEZING_DAY_IF_TOLD
                     * air.months().get(monthIndex).nearFreezingDays());
-        double share = Math.min(1, treatments * 3 / Calendar.days(monthIndex));
+        double share = saltedShare(treatments, monthIndex, assumptions);
         yield new RoadSalt.Month(
             monthIndex + 1,
             treatments,
             Math.max(byClimate.saltOnRoadGPerM2(), share * SALT_ON_ROAD_IF_TOLD_G_PER_M2));
       }
     };
+  }
+
+  /**
+   * Share of the days on which salt lies, when each treatment lies so long and they fall at random.
+   */
+  private static double saltedShare(double treatments, int monthIndex, RimAssumptions a) {
+    return -Math.expm1(
+        -treatments * a.get(RimAssumption.SALT_LIES_DAYS) / Calendar.days(monthIndex));
   }
 }

@@ -74,5 +74,7 @@ class CustomerSheetPdfTest {
     assertEquals("2.5 months", english.span(2.99));
     assertEquals("1 month", english.span(1.4));
     assertEquals("11 months", english.span(11.99));
+    assertEquals("every month", english.every(1.4));
+    assertEquals("toutes les 3 semaines", new Wording(Texts.in("fr")).every(0.9));
   }
 }

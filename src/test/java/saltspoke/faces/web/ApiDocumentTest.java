@@ -88,16 +88,21 @@ class ApiDocumentTest {
   }
 
   @ParameterizedTest
-  @CsvSource({
-    "/api/air," + PLACE,
-    "/api/advice," + WHEEL,
-    "/api/advice," + PLACE + "&profile=trainer-only",
-    "/api/places,q=Kiel",
-    "/api/profiles,",
-    "/api/pairings,",
-    "/api/about,",
-    "/api/texts,lang=en"
-  })
+  @CsvSource(
+      delimiter = '|',
+      value = {
+        "/api/air|" + PLACE,
+        "/api/advice|" + WHEEL,
+        "/api/advice|" + PLACE + "&profile=trainer-only",
+        "/api/places|q=Kiel",
+        "/api/profiles|",
+        "/api/pairings|",
+        "/api/about|",
+        "/api/texts|lang=en",
+        "/api/value|layer=class-carbon-steel&" + PLACE,
+        "/api/map/spot|" + PLACE,
+        "/api/map/names.json|"
+      })
   void anAnswerHasTheDocumentedForm(String path, String query) throws Exception {
     HttpResponse<String> response = get(path.substring(1) + (query == null ? "" : "?" + query));
     assertEquals(200, response.statusCode(), response.body());
@@ -131,7 +136,7 @@ class ApiDocumentTest {
         "404|api/air?at=54.32,10.13&elevation=9000",
         "400|api/air?at=54.32,10.13&colour=red",
         "400|api/advice?at=54.32,10.13",
-        "404|api/advice?at=54.32,10.13&profile=no-such-profile",
+        "400|api/advice?at=54.32,10.13&profile=no-such-profile",
         "400|api/advice?at=54.32,10.13&profile=trainer-only&risk=none",
         "404|api/no-such-thing"
       })
