@@ -14,7 +14,7 @@ class DayTypesTest {
   private static final double ANY = Double.NEGATIVE_INFINITY;
 
   @Property
-  @Tag("law")
+  @net.jqwik.api.Tag("law")
   void daysGiveBackTheMeansTheyWereMadeFrom(
       @ForAll @DoubleRange(min = -50, max = 45) double temperatureC,
       @ForAll @DoubleRange(min = 1, max = 99.4) double humidityPct,
@@ -29,7 +29,7 @@ class DayTypesTest {
   }
 
   @Property
-  @Tag("law")
+  @net.jqwik.api.Tag("law")
   void hoursAboveALimitNeverGrowWithTheLimit(
       @ForAll @DoubleRange(min = -20, max = 35) double temperatureC,
       @ForAll @DoubleRange(min = 5, max = 99) double humidityPct,
