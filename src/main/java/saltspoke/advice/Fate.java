@@ -13,7 +13,7 @@ final class Fate {
   private final Interval interval;
   private final StateTimes[] times = new StateTimes[State.values().length];
 
-  Fate(List<SiteRisk> sites, WorstOf worst, AdviceRequest request) {
+  Fate(List<SiteRisk> sites, WorstOf worst, Repeats repeats, AdviceRequest request) {
     risk = new WheelRisk(sites, worst, false);
     SiteRisk leader = risk.leader(State.SEIZED);
     look =
@@ -27,9 +27,9 @@ final class Fate {
         Interval.of(
             risk,
             risk.atMeanPace(),
+            repeats.months(sites, look),
             history,
             RiskLimits.of(request.risk()),
-            look,
             request.practiceLimits());
   }
 

@@ -23,19 +23,19 @@ record Interval(
   /**
    * The rule. First look: when the chance of seized, or of a lost head, passes what is accepted.
    * Repeats: no farther apart than half the short warning (10 % quantile of first attack to
-   * seized), and no farther than until the same chances are passed once more by wheels that look
-   * found clean, of all wheels looked at (delay-time rule): powder that is seen is acted upon. For
-   * a wheel of which the last look found something else, the chances are those given that finding.
+   * seized), and no farther than {@link Repeats} allows. A wheel of which the last look found
+   * something is looked at again no later than the accepted chances given that finding.
    *
    * @param risk with seasons, for the first look and the replacement
    * @param steady at the year's mean pace, for the repeats
+   * @param repeatMonths what {@link Repeats} allows
    */
   static Interval of(
       WheelRisk risk,
       WheelRisk steady,
+      double repeatMonths,
       History history,
       RiskLimits limits,
-      LookKind look,
       boolean practiceLimits) {
     double horizon = RiskLimits.HORIZON_MONTHS;
     double seized = risk.monthsTo(State.SEIZED, limits.seized(), history, horizon);
@@ -52,27 +52,13 @@ record Interval(
       every = halfWarning;
       everyBy = "warning-time";
     }
-    double paced =
-        Math.min(
-            steady.monthsTo(State.SEIZED, limits.seized(), history, horizon),
-            steady.monthsTo(State.LOST, limits.lost(), history, horizon));
-    if (paced < horizon) {
-      boolean plan = history.finding() == Finding.NOT_LOOKED;
-      History then =
-          new History(
-              Math.max(history.ageMonths() + paced, SiteTable.FIRST_MONTHS),
-              plan ? Finding.CLEAN : history.finding(),
-              look.finds(State.ATTACKED));
-      // A plan counts all wheels: those found clean are few when attack comes early.
-      double found = plan ? Math.max(steady.chanceOf(then), 0.01) : 1;
-      double again =
-          Math.min(
-              steady.monthsTo(State.SEIZED, level(limits.seized() / found), then, horizon),
-              steady.monthsTo(State.LOST, level(limits.lost() / found), then, horizon));
-      if (again < every) {
-        every = again;
-        everyBy = "repeat-risk";
-      }
+    double again = repeatMonths;
+    if (history.finding() == Finding.POWDER || history.finding() == Finding.ONE_STIFF) {
+      again = Math.min(again, first);
+    }
+    if (again < every) {
+      every = again;
+      everyBy = "repeat-risk";
     }
     every = Math.max(every, SiteTable.FIRST_MONTHS);
     if (!practiceLimits) {
@@ -88,10 +74,6 @@ record Interval(
         replace,
         bound(first, heldFirst, limitedBy),
         bound(every, heldEvery, everyBy));
-  }
-
-  private static double level(double chance) {
-    return Math.min(chance, 0.99);
   }
 
   private static double hold(double months) {

@@ -55,6 +55,21 @@ final class SiteTable {
     return lnDose[i] + (place - i) * (lnDose[i + 1] - lnDose[i]);
   }
 
+  /** ln dose over scatter at the table's start. */
+  double least() {
+    return lnDose[0];
+  }
+
+  /** ln dose over scatter at the table's end. */
+  double most() {
+    return lnDose[POINTS - 1];
+  }
+
+  /** Months at which ln dose over scatter reaches a value; infinite when it does not. */
+  double monthsAt(double wanted) {
+    return wanted > most() ? Double.POSITIVE_INFINITY : months(placeOf(wanted));
+  }
+
   /** Place at which ln dose over scatter reaches a value; the table's end when it does not. */
   double placeOf(double wanted) {
     if (wanted > lnDose[POINTS - 1]) {

@@ -138,11 +138,6 @@ final class WheelRisk {
     return months > horizonMonths ? Double.POSITIVE_INFINITY : months;
   }
 
-  /** Chance that a look at such a wheel finds what the history says, 0..1. */
-  double chanceOf(History history) {
-    return believing(history).weights / Draws.COUNT;
-  }
-
   /** Whether no draw explains the finding, so that the look is to be trusted over the model. */
   boolean surprisedBy(History history) {
     return !history.isNew() && believing(history).surprising;

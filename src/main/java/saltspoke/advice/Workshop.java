@@ -28,6 +28,7 @@ final class Workshop {
   private final Draws draws;
   private final double scatter;
   private final WorstOf worst;
+  private final Repeats repeats;
   private final Map<Site, SiteRisk> ready = new IdentityHashMap<>();
   private final Map<List<SiteRisk>, Fate> fates = new HashMap<>();
   private final Map<Pairing, Case> worked = new HashMap<>();
@@ -49,6 +50,7 @@ final class Workshop {
     this.year = weather.over(air, profile, build);
     this.sites = new Sites(air, profile, build, request.buildMonth(), year, rates);
     this.worst = new WorstOf(build.spokeCount(), draws);
+    this.repeats = new Repeats(RiskLimits.of(request.risk()), worst);
   }
 
   WheelYear year() {
@@ -71,7 +73,7 @@ final class Workshop {
     for (Site site : sites.of(parts)) {
       found.add(ready.computeIfAbsent(site, s -> new SiteRisk(s, draws, scatter)));
     }
-    Fate fate = fates.computeIfAbsent(found, f -> new Fate(f, worst, request));
+    Fate fate = fates.computeIfAbsent(found, f -> new Fate(f, worst, repeats, request));
     return new Case(pairing, parts, fate);
   }
 }

@@ -48,6 +48,9 @@ public final class Sites {
   /** A coating that outlives this, twice what the advice looks ahead, is taken as lasting. */
   private static final double HORIZON_MONTHS = 480;
 
+  /** Time over which the pace of a coated part is evened out, five years, months. ASSUMPTION. */
+  private static final double PACE_MONTHS = 60;
+
   /** Tensile strength of spoke wire, MPa, common practice. */
   private static final double WIRE_MPA = 1000;
 
@@ -131,10 +134,9 @@ public final class Sites {
       dose = dose.plus(new SeasonalDose(more, buildMonth, winter, maturity).after(through));
     }
     double delay = couple.delayMonths(wetShare);
-    DoseCurve unshielded = dose;
-    dose = dose.after(delay);
+    dose = evenly(dose.after(delay), maturity);
     double[] ln = shifts(couple, bare, thread);
-    set(ln, Assumption.COATING_LIFE, coatingShift(dose, unshielded, through, delay));
+    set(ln, Assumption.COATING_LIFE, coatingShift(through, delay));
     return new Site(
         couple.part(),
         thread ? "thread" : "seat",
@@ -147,6 +149,26 @@ public final class Sites {
         seized(parts, couple),
         lost(parts, couple),
         ln);
+  }
+
+  /**
+   * The same loss, steady at its mean pace over the first years: a coating that wears through in
+   * between is spread over them. A pace of one piece is what keeps a harsher year from lengthening
+   * the time between two depths.
+   */
+  private static DoseCurve evenly(DoseCurve dose, Maturity maturity) {
+    double pace = dose.steady().um(PACE_MONTHS) / maturity.settledMonths(PACE_MONTHS);
+    return new DoseCurve() {
+      @Override
+      public double um(double months) {
+        return dose.um(months);
+      }
+
+      @Override
+      public DoseCurve steady() {
+        return months -> pace * maturity.settledMonths(months);
+      }
+    };
   }
 
   /**
@@ -178,25 +200,13 @@ public final class Sites {
   }
 
   /**
-   * Change of ln dose after five years when coatings last a spread longer; 0 for parts without one,
-   * and never more than a factor e.
+   * Change of ln dose when coatings last a spread longer. ASSUMPTION: the dose goes as one over the
+   * coating's life where it wears through within the first years; the same for all films, so that
+   * more hours in one move no spread.
    */
-  private static double coatingShift(
-      DoseCurve dose, DoseCurve unshielded, double throughMonths, double delayMonths) {
-    double stretch = Math.exp(Assumption.COATING_LIFE.lnSpread());
-    double months = 60;
-    if (delayMonths > 0) {
-      double longer = unshielded.after(delayMonths * stretch).um(months);
-      double um = dose.um(months);
-      return um > 0 && longer > 0 ? Math.max(-1, Math.log(longer / um)) : um > 0 ? -1 : 0;
-    }
-    if (!(throughMonths < months)) {
-      return 0;
-    }
-    // The same coating read at an earlier age: what a longer life does to the dose.
-    double um = dose.um(months);
-    double longer = dose.um(months / stretch) * stretch;
-    return um > 0 && longer > 0 ? Math.max(-1, Math.min(0, Math.log(longer / um))) : 0;
+  private static double coatingShift(double throughMonths, double delayMonths) {
+    boolean wears = delayMonths > 0 || throughMonths < PACE_MONTHS;
+    return wears ? -Assumption.COATING_LIFE.lnSpread() : 0;
   }
 
   private FilmLoss loss(CellSpec spec) {
