@@ -1,6 +1,7 @@
 package saltspoke.atmosphere;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Optional;
@@ -80,6 +81,42 @@ public final class AirModel {
         List.copyOf(flags));
   }
 
+  /**
+   * The annual means at a place that the class follows from, as in {@link #at} without overrides,
+   * to the last bit: no wet hours, no probabilities, a fraction of the work. For maps.
+   */
+  public AirGlance glance(Place place) {
+    Setting setting = Settings.guess(place.surroundings());
+    MonthMeans means = climate.means(place);
+    SeaSalt model = seaSalt(place, setting, Arrays.stream(means.rainMm()).sum());
+    List<Double> monthly = new ArrayList<>();
+    double temperatureC = 0;
+    double humidityPct = 0;
+    for (int m = 0; m < PlaceFields.MONTHS; m++) {
+      temperatureC += means.temperatureC()[m] / PlaceFields.MONTHS;
+      humidityPct += means.relativeHumidityPct()[m] / PlaceFields.MONTHS;
+      monthly.add(model.monthMgPerM2Day(winds.at(place, m + 1, means.windMPerS()[m])));
+    }
+    Settings.So2 so2 = Settings.so2(setting, false, countries.find(place.countryCode()));
+    return new AirGlance(
+        new Exposure(
+            temperatureC,
+            humidityPct,
+            so2.depositionMgPerM2Day().median(),
+            SeaSalt.annual(monthly).median()),
+        new InputSpread(
+            TEMPERATURE_SPREAD_K, HUMIDITY_SPREAD_PCT, so2.lnSpread(), SeaSalt.LN_SPREAD));
+  }
+
+  private SeaSalt seaSalt(Place place, Setting setting, double rainMmPerYear) {
+    return new SeaSalt(
+        place.sea(),
+        SaltPaths.crestsAboveLowAirM(place, elevation),
+        SaltPaths.roughness(setting, place.sea().distanceKm()),
+        place.elevationM(),
+        rainMmPerYear);
+  }
+
   private record Salt(List<MonthAir> months, Quantiles annual, double lnSpread) {}
 
   private record Sulfur(Quantiles annual, double lnSpread) {}
@@ -91,20 +128,14 @@ public final class AirModel {
       AirOverrides overrides,
       Set<Note> flags) {
     double rainMmPerYear = months.stream().mapToDouble(MonthClimate::rainMm).sum();
-    SeaSalt model =
-        new SeaSalt(
-            place.sea(),
-            SaltPaths.crestsAboveLowAirM(place, elevation),
-            SaltPaths.roughness(setting, place.sea().distanceKm()),
-            place.elevationM(),
-            rainMmPerYear);
+    SeaSalt model = seaSalt(place, setting, rainMmPerYear);
     List<Double> monthly = new ArrayList<>();
     double calmestHeld = Double.POSITIVE_INFINITY;
     for (MonthClimate month : months) {
       if (SaltKernel.heldWind(month.windMPerS()) != month.windMPerS()) {
         calmestHeld = Math.min(calmestHeld, month.windMPerS());
       }
-      monthly.add(model.monthMgPerM2Day(winds.at(place, month)));
+      monthly.add(model.monthMgPerM2Day(winds.at(place, month.month(), month.windMPerS())));
     }
     if (calmestHeld < Double.POSITIVE_INFINITY) {
       flags.add(SaltKernel.windHeld(calmestHeld));

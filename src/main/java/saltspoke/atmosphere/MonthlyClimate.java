@@ -45,6 +45,12 @@ public final class MonthlyClimate {
     return means(latitudeDeg, longitudeDeg, elevationM, seaDistanceKm).climate(latitudeDeg);
   }
 
+  /** The modelled monthly means at a place, without what follows from them. */
+  public MonthMeans means(Place place) {
+    return means(
+        place.latitudeDeg(), place.longitudeDeg(), place.elevationM(), place.sea().distanceKm());
+  }
+
   /** The modelled monthly means alone. */
   public MonthMeans means(
       double latitudeDeg, double longitudeDeg, double elevationM, double seaDistanceKm) {

@@ -28,9 +28,13 @@ final class WindFields {
         data.stack("wind-direction-monthly-u"), data.stack("wind-direction-monthly-v"));
   }
 
-  WindMonth at(Place place, MonthClimate month) {
-    double speed = SaltKernel.heldWind(month.windMPerS());
-    int band = month.month() - 1;
+  /**
+   * @param month 1..12
+   * @param windMPerS its mean speed at the place
+   */
+  WindMonth at(Place place, int month, double windMPerS) {
+    double speed = SaltKernel.heldWind(windMPerS);
+    int band = month - 1;
     double u = eastward.sample(band, place.latitudeDeg(), place.longitudeDeg());
     double v = northward.sample(band, place.latitudeDeg(), place.longitudeDeg());
     if (Double.isNaN(u) || Double.isNaN(v)) {

@@ -8,14 +8,21 @@ import saltspoke.advice.AdviceRequest;
 import saltspoke.advice.Advisor;
 import saltspoke.advice.Sensitivity;
 import saltspoke.advice.Tornado;
+import saltspoke.atlas.AtlasLayer;
+import saltspoke.atlas.LayerValues;
+import saltspoke.atlas.PointValues;
+import saltspoke.atlas.RegionOutlook;
 import saltspoke.atmosphere.AirClimate;
 import saltspoke.atmosphere.AirModel;
 import saltspoke.atmosphere.AirOverrides;
+import saltspoke.atmosphere.MonthlyClimate;
 import saltspoke.fields.DataSet;
+import saltspoke.places.Area;
 import saltspoke.places.Place;
 import saltspoke.places.PlaceDirectory;
 import saltspoke.places.PlaceHit;
 import saltspoke.places.PlaceOverrides;
+import saltspoke.places.Regions;
 import saltspoke.values.Refusal;
 import saltspoke.wheel.Catalogue;
 import saltspoke.wheel.Profiles;
@@ -32,12 +39,14 @@ public final class Answers {
   private final Catalogue catalogue = Catalogue.shipped();
   private final Profiles profiles = Profiles.shipped();
   private final Supplier<Advisor> advisor;
+  private final Supplier<Regions> regions;
 
   public Answers(DataSet dataSet) {
     this.dataSet = dataSet;
     this.places = once(() -> PlaceDirectory.open(dataSet));
     this.airModel = once(() -> AirModel.from(dataSet));
     this.advisor = once(() -> new Advisor(catalogue));
+    this.regions = once(() -> Regions.from(dataSet));
   }
 
   /** Begins to make the air model and the advisor in the background, while the place is sought. */
@@ -123,6 +132,64 @@ public final class Answers {
     AirClimate air = air(PlaceQuestion.from(parameters));
     return new Sensitivity(catalogue)
         .of(air, Questions.wheel(parameters, profiles.get(profileName(parameters))));
+  }
+
+  /** The values of an atlas layer at any point. */
+  public PointValues values(AtlasLayer layer) {
+    return LayerValues.of(layer, places.get(), airModel.get(), MonthlyClimate.from(dataSet));
+  }
+
+  /** The same for the ready profile that the question names. */
+  public PointValues firstLook(Parameters parameters) {
+    return firstLook(parameters, profiles.get(profileName(parameters)));
+  }
+
+  /** The months to the first look at any point, for the one pairing in question. */
+  public PointValues firstLook(Parameters parameters, RidingProfile profile) {
+    AdviceRequest request = Questions.wheel(parameters, profile);
+    int pairings =
+        catalogue
+            .pairings(request.rim(), request.nipple(), request.between(), request.spoke())
+            .size();
+    if (pairings != 1) {
+      throw Refusal.wrongUse(
+          "not-one-pairing",
+          "pairing",
+          pairings + " pairings",
+          "rim, nipple, interface and spoke of one pairing");
+    }
+    Advisor one = advisor.get();
+    return LayerValues.firstLook(
+        places.get(), airModel.get(), air -> one.pairings(air, request).get(0).firstLookMonths());
+  }
+
+  /** First-level regions of the world. */
+  public Regions regions() {
+    return regions.get();
+  }
+
+  /**
+   * What an area is like for the people who live in it.
+   *
+   * @param profile how they ride; nothing leaves the wheels out
+   */
+  public RegionOutlook outlook(Area area, Parameters parameters, Optional<RidingProfile> profile) {
+    int sample = parameters.whole("sample", 4, 400, RegionOutlook.USUAL_SAMPLE);
+    return RegionOutlook.of(
+        area,
+        places.get(),
+        airModel.get(),
+        sample,
+        profile.map(
+            ridden -> {
+              AdviceRequest request = Questions.wheel(parameters, ridden);
+              return air -> advisor.get().pairings(air, request);
+            }));
+  }
+
+  /** The ready profile that a question names, if it names one. */
+  public Optional<RidingProfile> namedProfile(Parameters parameters) {
+    return parameters.text("profile").map(profiles::get);
   }
 
   private static String profileName(Parameters parameters) {

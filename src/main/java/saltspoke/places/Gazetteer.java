@@ -129,6 +129,22 @@ final class Gazetteer {
     return near;
   }
 
+  /** Towns whose centre lies in an area. */
+  List<Town> within(Area area) {
+    double[] box = area.box();
+    List<Town> found = new ArrayList<>();
+    for (Town town : all()) {
+      if (town.longitudeDeg >= box[0]
+          && town.latitudeDeg >= box[1]
+          && town.longitudeDeg <= box[2]
+          && town.latitudeDeg <= box[3]
+          && area.contains(town.latitudeDeg, town.longitudeDeg)) {
+        found.add(town);
+      }
+    }
+    return found;
+  }
+
   static double distanceKm(Town town, double latitudeDeg, double longitudeDeg) {
     double phi1 = Math.toRadians(town.latitudeDeg);
     double phi2 = Math.toRadians(latitudeDeg);

@@ -80,6 +80,24 @@ public final class PlaceDirectory {
         flags);
   }
 
+  /** Towns whose centre lies in an area, in the order of the gazetteer. */
+  public List<PlaceHit> within(Area area) {
+    return gazetteer.within(area).stream().map(gazetteer::hit).toList();
+  }
+
+  /** The place of a town that a search found. */
+  public Place of(PlaceHit hit) {
+    return assembly.named(
+        hit.name(),
+        hit.regionName(),
+        hit.countryCode(),
+        hit.lat(),
+        hit.lon(),
+        hit.elevationM(),
+        PlaceOverrides.NONE,
+        new ArrayList<>());
+  }
+
   /** The place of a postcode. Leading zeros that a spreadsheet ate are put back, with a flag. */
   public Place byPostcode(String code, String countryCode, PlaceOverrides overrides) {
     PostcodeBook.Found found = postcodes.find(code, countryCode);
