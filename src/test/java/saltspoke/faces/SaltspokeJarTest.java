@@ -10,6 +10,7 @@ import java.io.BufferedReader;
 import java.io.ByteArrayInputStream;
 import java.io.IOException;
 import java.io.InputStreamReader;
+import java.io.Reader;
 import java.net.URI;
 import java.net.http.HttpClient;
 import java.net.http.HttpRequest;
@@ -18,9 +19,16 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
+import java.util.Properties;
 import java.util.concurrent.TimeUnit;
+import java.util.jar.JarEntry;
+import java.util.jar.JarFile;
+import java.util.stream.Stream;
 import javax.imageio.ImageIO;
+import org.apache.commons.csv.CSVFormat;
+import org.apache.commons.csv.CSVRecord;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -188,6 +196,53 @@ class SaltspokeJarTest {
       assertTrue(server.waitFor(30, TimeUnit.SECONDS));
     }
     assertEquals("", Files.readString(err));
+  }
+
+  @Test
+  void everyLibraryInTheJarHasItsLicenceNamed() throws Exception {
+    try (JarFile jar = new JarFile(JAR.toFile())) {
+      List<CSVRecord> rows;
+      try (Reader in =
+          new InputStreamReader(
+              jar.getInputStream(jar.getEntry("saltspoke/licences/libraries.csv")),
+              StandardCharsets.UTF_8)) {
+        rows =
+            CSVFormat.DEFAULT
+                .builder()
+                .setHeader()
+                .setSkipHeaderRecord(true)
+                .setCommentMarker('#')
+                .get()
+                .parse(in)
+                .getRecords();
+      }
+      int libraries = 0;
+      for (JarEntry entry : Collections.list(jar.entries())) {
+        if (entry.getName().matches("META-INF/maven/.*/pom.properties")) {
+          Properties library = new Properties();
+          library.load(jar.getInputStream(entry));
+          String name = library.getProperty("groupId") + ":" + library.getProperty("artifactId");
+          if (!name.equals("saltspoke:saltspoke")) {
+            libraries++;
+            assertTrue(rows.stream().anyMatch(row -> names(row, library)), name);
+          }
+        }
+      }
+      assertTrue(libraries > 20);
+    }
+  }
+
+  private static boolean names(CSVRecord row, Properties library) {
+    boolean group =
+        Stream.of(row.get("group").split("; "))
+            .anyMatch(
+                named ->
+                    library.getProperty("groupId").equals(named)
+                        || library.getProperty("groupId").startsWith(named + "."));
+    return group
+        && (!row.get("within").isEmpty()
+            || row.get("artifact").equals(library.getProperty("artifactId"))
+                && row.get("version").equals(library.getProperty("version")));
   }
 
   private static byte[] get(String base, String path) throws Exception {
