@@ -123,7 +123,7 @@ final class Reasons {
         Note.of(
             code,
             "rim",
-            worked.parts().rim().title(),
+            worked.pairing().rim(),
             "umPerYear",
             Answer.rounded(limiting.dose().steady().um(12))));
   }
