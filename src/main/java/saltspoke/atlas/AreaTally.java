@@ -9,6 +9,7 @@ import org.locationtech.jts.geom.Coordinate;
 import org.locationtech.jts.geom.GeometryFactory;
 import saltspoke.atmosphere.Category;
 import saltspoke.places.Area;
+import saltspoke.places.AreaIndex;
 
 /** Sums the cells of an atlas by area. */
 public final class AreaTally {

@@ -55,17 +55,18 @@ public record RegionOutlook(
   private record Peopled(PlaceHit town, Place place, AirGlance air, double weight) {}
 
   /**
+   * @param towns those that belong to the area
    * @param sample most towns of the sample
    * @param pairings advice in an air; nothing leaves the wheels out
    * @throws Refusal when no shipped town lies in the area
    */
   public static RegionOutlook of(
       Area area,
+      List<PlaceHit> towns,
       PlaceDirectory places,
       AirModel air,
       int sample,
       Optional<Function<AirClimate, List<PairingAdvice>>> pairings) {
-    List<PlaceHit> towns = places.within(area);
     if (towns.isEmpty()) {
       throw Refusal.notFound(
           "no-towns", "region", area.name(), "an area with a town of at least 1,000 people");

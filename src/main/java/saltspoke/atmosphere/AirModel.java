@@ -95,7 +95,9 @@ public final class AirModel {
     for (int m = 0; m < PlaceFields.MONTHS; m++) {
       temperatureC += means.temperatureC()[m] / PlaceFields.MONTHS;
       humidityPct += means.relativeHumidityPct()[m] / PlaceFields.MONTHS;
-      monthly.add(model.monthMgPerM2Day(winds.at(place, m + 1, means.windMPerS()[m])));
+    }
+    for (WindMonth wind : winds.year(place, means.windMPerS())) {
+      monthly.add(model.monthMgPerM2Day(wind));
     }
     Settings.So2 so2 = Settings.so2(setting, false, countries.find(place.countryCode()));
     return new AirGlance(
@@ -135,7 +137,10 @@ public final class AirModel {
       if (SaltKernel.heldWind(month.windMPerS()) != month.windMPerS()) {
         calmestHeld = Math.min(calmestHeld, month.windMPerS());
       }
-      monthly.add(model.monthMgPerM2Day(winds.at(place, month.month(), month.windMPerS())));
+    }
+    double[] windMPerS = months.stream().mapToDouble(MonthClimate::windMPerS).toArray();
+    for (WindMonth wind : winds.year(place, windMPerS)) {
+      monthly.add(model.monthMgPerM2Day(wind));
     }
     if (calmestHeld < Double.POSITIVE_INFINITY) {
       flags.add(SaltKernel.windHeld(calmestHeld));

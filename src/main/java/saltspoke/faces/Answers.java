@@ -171,12 +171,18 @@ public final class Answers {
   /**
    * What an area is like for the people who live in it.
    *
+   * @param belongs which points are of the area
    * @param profile how they ride; nothing leaves the wheels out
    */
-  public RegionOutlook outlook(Area area, Parameters parameters, Optional<RidingProfile> profile) {
+  public RegionOutlook outlook(
+      Area area,
+      Regions.PointTest belongs,
+      Parameters parameters,
+      Optional<RidingProfile> profile) {
     int sample = parameters.whole("sample", 4, 400, RegionOutlook.USUAL_SAMPLE);
     return RegionOutlook.of(
         area,
+        places.get().within(belongs),
         places.get(),
         airModel.get(),
         sample,

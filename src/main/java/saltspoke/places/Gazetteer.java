@@ -129,20 +129,10 @@ final class Gazetteer {
     return near;
   }
 
-  /** Towns whose centre lies in an area. */
-  List<Town> within(Area area) {
-    double[] box = area.box();
-    List<Town> found = new ArrayList<>();
-    for (Town town : all()) {
-      if (town.longitudeDeg >= box[0]
-          && town.latitudeDeg >= box[1]
-          && town.longitudeDeg <= box[2]
-          && town.latitudeDeg <= box[3]
-          && area.contains(town.latitudeDeg, town.longitudeDeg)) {
-        found.add(town);
-      }
-    }
-    return found;
+  List<Town> within(Regions.PointTest test) {
+    return all().parallelStream()
+        .filter(town -> test.test(town.latitudeDeg, town.longitudeDeg))
+        .toList();
   }
 
   static double distanceKm(Town town, double latitudeDeg, double longitudeDeg) {

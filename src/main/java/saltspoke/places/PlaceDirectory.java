@@ -80,9 +80,9 @@ public final class PlaceDirectory {
         flags);
   }
 
-  /** Towns whose centre lies in an area, in the order of the gazetteer. */
-  public List<PlaceHit> within(Area area) {
-    return gazetteer.within(area).stream().map(gazetteer::hit).toList();
+  /** Towns whose centre passes a test, in the order of the gazetteer. */
+  public List<PlaceHit> within(Regions.PointTest test) {
+    return gazetteer.within(test).stream().map(gazetteer::hit).toList();
   }
 
   /** The place of a town that a search found. */

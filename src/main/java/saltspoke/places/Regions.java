@@ -4,9 +4,12 @@ import java.io.IOException;
 import java.io.InputStream;
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.Collections;
+import java.util.IdentityHashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import java.util.function.Predicate;
 import java.util.stream.Collectors;
 import saltspoke.fields.DataSet;
@@ -26,6 +29,7 @@ public final class Regions {
 
   private final List<Region> regions;
   private final NameTables countries;
+  private AreaIndex index;
 
   private Regions(List<Region> regions, NameTables countries) {
     this.regions = List.copyOf(regions);
@@ -59,6 +63,30 @@ public final class Regions {
   /** Every region, in the order of the layer. */
   public List<Area> all() {
     return regions.stream().map(Region::area).toList();
+  }
+
+  /** Whether a point belongs to an area that {@link #find} gave: inside, or beside it. */
+  public PointTest belongingTo(Area area) {
+    Set<List<double[]>> parts = Collections.newSetFromMap(new IdentityHashMap<>());
+    parts.addAll(area.polygons());
+    AreaIndex all = index();
+    return (lat, lon) -> {
+      int region = all.at(lat, lon);
+      return region >= 0 && parts.contains(regions.get(region).area.polygons().get(0));
+    };
+  }
+
+  private synchronized AreaIndex index() {
+    if (index == null) {
+      index = new AreaIndex(all());
+    }
+    return index;
+  }
+
+  /** Whether a point belongs to something. */
+  @FunctionalInterface
+  public interface PointTest {
+    boolean test(double latitudeDeg, double longitudeDeg);
   }
 
   /**

@@ -77,7 +77,12 @@ final class RegionCommand implements Callable<Integer> {
         wheel.profileFile == null
             ? answers.namedProfile(parameters)
             : Optional.of(wheel.ownProfile(parameters));
-    RegionOutlook outlook = answers.outlook(area, parameters, profile);
+    RegionOutlook outlook =
+        answers.outlook(
+            area,
+            polygon == null ? answers.regions().belongingTo(area) : area::contains,
+            parameters,
+            profile);
     spec.commandLine()
         .getOut()
         .println(
