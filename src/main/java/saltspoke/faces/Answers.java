@@ -168,6 +168,16 @@ public final class Answers {
     return regions.get();
   }
 
+  /** What the region that a question names is like, for a ready profile if it names one. */
+  public RegionOutlook outlook(Parameters parameters) {
+    String name =
+        parameters
+            .text("region")
+            .orElseThrow(() -> Refusal.wrongUse("empty", "region", "", "a region's name"));
+    Area area = regions.get().find(name);
+    return outlook(area, regions.get().belongingTo(area), parameters, namedProfile(parameters));
+  }
+
   /**
    * What an area is like for the people who live in it.
    *
