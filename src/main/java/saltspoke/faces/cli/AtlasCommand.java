@@ -32,6 +32,7 @@ import saltspoke.faces.export.AtlasPicture;
 import saltspoke.faces.export.AtlasWorkFile;
 import saltspoke.faces.export.CloudGeoTiff;
 import saltspoke.faces.export.CoordinateSystem;
+import saltspoke.faces.picture.LayerStyle;
 import saltspoke.faces.picture.LayerStyles;
 import saltspoke.values.Note;
 import saltspoke.values.Refusal;
@@ -167,7 +168,16 @@ final class AtlasCommand implements Callable<Integer> {
     String source = texts.say(Note.of("atlas-source", "version", About.version()));
     PrintWriter console = spec.commandLine().getOut();
     switch (form(file)) {
-      case "png" -> AtlasPicture.write(file, frame, LayerStyles.of(which), tiles, title, source);
+      case "png" -> {
+        LayerStyle style = LayerStyles.of(which);
+        String unit = which == AtlasLayer.FIRST_LOOK ? texts.say("atlas-months") : style.unit();
+        AtlasPicture.write(
+            file,
+            frame,
+            style,
+            tiles,
+            new AtlasPicture.Words(title, wheel.title(texts), unit, source));
+      }
       case "geojson" -> {
         List<AreaValue> areas =
             AreaTally.of(
