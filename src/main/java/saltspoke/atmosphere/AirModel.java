@@ -18,28 +18,34 @@ public final class AirModel {
   private final CountryAir countries;
   private final FieldStack elevation;
   private final WindFields winds;
+  private final SiteCorrections corrections;
 
   private AirModel(
-      MonthlyClimate climate, CountryAir countries, FieldStack elevation, WindFields winds) {
+      MonthlyClimate climate,
+      CountryAir countries,
+      FieldStack elevation,
+      WindFields winds,
+      SiteCorrections corrections) {
     this.climate = climate;
     this.countries = countries;
     this.elevation = elevation;
     this.winds = winds;
+    this.corrections = corrections;
   }
-
-  /** One standard deviation of the modelled annual mean temperature, K (judged on stations). */
-  private static final double TEMPERATURE_SPREAD_K = 1.0;
-
-  /** One standard deviation of the modelled annual mean humidity, points (judged on stations). */
-  private static final double HUMIDITY_SPREAD_PCT = 5.0;
 
   /** Over the layers of a data set. */
   public static AirModel from(DataSet data) {
+    return from(data, SiteCorrections.NONE);
+  }
+
+  /** Over the layers of a data set, moved by local measurements near their sites. */
+  public static AirModel from(DataSet data, SiteCorrections corrections) {
     return new AirModel(
         MonthlyClimate.from(data),
         CountryAir.read(CsvTable.read(data.open(CountryAir.LAYER), CountryAir.LAYER + ".csv")),
         data.stack("elevation"),
-        WindFields.from(data));
+        WindFields.from(data),
+        corrections);
   }
 
   /** The air at a place. */
@@ -49,14 +55,15 @@ public final class AirModel {
     Optional<CountryAir.Country> country = countries.find(place.countryCode());
     Setting setting = overrides.setting().orElseGet(() -> Settings.guess(place.surroundings()));
 
-    Salt salt = salt(place, setting, climate.at(place), overrides, flags);
+    Climate moved = climate(place, flags);
+    Salt salt = salt(place, setting, moved.months(), overrides, flags);
     Sulfur sulfur = sulfur(setting, country, overrides, flags);
     AnnualAir annual = annual(salt.months());
     Exposure exposure = exposure(annual, sulfur, salt, overrides, flags);
     InputSpread spread =
         new InputSpread(
-            overrides.temperatureC().isPresent() ? 0 : TEMPERATURE_SPREAD_K,
-            overrides.relativeHumidityPct().isPresent() ? 0 : HUMIDITY_SPREAD_PCT,
+            overrides.temperatureC().isPresent() ? 0 : moved.temperatureSpreadK(),
+            overrides.relativeHumidityPct().isPresent() ? 0 : moved.humiditySpreadPct(),
             sulfur.lnSpread(),
             salt.lnSpread());
     List<MetalCorrosivity> corrosivity = Corrosion.assess(exposure, spread);
@@ -78,6 +85,32 @@ public final class AirModel {
         road.roadSalt(),
         ClassSummary.of(corrosivity.get(Metal.CARBON_STEEL.ordinal()), exposure, spread),
         List.copyOf(flags));
+  }
+
+  private record Climate(
+      List<MonthClimate> months, double temperatureSpreadK, double humiditySpreadPct) {}
+
+  private Climate climate(Place place, Set<Note> flags) {
+    SiteMove warmer = moved(CorrectedQuantity.TEMPERATURE, place, flags);
+    SiteMove moister = moved(CorrectedQuantity.RELATIVE_HUMIDITY, place, flags);
+    MonthMeans means = climate.means(place);
+    if (!warmer.isNone() || !moister.isNone()) {
+      means = means.moved(warmer.departure(), moister.departure());
+    }
+    double elevationM = place.elevationM();
+    return new Climate(
+        means.climate(place.latitudeDeg()),
+        warmer.spreadFactor() * ClimateSpread.annualTemperatureK(elevationM),
+        moister.spreadFactor() * ClimateSpread.annualHumidityPct(elevationM));
+  }
+
+  /** How far local measurements move a quantity, said in the flags where they do. */
+  private SiteMove moved(CorrectedQuantity quantity, Place place, Set<Note> flags) {
+    SiteMove move = corrections.at(quantity, CorrectionSpot.of(place));
+    if (!move.isNone()) {
+      flags.add(move.note(quantity));
+    }
+    return move;
   }
 
   private record Salt(List<MonthAir> months, Quantiles annual, double lnSpread) {}
@@ -109,10 +142,17 @@ public final class AirModel {
     if (calmestHeld < Double.POSITIVE_INFINITY) {
       flags.add(SaltKernel.windHeld(calmestHeld));
     }
-    Quantiles annual = SeaSalt.annual(monthly);
     ChlorideFromSite.distanceFlag(place.sea().distanceKm()).ifPresent(flags::add);
     double scale = 1;
     double lnSpread = SeaSalt.LN_SPREAD;
+    if (overrides.chlorideMgPerM2Day().isEmpty()) {
+      SiteMove saltier = moved(CorrectedQuantity.CHLORIDE, place, flags);
+      for (int m = 0; m < monthly.size(); m++) {
+        monthly.set(m, monthly.get(m) * Math.exp(saltier.departure()[m]));
+      }
+      lnSpread *= saltier.spreadFactor();
+    }
+    Quantiles annual = SeaSalt.annual(monthly, lnSpread);
     if (overrides.chlorideMgPerM2Day().isPresent()) {
       double given = overrides.chlorideMgPerM2Day().getAsDouble();
       scale = given / annual.median();

@@ -28,9 +28,9 @@ public final class MonthlyClimate {
     return new MonthlyClimate(new PlaceFields(layers));
   }
 
-  /** January to December at a place. */
-  public List<MonthClimate> at(Place place) {
-    return at(
+  /** The modelled monthly means at a place. */
+  public MonthMeans means(Place place) {
+    return means(
         place.latitudeDeg(), place.longitudeDeg(), place.elevationM(), place.sea().distanceKm());
   }
 

@@ -27,6 +27,7 @@ import saltspoke.wheel.RidingProfile;
  */
 public final class Answers {
   private final DataSet dataSet;
+  private final LocalCorrections corrections;
   private final Supplier<PlaceDirectory> places;
   private final Supplier<AirModel> airModel;
   private final Catalogue catalogue = Catalogue.shipped();
@@ -34,9 +35,15 @@ public final class Answers {
   private final Supplier<Advisor> advisor;
 
   public Answers(DataSet dataSet) {
+    this(dataSet, LocalCorrections.NONE);
+  }
+
+  /** Answers that local measurements move near their sites. */
+  public Answers(DataSet dataSet, LocalCorrections corrections) {
     this.dataSet = dataSet;
+    this.corrections = corrections;
     this.places = once(() -> PlaceDirectory.open(dataSet));
-    this.airModel = once(() -> AirModel.from(dataSet));
+    this.airModel = once(() -> AirModel.from(dataSet, corrections.sites()));
     this.advisor = once(() -> new Advisor(catalogue));
   }
 
@@ -60,6 +67,10 @@ public final class Answers {
 
   public DataSet dataSet() {
     return dataSet;
+  }
+
+  public LocalCorrections corrections() {
+    return corrections;
   }
 
   public Catalogue catalogue() {
