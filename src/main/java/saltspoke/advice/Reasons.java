@@ -33,7 +33,7 @@ final class Reasons {
       notes.add(Note.of("advice-polymer-not-modelled"));
     }
     if (nipple.gallsOnSpoke()) {
-      notes.add(Note.of("advice-galling", "nipple", nipple.title()));
+      notes.add(Note.of("advice-galling", "nipple", nipple.id()));
     }
     if (nipple.cracksInAmmonia() && request.profile().sealant() == Sealant.AMMONIATED) {
       notes.add(Note.of("advice-ammonia-cracking"));
@@ -123,7 +123,7 @@ final class Reasons {
         Note.of(
             code,
             "rim",
-            worked.parts().rim().title(),
+            worked.pairing().rim(),
             "umPerYear",
             Answer.rounded(limiting.dose().steady().um(12))));
   }

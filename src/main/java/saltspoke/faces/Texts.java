@@ -96,7 +96,7 @@ public final class Texts {
   /** A value for a gap; the id of a part or choice gives way to its title on the page. */
   private String fill(String gap, Object value) {
     String title =
-        sentences.get(gap.equals("part") ? "page-" + value : "page-" + gap + "-" + value);
+        sentences.get(gap.equals("part") ? "part-" + value : "page-" + gap + "-" + value);
     return value instanceof String && title != null ? title : format(value);
   }
 

@@ -1,6 +1,7 @@
 package saltspoke.faces.cli;
 
 import java.util.List;
+import java.util.Locale;
 import saltspoke.advice.Advice;
 import saltspoke.advice.Change;
 import saltspoke.advice.PairingAdvice;
@@ -27,7 +28,7 @@ final class AdviceText {
           texts.format(pairing.firstLookMonths()),
           texts.format(pairing.everyMonths()),
           pairing.replaceByMonths() == null ? ">240" : texts.format(pairing.replaceByMonths()),
-          times(pairing.seizedMonths()),
+          times(pairing.seizedMonths(), texts),
           pairing.pairing().rim(),
           pairing.pairing().nipple(),
           pairing.pairing().between(),
@@ -40,9 +41,9 @@ final class AdviceText {
           out,
           "\nFirst visible attack (%s): %s months; loss of a head or bed (%s): %s months",
           focus.firstAttackMonths().part(),
-          times(focus.firstAttackMonths()),
+          times(focus.firstAttackMonths(), texts),
           focus.headLossMonths().part(),
-          times(focus.headLossMonths()));
+          times(focus.headLossMonths(), texts));
       AirText.notes(out, "\nWhy:", focus.reasons(), texts);
     }
     changes(out, advice.changes(), texts);
@@ -70,21 +71,29 @@ final class AdviceText {
             change ->
                 AirText.line(
                     out,
-                    "  %s (%s): first look at %s months, × %s",
+                    "  %s First look at %s months, × %s (%s)",
                     texts.say(change.what()),
-                    change.cost(),
                     texts.format(change.firstLookMonths()),
-                    texts.format(change.factor())));
+                    texts.format(change.factor()),
+                    change.cost()));
   }
 
-  private static String times(StateTimes times) {
+  private static String times(StateTimes times, Texts texts) {
     if (times.notApplicable()) {
       return "–";
     }
-    return month(times.p10()) + "–" + month(times.median()) + "–" + month(times.p90());
+    return month(times.p10(), texts)
+        + "–"
+        + month(times.median(), texts)
+        + "–"
+        + month(times.p90(), texts);
   }
 
-  private static String month(Double months) {
-    return months == null ? ">240" : String.valueOf(Math.round(months));
+  private static String month(Double months, Texts texts) {
+    if (months == null) {
+      return ">240";
+    }
+    Locale locale = Locale.forLanguageTag(texts.language());
+    return String.format(locale, months < 9.95 ? "%.1f" : "%.0f", months);
   }
 }

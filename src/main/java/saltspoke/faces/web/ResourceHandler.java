@@ -56,7 +56,7 @@ final class ResourceHandler extends Handler.Abstract {
           HttpStatus.PAYLOAD_TOO_LARGE_413,
           error("too-large", "body", "", "at most " + MOST_BODY_BYTES + " bytes"),
           callback);
-    } catch (RuntimeException e) {
+    } catch (RuntimeException | LinkageError e) {
       System.err.println(
           "saltspoke: a bug while answering " + request.getHttpURI().getDecodedPath());
       e.printStackTrace();

@@ -1,14 +1,10 @@
 package saltspoke.wheel.damage;
 
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.Optional;
 import saltspoke.atmosphere.AirClimate;
-import saltspoke.atmosphere.Metal;
-import saltspoke.atmosphere.MetalCorrosivity;
 import saltspoke.atmosphere.MonthAir;
 import saltspoke.values.Quantiles;
 import saltspoke.wheel.CellSpec;
@@ -16,7 +12,6 @@ import saltspoke.wheel.Coating;
 import saltspoke.wheel.Material;
 import saltspoke.wheel.Nipple;
 import saltspoke.wheel.RidingProfile;
-import saltspoke.wheel.Spoke;
 import saltspoke.wheel.ThreadCompound;
 import saltspoke.wheel.WheelBuild;
 import saltspoke.wheel.WheelYear;
@@ -42,17 +37,11 @@ public final class Sites {
   /** The same for the length of the bare ring: 0.2. */
   private static final double RING_ELASTICITY = 0.2;
 
-  /** Loss of the rim bed over its thickness at which it cracks at the hole. ASSUMPTION. */
-  private static final double BED_SHARE = 0.5;
-
   /** A coating that outlives this, twice what the advice looks ahead, is taken as lasting. */
   private static final double HORIZON_MONTHS = 480;
 
   /** Time over which the pace of a coated part is evened out, five years, months. ASSUMPTION. */
   private static final double PACE_MONTHS = 60;
-
-  /** Tensile strength of spoke wire, MPa, common practice. */
-  private static final double WIRE_MPA = 1000;
 
   private static final Maturity SEAT = new Maturity(0);
   private static final Maturity OILED = new Maturity(9);
@@ -102,8 +91,10 @@ public final class Sites {
     if (Fretting.relative(nipple.material()) > 0) {
       sites.add(made.computeIfAbsent(List.of("wear", nipple.id()), k -> wornThread(nipple)));
     }
-    if (showsInOpenAir(nipple)) {
-      sites.add(made.computeIfAbsent(List.of("open-air", nipple.id()), k -> openAir(nipple)));
+    if (OpenAir.shows(nipple, build)) {
+      sites.add(
+          made.computeIfAbsent(
+              List.of("open-air", nipple.id()), k -> OpenAir.site(nipple, air, profile)));
     }
     return sites;
   }
@@ -144,10 +135,10 @@ public final class Sites {
         dose,
         monthly,
         thread
-            ? seized(parts, couple) * Products.STIFF_SHARE
+            ? SiteLimits.seizedUm(parts, couple) * Products.STIFF_SHARE
             : Products.visibleAtSeatUm(couple.metal()),
-        seized(parts, couple),
-        lost(parts, couple),
+        SiteLimits.seizedUm(parts, couple),
+        SiteLimits.lostUm(parts, couple, build.tensionN()),
         ln);
   }
 
@@ -262,49 +253,6 @@ public final class Sites {
     };
   }
 
-  private static double seized(Parts parts, Couple couple) {
-    if (couple.where() == Couple.Where.THREAD) {
-      return couple.metal() == Material.ZINC
-          ? Double.POSITIVE_INFINITY
-          : Products.metalToFillUm(couple.metal(), Products.THREAD_GAP_UM);
-    }
-    return Products.metalToFillUm(couple.metal(), seatGapUm(parts, couple));
-  }
-
-  /** Room round the nipple's body in the rim hole over the area of the ring that feeds it, µm. */
-  private static double seatGapUm(Parts parts, Couple couple) {
-    double holeMm = parts.rim().holeDiameterMm();
-    double bodyMm = parts.nipple().bodyDiameterMm();
-    double roomMm3 =
-        Math.PI / 4 * (holeMm * holeMm - bodyMm * bodyMm) * parts.rim().bedThicknessMm();
-    double ringMm2 = couple.wholeRing().ringCircumferenceMm() * couple.wholeRing().ringWidthMm();
-    return 1000 * Products.SEAT_FILL * roomMm3 / ringMm2;
-  }
-
-  private double lost(Parts parts, Couple couple) {
-    double widthUm = couple.spec().ringWidthMm() * 1000;
-    boolean seat = couple.where() == Couple.Where.SEAT;
-    if (couple.part().equals("nipple") && seat) {
-      double depthMm =
-          HeadSection.criticalDepthMm(
-              parts.nipple().threadDiameterMm() / 2,
-              parts.nipple().headWallMm(),
-              build.tensionN(),
-              HeadSection.strengthMpa(couple.metal()));
-      return GrooveGrowth.doseUm(depthMm * 1000, widthUm);
-    }
-    if (couple.part().equals("rim")) {
-      return GrooveGrowth.doseUm(parts.rim().bedThicknessMm() * BED_SHARE * 1000, widthUm);
-    }
-    if (couple.part().equals("spoke") && couple.metal() == Material.CARBON_STEEL) {
-      Spoke spoke = parts.spoke();
-      double depthMm =
-          HeadSection.criticalDepthMm(0, spoke.diameterMm() / 2, build.tensionN(), WIRE_MPA);
-      return GrooveGrowth.doseUm(depthMm * 1000, widthUm);
-    }
-    return Double.POSITIVE_INFINITY;
-  }
-
   private static double[] shifts(Couple couple, FilmLoss loss, boolean thread) {
     double[] ln = new double[Assumption.values().length];
     double driven = loss.galvanicShare() + loss.localShare();
@@ -325,55 +273,11 @@ public final class Sites {
     return ln;
   }
 
-  private static void set(double[] ln, Assumption assumption, double shift) {
+  static void set(double[] ln, Assumption assumption, double shift) {
     ln[assumption.ordinal()] = shift;
   }
 
-  private static double lnSpread(Quantiles share) {
+  static double lnSpread(Quantiles share) {
     return share.p10() > 0 ? Math.log(share.p90() / share.p10()) / (2 * Z90) : 0;
-  }
-
-  /** Whether the outside of a nipple can be seen to suffer from the air alone. */
-  private boolean showsInOpenAir(Nipple nipple) {
-    Material metal = SpokeHole.surface(nipple);
-    return !build.hiddenNipples()
-        && nipple.coating().kind() != Coating.Kind.ANODIC
-        && standard(metal).isPresent()
-        && Double.isFinite(Products.visibleInOpenUm(metal));
-  }
-
-  private Site openAir(Nipple nipple) {
-    Material metal = SpokeHole.surface(nipple);
-    MetalCorrosivity loss =
-        air.corrosivity().stream()
-            .filter(entry -> entry.metal() == standard(metal).orElseThrow())
-            .findFirst()
-            .orElseThrow();
-    PowerLawDose dose = PowerLawDose.of(loss, Shelter.share(profile));
-    double[] monthly = new double[12];
-    Arrays.fill(monthly, dose.firstYearUm() / 12);
-    double[] ln = new double[Assumption.values().length];
-    set(ln, Assumption.AIR_LOSS, lnSpread(loss.firstYearLossUm()));
-    set(ln, Assumption.SHELTER, Assumption.SHELTER.lnSpread());
-    return new Site(
-        "nipple",
-        "open-air",
-        metal,
-        dose,
-        monthly,
-        Products.visibleInOpenUm(metal),
-        Double.POSITIVE_INFINITY,
-        Double.POSITIVE_INFINITY,
-        ln);
-  }
-
-  private static Optional<Metal> standard(Material material) {
-    return switch (material) {
-      case ALUMINIUM_WROUGHT, ALUMINIUM_HIGH_STRENGTH -> Optional.of(Metal.ALUMINIUM);
-      case BRASS -> Optional.of(Metal.COPPER);
-      case CARBON_STEEL -> Optional.of(Metal.CARBON_STEEL);
-      case ZINC -> Optional.of(Metal.ZINC);
-      default -> Optional.empty();
-    };
   }
 }
