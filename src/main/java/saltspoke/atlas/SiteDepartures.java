@@ -28,7 +28,7 @@ import saltspoke.values.Refusal;
  * correction file, before their spreads are set by leaving sites out.
  *
  * @param rows with the usual spread of their quantity
- * @param refused rows that give no correction, with what is missing
+ * @param refused rows that were read but give no correction, with what is missing
  */
 public record SiteDepartures(List<SiteCorrection> rows, List<Refusal> refused) {
   public SiteDepartures {
@@ -40,7 +40,7 @@ public record SiteDepartures(List<SiteCorrection> rows, List<Refusal> refused) {
   public static SiteDepartures climate(
       MonthlyClimate climate, DoubleBinaryOperator seaDistanceKm, InputStream in, String fileName) {
     StationRows<ClimateStation> stations = StationRows.read(in, fileName, StationFiles::climate);
-    Gather gather = new Gather(stations.refused());
+    Gather gather = new Gather();
     for (ClimateStation station : stations.rows()) {
       gather.addMonths(
           station.name(),
@@ -56,7 +56,7 @@ public record SiteDepartures(List<SiteCorrection> rows, List<Refusal> refused) {
   public static SiteDepartures wetness(
       MonthlyClimate climate, DoubleBinaryOperator seaDistanceKm, InputStream in, String fileName) {
     StationRows<StationYear> stations = StationYear.read(in, fileName);
-    Gather gather = new Gather(stations.refused());
+    Gather gather = new Gather();
     for (StationYear station : stations.rows()) {
       gather.addMonths(
           station.first().station(),
@@ -81,7 +81,7 @@ public record SiteDepartures(List<SiteCorrection> rows, List<Refusal> refused) {
   public static SiteDepartures chloride(
       AirModel air, PlaceDirectory places, InputStream in, String fileName) {
     StationRows<ChlorideSite> sites = StationRows.read(in, fileName, StationFiles::chloride);
-    Gather gather = new Gather(sites.refused());
+    Gather gather = new Gather();
     for (ChlorideSite site : sites.rows()) {
       try {
         gather.addSite(List.of(chloride(air, places, site)));
@@ -104,11 +104,7 @@ public record SiteDepartures(List<SiteCorrection> rows, List<Refusal> refused) {
           "",
           "both columns filled: a correction belongs to a point on the map");
     }
-    PlaceOverrides known =
-        new PlaceOverrides(
-            OptionalDouble.of(site.elevationM()), OptionalDouble.of(site.distanceKm()));
-    Place place =
-        places.at(site.latitudeDeg().getAsDouble(), site.longitudeDeg().getAsDouble(), known);
+    Place place = place(places, site);
     double estimated = air.at(place, AirOverrides.NONE).chlorideDepositionMgPerM2Day().median();
     return row(
         site.name(),
@@ -118,6 +114,18 @@ public record SiteDepartures(List<SiteCorrection> rows, List<Refusal> refused) {
         0,
         site.chlorideMgPerM2Day(),
         estimated);
+  }
+
+  private static Place place(PlaceDirectory places, ChlorideSite site) {
+    PlaceOverrides known =
+        new PlaceOverrides(
+            OptionalDouble.of(site.elevationM()), OptionalDouble.of(site.distanceKm()));
+    try {
+      return places.at(site.latitudeDeg().getAsDouble(), site.longitudeDeg().getAsDouble(), known);
+    } catch (Refusal refusal) {
+      throw Refusal.dataDamaged(
+          refusal.error(), site.where() + " " + refusal.field(), refusal.was(), refusal.allowed());
+    }
   }
 
   private static CorrectionSpot spot(
@@ -146,12 +154,8 @@ public record SiteDepartures(List<SiteCorrection> rows, List<Refusal> refused) {
   /** Gathers sites; a site that stands in the file twice counts once. */
   private static final class Gather {
     private final List<SiteCorrection> rows = new ArrayList<>();
-    private final List<Refusal> refused;
+    private final List<Refusal> refused = new ArrayList<>();
     private final Set<List<Object>> seen = new HashSet<>();
-
-    Gather(List<Refusal> refused) {
-      this.refused = new ArrayList<>(refused);
-    }
 
     void addMonths(
         String site,

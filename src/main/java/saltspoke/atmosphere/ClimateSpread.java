@@ -87,7 +87,11 @@ public final class ClimateSpread {
 
   private static Quantiles logBand(double hours, double lnSpread) {
     double factor = Math.exp(NormalLaw.Z90 * lnSpread);
-    return new Quantiles(hours / factor, hours, Math.min(HOURS_A_YEAR, hours * factor));
+    double floored = hours + WET_HOURS_FLOOR;
+    return new Quantiles(
+        Math.max(0, floored / factor - WET_HOURS_FLOOR),
+        hours,
+        Math.max(hours, Math.min(HOURS_A_YEAR, floored * factor - WET_HOURS_FLOOR)));
   }
 
   private static double wetHours(MonthMeans means, double latitudeDeg) {

@@ -8,7 +8,7 @@ public enum CorrectedQuantity {
    * agree by only a third at 150 km.
    */
   TEMPERATURE(
-      "temperature", "add", 1.2, 0.3, 5, -40, 40, new CorrectionReach(0.2, 30, 800, 4000, 10, 5)),
+      "temperature", "add", 0.95, 0.3, 5, -40, 40, new CorrectionReach(0.2, 30, 800, 4000, 10, 5)),
 
   /**
    * Monthly mean relative humidity, points added. Chosen likewise; the humidity maps err over whole
@@ -17,7 +17,7 @@ public enum CorrectedQuantity {
   RELATIVE_HUMIDITY(
       "relative-humidity",
       "add",
-      6,
+      5.6,
       2,
       30,
       -100,

@@ -17,26 +17,36 @@ record SiteBlend(double[] weights, double varianceLeft) {
 
   /**
    * @param noise per site, variance of the measurement over the model's
+   * @param doubt the part of that noise by which weights are lessened, 0..1
    */
   static SiteBlend of(
-      CorrectionReach reach, List<CorrectionSpot> sites, double[] noise, CorrectionSpot spot) {
+      CorrectionReach reach,
+      List<CorrectionSpot> sites,
+      double[] noise,
+      double doubt,
+      CorrectionSpot spot) {
     int n = sites.size();
+    double[][] alike = new double[n][n];
     double[][] factor = new double[n][n];
     double[] towards = new double[n];
     for (int i = 0; i < n; i++) {
       towards[i] = reach.closeness(sites.get(i), spot);
       for (int j = 0; j <= i; j++) {
-        factor[i][j] = reach.closeness(sites.get(i), sites.get(j));
+        alike[i][j] = reach.closeness(sites.get(i), sites.get(j));
+        factor[i][j] = alike[i][j];
       }
-      factor[i][i] += Math.max(LEAST_NOISE, noise[i]);
+      factor[i][i] += Math.max(LEAST_NOISE, doubt * noise[i]);
     }
     cholesky(factor);
     double[] weights = solve(factor, towards);
-    double explained = 0;
+    double left = 1;
     for (int i = 0; i < n; i++) {
-      explained += weights[i] * towards[i];
+      left += weights[i] * (weights[i] * (1 + noise[i]) - 2 * towards[i]);
+      for (int j = 0; j < i; j++) {
+        left += 2 * weights[i] * weights[j] * alike[i][j];
+      }
     }
-    return new SiteBlend(weights, Site.hold(1 - explained, 0, 1));
+    return new SiteBlend(weights, Site.hold(left, 0, 1));
   }
 
   double of(double[] departures) {

@@ -101,7 +101,7 @@ public final class SiteCorrections {
     Arrays.fill(left, 1);
     Month before = null;
     for (int m = 0; m < PlaceFields.MONTHS && !near.isEmpty(); m++) {
-      Month month = Month.of(near, m, quantity.reach(), spot, before);
+      Month month = Month.of(near, m, quantity, spot, before);
       if (!month.present().isEmpty()) {
         departure[m] = month.departure(near, m);
         left[m] = month.blend().varianceLeft();
@@ -135,10 +135,10 @@ public final class SiteCorrections {
   }
 
   /** The sites that measured in a month, by index into those near, and their blend. */
-  private record Month(List<Integer> present, double[] noise, SiteBlend blend) {
+  private record Month(List<Integer> present, double[] noise, double doubt, SiteBlend blend) {
     /** Takes over the blend of the month before where the same sites measured as surely. */
     static Month of(
-        List<Near> near, int m, CorrectionReach reach, CorrectionSpot spot, Month before) {
+        List<Near> near, int m, CorrectedQuantity quantity, CorrectionSpot spot, Month before) {
       List<Integer> present = new ArrayList<>();
       for (int i = 0; i < near.size(); i++) {
         if (!Double.isNaN(near.get(i).station().departure()[m])) {
@@ -147,11 +147,31 @@ public final class SiteCorrections {
       }
       double[] noise =
           present.stream().mapToDouble(i -> near.get(i).station().noise()[m]).toArray();
-      if (before != null && before.present.equals(present) && Arrays.equals(before.noise, noise)) {
+      double doubt = doubt(near, present, m, quantity.priorSpread());
+      if (before != null
+          && before.present.equals(present)
+          && Arrays.equals(before.noise, noise)
+          && before.doubt == doubt) {
         return before;
       }
       List<CorrectionSpot> spots = present.stream().map(i -> near.get(i).station().spot()).toList();
-      return new Month(present, noise, SiteBlend.of(reach, spots, noise, spot));
+      return new Month(
+          present, noise, doubt, SiteBlend.of(quantity.reach(), spots, noise, doubt, spot));
+    }
+
+    /**
+     * The part of the noise that lessens the weights: all of it while the departures are such as
+     * the model's usual error explains, less where a site close by lies farther off. A frost hollow
+     * is no slip of the thermometer.
+     */
+    private static double doubt(List<Near> near, List<Integer> present, int m, double prior) {
+      double farthest = 1;
+      for (int i : present) {
+        Near site = near.get(i);
+        double off = site.closeness() * site.station().departure()[m] / prior;
+        farthest = Math.max(farthest, off * off);
+      }
+      return 1 / farthest;
     }
 
     double departure(List<Near> near, int m) {
