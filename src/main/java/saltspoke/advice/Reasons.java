@@ -33,7 +33,7 @@ final class Reasons {
       notes.add(Note.of("advice-polymer-not-modelled"));
     }
     if (nipple.gallsOnSpoke()) {
-      notes.add(Note.of("advice-galling", "nipple", nipple.title()));
+      notes.add(Note.of("advice-galling", "nipple", nipple.id()));
     }
     if (nipple.cracksInAmmonia() && request.profile().sealant() == Sealant.AMMONIATED) {
       notes.add(Note.of("advice-ammonia-cracking"));

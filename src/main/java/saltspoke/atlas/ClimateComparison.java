@@ -8,6 +8,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.function.DoubleBinaryOperator;
 import java.util.function.ToDoubleFunction;
+import saltspoke.atmosphere.ClimateSpread;
 import saltspoke.atmosphere.MonthClimate;
 import saltspoke.atmosphere.MonthlyClimate;
 import saltspoke.sources.StationFiles;
@@ -57,16 +58,25 @@ public final class ClimateComparison {
     private final List<Pair> wind = new ArrayList<>();
 
     void add(ClimateStation s, List<MonthClimate> months) {
-      monthly(monthlyTemperature, s.where(), s.temperatureC(), months, MonthClimate::temperatureC);
-      annualTemperature.add(mean(s.where(), s.temperatureC(), months, MonthClimate::temperatureC));
-      monthly(
-          monthlyHumidity,
-          s.where(),
-          s.relativeHumidityPct(),
-          months,
-          MonthClimate::relativeHumidityPct);
-      Pair humidity =
-          mean(s.where(), s.relativeHumidityPct(), months, MonthClimate::relativeHumidityPct);
+      double heightM = s.elevationM();
+      Estimate temperature =
+          new Estimate(
+              MonthClimate::temperatureC,
+              ClimateSpread.monthlyTemperatureK(heightM),
+              ClimateSpread.annualTemperatureK(heightM),
+              -100,
+              100);
+      Estimate relativeHumidity =
+          new Estimate(
+              MonthClimate::relativeHumidityPct,
+              ClimateSpread.monthlyHumidityPct(heightM),
+              ClimateSpread.annualHumidityPct(heightM),
+              0,
+              100);
+      monthly(monthlyTemperature, s.name(), s.temperatureC(), months, temperature);
+      annualTemperature.add(annual(s.name(), s.temperatureC(), months, temperature));
+      monthly(monthlyHumidity, s.name(), s.relativeHumidityPct(), months, relativeHumidity);
+      Pair humidity = annual(s.name(), s.relativeHumidityPct(), months, relativeHumidity);
       annualHumidity.add(humidity);
       humidityByContinent
           .computeIfAbsent(Continent.at(s.latitudeDeg(), s.longitudeDeg()), k -> new ArrayList<>())
@@ -74,8 +84,8 @@ public final class ClimateComparison {
       sums(frostDays, s, s.frostDays(), months, MonthClimate::frostDays);
       sums(rain, s, s.rainMm(), months, MonthClimate::rainMm);
       s.diurnalRangeC()
-          .ifPresent(v -> monthly(diurnalRange, s.where(), v, months, MonthClimate::diurnalRangeC));
-      s.windMPerS().ifPresent(v -> monthly(wind, s.where(), v, months, MonthClimate::windMPerS));
+          .ifPresent(v -> monthly(diurnalRange, s.name(), v, months, MonthClimate::diurnalRangeC));
+      s.windMPerS().ifPresent(v -> monthly(wind, s.name(), v, months, MonthClimate::windMPerS));
     }
 
     Comparison.Gather gather() {
@@ -92,6 +102,35 @@ public final class ClimateComparison {
       gather.add("rain, annual, mm", true, rain);
       gather.add("wind speed, monthly, m/s", true, wind);
       return gather;
+    }
+
+    /** A modelled quantity with its spreads and the limits of its band. */
+    private record Estimate(
+        ToDoubleFunction<MonthClimate> quantity,
+        double monthlySpread,
+        double annualSpread,
+        double least,
+        double most) {}
+
+    private static void monthly(
+        List<Pair> to, String where, double[] measured, List<MonthClimate> months, Estimate e) {
+      for (int m = 0; m < MONTHS; m++) {
+        double estimated = e.quantity().applyAsDouble(months.get(m));
+        to.add(
+            Pair.of(
+                where + " month " + (m + 1),
+                measured[m],
+                ClimateSpread.band(estimated, e.monthlySpread(), e.least(), e.most())));
+      }
+    }
+
+    private static Pair annual(
+        String where, double[] measured, List<MonthClimate> months, Estimate e) {
+      Pair mean = mean(where, measured, months, e.quantity());
+      return Pair.of(
+          where,
+          mean.measured(),
+          ClimateSpread.band(mean.estimated(), e.annualSpread(), e.least(), e.most()));
     }
 
     private static void monthly(
@@ -129,8 +168,8 @@ public final class ClimateComparison {
         ToDoubleFunction<MonthClimate> quantity) {
       measured.ifPresent(
           values -> {
-            Pair mean = mean(s.where(), values, months, quantity);
-            to.add(Pair.of(s.where(), MONTHS * mean.measured(), MONTHS * mean.estimated()));
+            Pair mean = mean(s.name(), values, months, quantity);
+            to.add(Pair.of(s.name(), MONTHS * mean.measured(), MONTHS * mean.estimated()));
           });
     }
   }

@@ -7,7 +7,6 @@ import saltspoke.atmosphere.AirModel;
 import saltspoke.atmosphere.AirOverrides;
 import saltspoke.atmosphere.Metal;
 import saltspoke.atmosphere.MonthClimate;
-import saltspoke.atmosphere.MonthlyClimate;
 import saltspoke.places.Place;
 import saltspoke.places.PlaceDirectory;
 import saltspoke.places.PlaceOverrides;
@@ -26,9 +25,8 @@ public final class LayerValues implements PointValues {
   }
 
   /** A layer that needs the air's annual means or its monthly climate. */
-  public static LayerValues of(
-      AtlasLayer layer, PlaceDirectory places, AirModel air, MonthlyClimate climate) {
-    return new LayerValues(places, value(layer, air, climate));
+  public static LayerValues of(AtlasLayer layer, PlaceDirectory places, AirModel air) {
+    return new LayerValues(places, value(layer, air));
   }
 
   /**
@@ -54,8 +52,7 @@ public final class LayerValues implements PointValues {
         : Float.NaN;
   }
 
-  private static ToDoubleFunction<Place> value(
-      AtlasLayer layer, AirModel air, MonthlyClimate climate) {
+  private static ToDoubleFunction<Place> value(AtlasLayer layer, AirModel air) {
     return switch (layer) {
       case CLASS_CARBON_STEEL, CLASS_ZINC, CLASS_COPPER, CLASS_ALUMINIUM -> {
         Metal metal = layer.metal().orElseThrow();
@@ -69,8 +66,8 @@ public final class LayerValues implements PointValues {
       case HUMIDITY -> annual(air, glance -> glance.exposure().relativeHumidityPct());
       case CHLORIDE -> annual(air, glance -> glance.exposure().chlorideMgPerM2Day());
       case SO2 -> annual(air, glance -> glance.exposure().so2MgPerM2Day());
-      case WET_HOURS -> yearly(climate, MonthClimate::wetHours);
-      case NEAR_FREEZING_DAYS -> yearly(climate, MonthClimate::nearFreezingDays);
+      case WET_HOURS -> yearly(air, MonthClimate::wetHours);
+      case NEAR_FREEZING_DAYS -> yearly(air, MonthClimate::nearFreezingDays);
       case FIRST_LOOK ->
           throw new IllegalArgumentException("the first look needs a pairing and a profile");
     };
@@ -81,7 +78,7 @@ public final class LayerValues implements PointValues {
   }
 
   private static ToDoubleFunction<Place> yearly(
-      MonthlyClimate climate, ToDoubleFunction<MonthClimate> value) {
-    return place -> climate.at(place).stream().mapToDouble(value).sum();
+      AirModel air, ToDoubleFunction<MonthClimate> value) {
+    return place -> air.months(place).stream().mapToDouble(value).sum();
   }
 }

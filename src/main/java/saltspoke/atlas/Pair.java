@@ -1,5 +1,7 @@
 package saltspoke.atlas;
 
+import saltspoke.values.Quantiles;
+
 /**
  * A measured value beside the program's estimate of it.
  *
@@ -13,6 +15,11 @@ public record Pair(String station, double measured, double estimated, double p10
   /** A pair whose estimate carries no band. */
   public static Pair of(String station, double measured, double estimated) {
     return new Pair(station, measured, estimated, Double.NaN, Double.NaN);
+  }
+
+  /** A pair whose estimate carries its band. */
+  static Pair of(String station, double measured, Quantiles estimate) {
+    return new Pair(station, measured, estimate.median(), estimate.p10(), estimate.p90());
   }
 
   public boolean hasBand() {

@@ -14,7 +14,6 @@ import saltspoke.atmosphere.Metal;
 import saltspoke.sources.StationFiles;
 import saltspoke.sources.StationFiles.ChlorideSite;
 import saltspoke.sources.StationFiles.CorrosionSite;
-import saltspoke.values.Quantiles;
 import saltspoke.values.Refusal;
 
 /** Judges chloride deposition and first-year losses from the inputs that site files give. */
@@ -27,7 +26,7 @@ public final class SiteComparison {
     List<Pair> pairs = new ArrayList<>();
     for (ChlorideSite site : sites.rows()) {
       pairs.add(
-          pair(
+          Pair.of(
               site.name(),
               site.chlorideMgPerM2Day(),
               ChlorideFromSite.predict(
@@ -62,7 +61,7 @@ public final class SiteComparison {
           pairs
               .get(metal)
               .add(
-                  pair(
+                  Pair.of(
                       site.name(),
                       measured.getAsDouble(),
                       Corrosion.firstYearUm(metal, exposure, InputSpread.NONE)));
@@ -89,9 +88,5 @@ public final class SiteComparison {
       case COPPER -> site.copperUm();
       case ALUMINIUM -> site.aluminiumUm();
     };
-  }
-
-  private static Pair pair(String name, double measured, Quantiles estimate) {
-    return new Pair(name, measured, estimate.median(), estimate.p10(), estimate.p90());
   }
 }

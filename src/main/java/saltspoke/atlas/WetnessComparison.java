@@ -2,18 +2,16 @@ package saltspoke.atlas;
 
 import java.io.InputStream;
 import java.util.ArrayList;
-import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Map;
 import java.util.function.DoubleBinaryOperator;
 import java.util.function.ToDoubleFunction;
+import saltspoke.atmosphere.ClimateSpread;
 import saltspoke.atmosphere.HourlyCount;
 import saltspoke.atmosphere.MonthClimate;
 import saltspoke.atmosphere.MonthMeans;
 import saltspoke.atmosphere.MonthlyClimate;
-import saltspoke.sources.StationFiles;
 import saltspoke.sources.StationFiles.Hour;
-import saltspoke.values.Refusal;
+import saltspoke.values.Quantiles;
 
 /**
  * Judges the modelled wet hours a year against hourly records, twice: from the record's own monthly
@@ -21,7 +19,6 @@ import saltspoke.values.Refusal;
  * are counted by definition; a month that lacks hours counts by its share.
  */
 public final class WetnessComparison {
-  private static final int MONTHS = 12;
   private static final int HOURS_OF_A_DAY = 24;
 
   private final MonthlyClimate climate;
@@ -37,22 +34,10 @@ public final class WetnessComparison {
 
   /** Compares a file with the columns of {@link Hour}; closes the stream. */
   public Comparison run(InputStream in, String fileName) {
-    StationRows<Hour> hours = StationRows.read(in, fileName, StationFiles::hour);
-    Map<String, List<Hour>> byStation = new LinkedHashMap<>();
-    for (Hour hour : hours.rows()) {
-      byStation.computeIfAbsent(hour.station(), k -> new ArrayList<>()).add(hour);
-    }
-    List<Refusal> refused = new ArrayList<>(hours.refused());
-    List<Year> years = new ArrayList<>();
-    for (List<Hour> station : byStation.values()) {
-      try {
-        years.add(year(station));
-      } catch (Refusal refusal) {
-        refused.add(refusal);
-      }
-    }
+    StationRows<StationYear> stations = StationYear.read(in, fileName);
+    List<Year> years = stations.rows().stream().map(this::year).toList();
     Comparison.Gather gather = new Comparison.Gather();
-    add(gather, "wet hours a year", years, Year::wetHours, MonthClimate::wetHours);
+    addWetHours(gather, years);
     add(
         gather,
         "hours a year above 75 % RH",
@@ -73,7 +58,7 @@ public final class WetnessComparison {
         years,
         Year::nearFreezingDays,
         MonthClimate::nearFreezingDays);
-    return gather.comparison("wetness", refused);
+    return gather.comparison("wetness", stations.refused());
   }
 
   private record Year(
@@ -85,7 +70,25 @@ public final class WetnessComparison {
       double frostDays,
       double nearFreezingDays,
       List<MonthClimate> fromOwnMeans,
-      List<MonthClimate> fromFields) {}
+      List<MonthClimate> fromFields,
+      Quantiles wetHoursFromOwnMeans,
+      Quantiles wetHoursFromFields) {}
+
+  private static void addWetHours(Comparison.Gather gather, List<Year> years) {
+    List<Pair> own = new ArrayList<>();
+    List<Pair> fields = new ArrayList<>();
+    for (Year year : years) {
+      own.add(Pair.of(year.station(), year.wetHours(), year.wetHoursFromOwnMeans()));
+      fields.add(Pair.of(year.station(), year.wetHours(), year.wetHoursFromFields()));
+    }
+    addBoth(gather, "wet hours a year", own, fields);
+  }
+
+  private static void addBoth(
+      Comparison.Gather gather, String quantity, List<Pair> own, List<Pair> fields) {
+    gather.add(quantity + ", from own monthly means", true, own);
+    gather.add(quantity + ", from the shipped fields", true, fields);
+  }
 
   private static void add(
       Comparison.Gather gather,
@@ -100,25 +103,18 @@ public final class WetnessComparison {
       own.add(Pair.of(year.station(), hours, sum(year.fromOwnMeans(), modelled)));
       fields.add(Pair.of(year.station(), hours, sum(year.fromFields(), modelled)));
     }
-    gather.add(quantity + ", from own monthly means", true, own);
-    gather.add(quantity + ", from the shipped fields", true, fields);
+    addBoth(gather, quantity, own, fields);
   }
 
   private static double sum(List<MonthClimate> months, ToDoubleFunction<MonthClimate> quantity) {
     return months.stream().mapToDouble(quantity).sum();
   }
 
-  private Year year(List<Hour> station) {
-    Hour first = station.get(0);
-    double[] temperatureC = new double[MONTHS];
-    double[] humidityPct = new double[MONTHS];
-    double[] rangeC = new double[MONTHS];
+  private Year year(StationYear station) {
+    Hour first = station.first();
     double[] totals = new double[6];
-    for (int month = 1; month <= MONTHS; month++) {
-      HourlyCount count = count(station, month);
-      temperatureC[month - 1] = count.temperatureC();
-      humidityPct[month - 1] = count.relativeHumidityPct();
-      rangeC[month - 1] = count.diurnalRangeC();
+    for (int month = 1; month <= station.months().size(); month++) {
+      HourlyCount count = station.months().get(month - 1);
       double days = MonthMeans.daysIn(month);
       double perHour = days * HOURS_OF_A_DAY / count.hours();
       double perDay = days / (count.hours() / HOURS_OF_A_DAY);
@@ -129,14 +125,20 @@ public final class WetnessComparison {
       totals[4] += perDay * count.frostDays();
       totals[5] += perDay * count.nearFreezingDays();
     }
+    double latitudeDeg = first.latitudeDeg();
     MonthMeans fields =
         climate.means(
-            first.latitudeDeg(),
+            latitudeDeg,
             first.longitudeDeg(),
             first.elevationM(),
-            seaDistanceKm.applyAsDouble(first.latitudeDeg(), first.longitudeDeg()));
+            seaDistanceKm.applyAsDouble(latitudeDeg, first.longitudeDeg()));
     MonthMeans own =
-        new MonthMeans(temperatureC, humidityPct, rangeC, fields.rainMm(), fields.windMPerS());
+        new MonthMeans(
+            station.monthly(HourlyCount::temperatureC),
+            station.monthly(HourlyCount::relativeHumidityPct),
+            station.monthly(HourlyCount::diurnalRangeC),
+            fields.rainMm(),
+            fields.windMPerS());
     return new Year(
         first.station(),
         totals[0],
@@ -145,21 +147,9 @@ public final class WetnessComparison {
         totals[3],
         totals[4],
         totals[5],
-        own.climate(first.latitudeDeg()),
-        fields.climate(first.latitudeDeg()));
-  }
-
-  private static HourlyCount count(List<Hour> station, int month) {
-    List<Hour> hours = station.stream().filter(h -> h.month() == month).toList();
-    if (hours.size() < HOURS_OF_A_DAY) {
-      throw Refusal.dataDamaged(
-          "month-too-short",
-          station.get(0).where() + " " + station.get(0).station() + " month " + month,
-          hours.size() + " hours",
-          "at least 24 hours in each month of a station");
-    }
-    return HourlyCount.of(
-        hours.stream().mapToDouble(Hour::temperatureC).toArray(),
-        hours.stream().mapToDouble(Hour::relativeHumidityPct).toArray());
+        own.climate(latitudeDeg),
+        fields.climate(latitudeDeg),
+        ClimateSpread.wetHoursOfExactMeans(own, latitudeDeg),
+        ClimateSpread.wetHoursOfModelledMeans(fields, latitudeDeg, first.elevationM()));
   }
 }

@@ -19,28 +19,34 @@ public final class AirModel {
   private final CountryAir countries;
   private final FieldStack elevation;
   private final WindFields winds;
+  private final SiteCorrections corrections;
 
   private AirModel(
-      MonthlyClimate climate, CountryAir countries, FieldStack elevation, WindFields winds) {
+      MonthlyClimate climate,
+      CountryAir countries,
+      FieldStack elevation,
+      WindFields winds,
+      SiteCorrections corrections) {
     this.climate = climate;
     this.countries = countries;
     this.elevation = elevation;
     this.winds = winds;
+    this.corrections = corrections;
   }
-
-  /** One standard deviation of the modelled annual mean temperature, K (judged on stations). */
-  private static final double TEMPERATURE_SPREAD_K = 1.0;
-
-  /** One standard deviation of the modelled annual mean humidity, points (judged on stations). */
-  private static final double HUMIDITY_SPREAD_PCT = 5.0;
 
   /** Over the layers of a data set. */
   public static AirModel from(DataSet data) {
+    return from(data, SiteCorrections.NONE);
+  }
+
+  /** Over the layers of a data set, moved by local measurements near their sites. */
+  public static AirModel from(DataSet data, SiteCorrections corrections) {
     return new AirModel(
         MonthlyClimate.from(data),
         CountryAir.read(CsvTable.read(data.open(CountryAir.LAYER), CountryAir.LAYER + ".csv")),
         data.stack("elevation"),
-        WindFields.from(data));
+        WindFields.from(data),
+        corrections);
   }
 
   /** The air at a place. */
@@ -50,14 +56,16 @@ public final class AirModel {
     Optional<CountryAir.Country> country = countries.find(place.countryCode());
     Setting setting = overrides.setting().orElseGet(() -> Settings.guess(place.surroundings()));
 
-    Salt salt = salt(place, setting, climate.at(place), overrides, flags);
+    Climate moved = climate(place, flags);
+    List<MonthClimate> months = moved.means().climate(place.latitudeDeg());
+    Salt salt = salt(place, setting, months, overrides, flags);
     Sulfur sulfur = sulfur(setting, country, overrides, flags);
     AnnualAir annual = annual(salt.months());
     Exposure exposure = exposure(annual, sulfur, salt, overrides, flags);
     InputSpread spread =
         new InputSpread(
-            overrides.temperatureC().isPresent() ? 0 : TEMPERATURE_SPREAD_K,
-            overrides.relativeHumidityPct().isPresent() ? 0 : HUMIDITY_SPREAD_PCT,
+            overrides.temperatureC().isPresent() ? 0 : moved.temperatureSpreadK(),
+            overrides.relativeHumidityPct().isPresent() ? 0 : moved.humiditySpreadPct(),
             sulfur.lnSpread(),
             salt.lnSpread());
     List<MetalCorrosivity> corrosivity = Corrosion.assess(exposure, spread);
@@ -81,33 +89,64 @@ public final class AirModel {
         List.copyOf(flags));
   }
 
+  private record Climate(MonthMeans means, double temperatureSpreadK, double humiditySpreadPct) {}
+
+  private Climate climate(Place place, Set<Note> flags) {
+    SiteMove warmer = moved(CorrectedQuantity.TEMPERATURE, place, flags);
+    SiteMove moister = moved(CorrectedQuantity.RELATIVE_HUMIDITY, place, flags);
+    MonthMeans means = climate.means(place);
+    if (!warmer.isNone() || !moister.isNone()) {
+      means = means.moved(warmer.departure(), moister.departure());
+    }
+    double elevationM = place.elevationM();
+    return new Climate(
+        means,
+        warmer.spreadFactor() * ClimateSpread.annualTemperatureK(elevationM),
+        moister.spreadFactor() * ClimateSpread.annualHumidityPct(elevationM));
+  }
+
+  /** How far local measurements move a quantity, said in the flags where they do. */
+  private SiteMove moved(CorrectedQuantity quantity, Place place, Set<Note> flags) {
+    SiteMove move = corrections.at(quantity, CorrectionSpot.of(place));
+    if (!move.isNone()) {
+      flags.add(move.note(quantity));
+    }
+    return move;
+  }
+
   /**
    * The annual means at a place that the class follows from, as in {@link #at} without overrides,
    * to the last bit: no wet hours, no probabilities, a fraction of the work. For maps.
    */
   public AirGlance glance(Place place) {
+    Set<Note> flags = new LinkedHashSet<>();
     Setting setting = Settings.guess(place.surroundings());
-    MonthMeans means = climate.means(place);
-    SeaSalt model = seaSalt(place, setting, Arrays.stream(means.rainMm()).sum());
-    List<Double> monthly = new ArrayList<>();
+    Climate moved = climate(place, flags);
+    MonthMeans means = moved.means();
     double temperatureC = 0;
     double humidityPct = 0;
     for (int m = 0; m < PlaceFields.MONTHS; m++) {
       temperatureC += means.temperatureC()[m] / PlaceFields.MONTHS;
       humidityPct += means.relativeHumidityPct()[m] / PlaceFields.MONTHS;
     }
-    for (WindMonth wind : winds.year(place, means.windMPerS())) {
-      monthly.add(model.monthMgPerM2Day(wind));
-    }
+    double rainMmPerYear = Arrays.stream(means.rainMm()).sum();
+    List<Double> monthly =
+        monthlySalt(seaSalt(place, setting, rainMmPerYear), place, means.windMPerS());
+    double saltSpread = SeaSalt.LN_SPREAD * moveSalt(monthly, place, flags);
     Settings.So2 so2 = Settings.so2(setting, false, countries.find(place.countryCode()));
     return new AirGlance(
         new Exposure(
             temperatureC,
             humidityPct,
             so2.depositionMgPerM2Day().median(),
-            SeaSalt.annual(monthly).median()),
+            SeaSalt.annual(monthly, saltSpread).median()),
         new InputSpread(
-            TEMPERATURE_SPREAD_K, HUMIDITY_SPREAD_PCT, so2.lnSpread(), SeaSalt.LN_SPREAD));
+            moved.temperatureSpreadK(), moved.humiditySpreadPct(), so2.lnSpread(), saltSpread));
+  }
+
+  /** The climate of {@link #at}, January to December, alone. */
+  public List<MonthClimate> months(Place place) {
+    return climate(place, new LinkedHashSet<>()).means().climate(place.latitudeDeg());
   }
 
   private SeaSalt seaSalt(Place place, Setting setting, double rainMmPerYear) {
@@ -117,6 +156,23 @@ public final class AirModel {
         SaltPaths.roughness(setting, place.sea().distanceKm()),
         place.elevationM(),
         rainMmPerYear);
+  }
+
+  private List<Double> monthlySalt(SeaSalt model, Place place, double[] windMPerS) {
+    List<Double> monthly = new ArrayList<>();
+    for (WindMonth wind : winds.year(place, windMPerS)) {
+      monthly.add(model.monthMgPerM2Day(wind));
+    }
+    return monthly;
+  }
+
+  /** Moves salt by local measurements; gives what is left of its spread, 0..1 and a little more. */
+  private double moveSalt(List<Double> monthly, Place place, Set<Note> flags) {
+    SiteMove saltier = moved(CorrectedQuantity.CHLORIDE, place, flags);
+    for (int m = 0; m < monthly.size(); m++) {
+      monthly.set(m, monthly.get(m) * Math.exp(saltier.departure()[m]));
+    }
+    return saltier.spreadFactor();
   }
 
   private record Salt(List<MonthAir> months, Quantiles annual, double lnSpread) {}
@@ -131,7 +187,6 @@ public final class AirModel {
       Set<Note> flags) {
     double rainMmPerYear = months.stream().mapToDouble(MonthClimate::rainMm).sum();
     SeaSalt model = seaSalt(place, setting, rainMmPerYear);
-    List<Double> monthly = new ArrayList<>();
     double calmestHeld = Double.POSITIVE_INFINITY;
     for (MonthClimate month : months) {
       if (SaltKernel.heldWind(month.windMPerS()) != month.windMPerS()) {
@@ -139,16 +194,17 @@ public final class AirModel {
       }
     }
     double[] windMPerS = months.stream().mapToDouble(MonthClimate::windMPerS).toArray();
-    for (WindMonth wind : winds.year(place, windMPerS)) {
-      monthly.add(model.monthMgPerM2Day(wind));
-    }
+    List<Double> monthly = monthlySalt(model, place, windMPerS);
     if (calmestHeld < Double.POSITIVE_INFINITY) {
       flags.add(SaltKernel.windHeld(calmestHeld));
     }
-    Quantiles annual = SeaSalt.annual(monthly);
     ChlorideFromSite.distanceFlag(place.sea().distanceKm()).ifPresent(flags::add);
     double scale = 1;
     double lnSpread = SeaSalt.LN_SPREAD;
+    if (overrides.chlorideMgPerM2Day().isEmpty()) {
+      lnSpread *= moveSalt(monthly, place, flags);
+    }
+    Quantiles annual = SeaSalt.annual(monthly, lnSpread);
     if (overrides.chlorideMgPerM2Day().isPresent()) {
       double given = overrides.chlorideMgPerM2Day().getAsDouble();
       scale = given / annual.median();

@@ -1,6 +1,7 @@
 package saltspoke.atmosphere;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 
 /**
@@ -21,6 +22,9 @@ public record MonthMeans(
   /** Days of each month, February with its quarter (Gregorian mean within 0.01). */
   private static final double[] DAYS = {31, 28.25, 31, 30, 31, 30, 31, 31, 30, 31, 30, 31};
 
+  /** Driest month that a correction may leave, %. */
+  private static final double LEAST_HUMIDITY_PCT = 1;
+
   public MonthMeans {
     for (double[] values :
         new double[][] {temperatureC, relativeHumidityPct, diurnalRangeC, rainMm, windMPerS}) {
@@ -33,6 +37,26 @@ public record MonthMeans(
   /** Days in a month, 1..12; February has 28.25. */
   public static double daysIn(int month) {
     return DAYS[month - 1];
+  }
+
+  /** The same with every month this much warmer (K) and moister (points). */
+  MonthMeans moved(double temperatureK, double humidityPct) {
+    double[] warmer = new double[PlaceFields.MONTHS];
+    double[] moister = new double[PlaceFields.MONTHS];
+    Arrays.fill(warmer, temperatureK);
+    Arrays.fill(moister, humidityPct);
+    return moved(warmer, moister);
+  }
+
+  /** The same with each month warmer (K) and moister (points); humidity stays within 1..100 %. */
+  MonthMeans moved(double[] temperatureK, double[] humidityPct) {
+    double[] temperature = new double[PlaceFields.MONTHS];
+    double[] humidity = new double[PlaceFields.MONTHS];
+    for (int m = 0; m < PlaceFields.MONTHS; m++) {
+      temperature[m] = temperatureC[m] + temperatureK[m];
+      humidity[m] = Site.hold(relativeHumidityPct[m] + humidityPct[m], LEAST_HUMIDITY_PCT, 100);
+    }
+    return new MonthMeans(temperature, humidity, diurnalRangeC, rainMm, windMPerS);
   }
 
   /** January to December with wet hours, frost and all else that follows from the means. */

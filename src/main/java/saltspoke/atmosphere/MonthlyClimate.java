@@ -28,12 +28,6 @@ public final class MonthlyClimate {
     return new MonthlyClimate(new PlaceFields(layers));
   }
 
-  /** January to December at a place. */
-  public List<MonthClimate> at(Place place) {
-    return at(
-        place.latitudeDeg(), place.longitudeDeg(), place.elevationM(), place.sea().distanceKm());
-  }
-
   /**
    * January to December at a point.
    *

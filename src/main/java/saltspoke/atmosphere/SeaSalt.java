@@ -85,11 +85,11 @@ public final class SeaSalt {
     return steadyMg + carried;
   }
 
-  /** Annual median with 10 % and 90 % from the spread of the estimate. */
-  public static Quantiles annual(List<Double> monthlyMgPerM2Day) {
+  /** Annual median with 10 % and 90 % from the spread of the estimate's logarithm. */
+  static Quantiles annual(List<Double> monthlyMgPerM2Day, double lnSpread) {
     double mean =
         monthlyMgPerM2Day.stream().mapToDouble(Double::doubleValue).average().orElseThrow();
-    return spread(mean, LN_SPREAD);
+    return spread(mean, lnSpread);
   }
 
   /** Log-normal quantiles about a median. */

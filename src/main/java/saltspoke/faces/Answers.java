@@ -15,7 +15,6 @@ import saltspoke.atlas.RegionOutlook;
 import saltspoke.atmosphere.AirClimate;
 import saltspoke.atmosphere.AirModel;
 import saltspoke.atmosphere.AirOverrides;
-import saltspoke.atmosphere.MonthlyClimate;
 import saltspoke.fields.DataSet;
 import saltspoke.places.Area;
 import saltspoke.places.Place;
@@ -34,6 +33,7 @@ import saltspoke.wheel.RidingProfile;
  */
 public final class Answers {
   private final DataSet dataSet;
+  private final LocalCorrections corrections;
   private final Supplier<PlaceDirectory> places;
   private final Supplier<AirModel> airModel;
   private final Catalogue catalogue = Catalogue.shipped();
@@ -42,9 +42,15 @@ public final class Answers {
   private final Supplier<Regions> regions;
 
   public Answers(DataSet dataSet) {
+    this(dataSet, LocalCorrections.NONE);
+  }
+
+  /** Answers that local measurements move near their sites. */
+  public Answers(DataSet dataSet, LocalCorrections corrections) {
     this.dataSet = dataSet;
+    this.corrections = corrections;
     this.places = once(() -> PlaceDirectory.open(dataSet));
-    this.airModel = once(() -> AirModel.from(dataSet));
+    this.airModel = once(() -> AirModel.from(dataSet, corrections.sites()));
     this.advisor = once(() -> new Advisor(catalogue));
     this.regions = once(() -> Regions.from(dataSet));
   }
@@ -69,6 +75,10 @@ public final class Answers {
 
   public DataSet dataSet() {
     return dataSet;
+  }
+
+  public LocalCorrections corrections() {
+    return corrections;
   }
 
   public Catalogue catalogue() {
@@ -136,7 +146,7 @@ public final class Answers {
 
   /** The values of an atlas layer at any point. */
   public PointValues values(AtlasLayer layer) {
-    return LayerValues.of(layer, places.get(), airModel.get(), MonthlyClimate.from(dataSet));
+    return LayerValues.of(layer, places.get(), airModel.get());
   }
 
   /** The same for the ready profile that the question names. */

@@ -97,6 +97,26 @@ public final class CsvTable {
               () -> Refusal.dataDamaged("empty-cell", where() + " " + column, "", "a number"));
     }
 
+    /** A number from {@code low} to {@code high}; refused when empty, no number or outside. */
+    public double number(String column, double low, double high) {
+      double value = number(column);
+      if (!(value >= low && value <= high)) {
+        throw Refusal.dataDamaged(
+            "out-of-range", where() + " " + column, text(column), low + ".." + high);
+      }
+      return value;
+    }
+
+    /** A whole number from {@code low} to {@code high}; refused when it is anything else. */
+    public int whole(String column, int low, int high) {
+      double value = number(column);
+      if (!(value >= low && value <= high && value == Math.rint(value))) {
+        throw Refusal.dataDamaged(
+            "out-of-range", where() + " " + column, text(column), low + ".." + high + ", whole");
+      }
+      return (int) value;
+    }
+
     /** A finite number, or nothing when the cell is empty. */
     public OptionalDouble optionalNumber(String column) {
       String text = text(column);

@@ -15,13 +15,13 @@ public final class StationFiles {
 
   /**
    * A climate station: {@code latitude_deg, longitude_deg, elevation_m, temperature_c_01…12,
-   * relative_humidity_pct_01…12} and, where the file has them, {@code diurnal_range_c_…,
+   * relative_humidity_pct_01…12} and, where the file has them, {@code station, diurnal_range_c_…,
    * precipitation_mm_…, wind_speed_m_s_…, frost_days_…}.
    *
-   * @param where file and line
+   * @param name its name, or file and line where it has none
    */
   public record ClimateStation(
-      String where,
+      String name,
       double latitudeDeg,
       double longitudeDeg,
       double elevationM,
@@ -34,10 +34,10 @@ public final class StationFiles {
 
   public static ClimateStation climate(CsvTable.Row row) {
     return new ClimateStation(
-        row.where(),
-        within(row, "latitude_deg", -90, 90),
-        within(row, "longitude_deg", -180, 180),
-        within(row, "elevation_m", -500, 9000),
+        row.has("station") && !row.text("station").isEmpty() ? row.text("station") : row.where(),
+        row.number("latitude_deg", -90, 90),
+        row.number("longitude_deg", -180, 180),
+        row.number("elevation_m", -500, 9000),
         months(row, "temperature_c", -90, 60),
         months(row, "relative_humidity_pct", 0, 100),
         monthsIfThere(row, "diurnal_range_c", 0, 60),
@@ -61,30 +61,28 @@ public final class StationFiles {
       double relativeHumidityPct) {}
 
   public static Hour hour(CsvTable.Row row) {
-    double month = within(row, "month", 1, MONTHS);
-    if (month != Math.rint(month)) {
-      throw Refusal.dataDamaged("out-of-range", row.where() + " month", month, "1, 2 … 12");
-    }
-    within(row, "hour", 0, 24);
+    row.number("hour", 0, 24);
     return new Hour(
         row.where(),
         row.text("station"),
-        within(row, "latitude_deg", -90, 90),
-        within(row, "longitude_deg", -180, 180),
-        within(row, "elevation_m", -500, 9000),
-        (int) month,
-        within(row, "temperature_c", -90, 60),
-        within(row, "relative_humidity_pct", 0, 110));
+        row.number("latitude_deg", -90, 90),
+        row.number("longitude_deg", -180, 180),
+        row.number("elevation_m", -500, 9000),
+        row.whole("month", 1, MONTHS),
+        row.number("temperature_c", -90, 60),
+        row.number("relative_humidity_pct", 0, 110));
   }
 
   /**
    * A chloride site: {@code programme, station_id, distance_to_coast_km, elevation_m,
-   * wind_speed_m_s, saline_wind_fraction, roughness, chloride_mg_m2_day}. An empty elevation counts
-   * as 0 m.
+   * wind_speed_m_s, saline_wind_fraction, roughness, chloride_mg_m2_day} and, where the file has
+   * them, {@code latitude_deg, longitude_deg}. An empty elevation counts as 0 m.
    */
   public record ChlorideSite(
       String where,
       String name,
+      OptionalDouble latitudeDeg,
+      OptionalDouble longitudeDeg,
       double distanceKm,
       double elevationM,
       double windMPerS,
@@ -96,11 +94,13 @@ public final class StationFiles {
     return new ChlorideSite(
         row.where(),
         row.text("programme") + " " + row.text("station_id"),
-        within(row, "distance_to_coast_km", 0, 5000),
-        row.text("elevation_m").isEmpty() ? 0 : within(row, "elevation_m", -500, 9000),
-        within(row, "wind_speed_m_s", 0, 40),
-        within(row, "saline_wind_fraction", 0, 1),
-        within(row, "roughness", 0, 1),
+        numberIfThere(row, "latitude_deg", -90, 90),
+        numberIfThere(row, "longitude_deg", -180, 180),
+        row.number("distance_to_coast_km", 0, 5000),
+        row.text("elevation_m").isEmpty() ? 0 : row.number("elevation_m", -500, 9000),
+        row.number("wind_speed_m_s", 0, 40),
+        row.number("saline_wind_fraction", 0, 1),
+        row.number("roughness", 0, 1),
         above0(row, "chloride_mg_m2_day"));
   }
 
@@ -125,10 +125,10 @@ public final class StationFiles {
     return new CorrosionSite(
         row.where(),
         row.text("site"),
-        within(row, "temperature_c", -60, 45),
-        within(row, "relative_humidity_pct", 0, 100),
-        within(row, "so2_mg_m2_day", 0, 100_000),
-        within(row, "chloride_mg_m2_day", 0, 100_000),
+        row.number("temperature_c", -60, 45),
+        row.number("relative_humidity_pct", 0, 100),
+        row.number("so2_mg_m2_day", 0, 100_000),
+        row.number("chloride_mg_m2_day", 0, 100_000),
         loss(row, "carbon_steel_um"),
         loss(row, "zinc_um"),
         loss(row, "copper_um"),
@@ -142,6 +142,13 @@ public final class StationFiles {
     return OptionalDouble.of(above0(row, column));
   }
 
+  private static OptionalDouble numberIfThere(
+      CsvTable.Row row, String column, double low, double high) {
+    return row.has(column) && !row.text(column).isEmpty()
+        ? OptionalDouble.of(row.number(column, low, high))
+        : OptionalDouble.empty();
+  }
+
   private static Optional<double[]> monthsIfThere(
       CsvTable.Row row, String stem, double low, double high) {
     return row.has(column(stem, 1)) ? Optional.of(months(row, stem, low, high)) : Optional.empty();
@@ -150,7 +157,7 @@ public final class StationFiles {
   private static double[] months(CsvTable.Row row, String stem, double low, double high) {
     double[] values = new double[MONTHS];
     for (int m = 0; m < MONTHS; m++) {
-      values[m] = within(row, column(stem, m + 1), low, high);
+      values[m] = row.number(column(stem, m + 1), low, high);
     }
     return values;
   }
@@ -164,15 +171,6 @@ public final class StationFiles {
     if (!(value > 0)) {
       throw Refusal.dataDamaged(
           "out-of-range", row.where() + " " + column, row.text(column), "a number above 0");
-    }
-    return value;
-  }
-
-  private static double within(CsvTable.Row row, String column, double low, double high) {
-    double value = row.number(column);
-    if (!(value >= low && value <= high)) {
-      throw Refusal.dataDamaged(
-          "out-of-range", row.where() + " " + column, row.text(column), low + ".." + high);
     }
     return value;
   }

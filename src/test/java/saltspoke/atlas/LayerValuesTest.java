@@ -12,7 +12,6 @@ import saltspoke.atmosphere.AirModel;
 import saltspoke.atmosphere.AirOverrides;
 import saltspoke.atmosphere.Metal;
 import saltspoke.atmosphere.MetalCorrosivity;
-import saltspoke.atmosphere.MonthlyClimate;
 import saltspoke.fields.DataSet;
 import saltspoke.places.PlaceDirectory;
 import saltspoke.places.PlaceOverrides;
@@ -32,7 +31,7 @@ class LayerValuesTest {
     Map<AtlasLayer, PointValues> layers = new EnumMap<>(AtlasLayer.class);
     for (AtlasLayer layer : AtlasLayer.values()) {
       if (layer != AtlasLayer.FIRST_LOOK) {
-        layers.put(layer, LayerValues.of(layer, PLACES, AIR, MonthlyClimate.from(DATA)));
+        layers.put(layer, LayerValues.of(layer, PLACES, AIR));
       }
     }
     int land = 0;

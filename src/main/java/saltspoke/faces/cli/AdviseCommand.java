@@ -31,6 +31,7 @@ final class AdviseCommand implements Callable<Integer> {
   @Spec private CommandSpec spec;
   @Mixin private PlaceOptions place;
   @Mixin private WheelOptions wheel;
+  @Mixin private CorrectionsOption corrections;
   @Mixin private CommonOptions common;
 
   @Override
@@ -40,7 +41,7 @@ final class AdviseCommand implements Callable<Integer> {
     PlaceOptions.put(values, "lang", common.language);
     Parameters parameters = new Parameters(values, Questions.ADVICE);
     Texts texts = Answers.textsFor(parameters);
-    Answers answers = Opening.answers(common.data).prepare();
+    Answers answers = Opening.answers(common.data, corrections).prepare();
     Advice advice =
         wheel.profileFile == null
             ? answers.advise(parameters)

@@ -28,6 +28,7 @@ import saltspoke.faces.json.Json;
 final class AirCommand implements Callable<Integer> {
   @Spec private CommandSpec spec;
   @Mixin private PlaceOptions place;
+  @Mixin private CorrectionsOption corrections;
   @Mixin private CommonOptions common;
 
   @Override
@@ -37,7 +38,7 @@ final class AirCommand implements Callable<Integer> {
     Parameters parameters = new Parameters(values, Questions.AIR);
     Texts texts = Answers.textsFor(parameters);
     PlaceQuestion question = PlaceQuestion.from(parameters);
-    AirClimate air = Opening.answers(common.data).prepare().air(question);
+    AirClimate air = Opening.answers(common.data, corrections).prepare().air(question);
     spec.commandLine()
         .getOut()
         .println(common.json ? Json.pretty(AirJson.of(air, texts)) : AirText.of(air, texts));

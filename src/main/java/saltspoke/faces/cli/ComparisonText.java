@@ -1,5 +1,6 @@
 package saltspoke.faces.cli;
 
+import java.util.List;
 import java.util.Locale;
 import saltspoke.atlas.Comparison;
 import saltspoke.atlas.Judgement;
@@ -65,17 +66,19 @@ final class ComparisonText {
                 pair.estimated()));
       }
     }
-    refused(out, comparison);
+    refused(out, "Left out", comparison.refused());
     return out.toString();
   }
 
-  private static void refused(StringBuilder out, Comparison comparison) {
-    int count = comparison.refused().size();
+  /** Lists the first rows that were refused; nothing when there is none. */
+  static void refused(StringBuilder out, String title, List<Refusal> refused) {
+    int count = refused.size();
     if (count == 0) {
       return;
     }
-    out.append("\nLeft out, ").append(count).append(count == 1 ? " row:\n" : " rows:\n");
-    for (Refusal refusal : comparison.refused().subList(0, Math.min(count, MOST_REFUSED))) {
+    out.append('\n').append(title).append(", ").append(count);
+    out.append(count == 1 ? " row:\n" : " rows:\n");
+    for (Refusal refusal : refused.subList(0, Math.min(count, MOST_REFUSED))) {
       out.append(
           String.format(
               Locale.ROOT,

@@ -2,6 +2,7 @@ package saltspoke.faces.cli;
 
 import java.nio.file.Path;
 import saltspoke.faces.Answers;
+import saltspoke.faces.LocalCorrections;
 import saltspoke.fields.DataSet;
 
 /** Opens the data set that a command line names, else the shipped one. */
@@ -14,5 +15,12 @@ final class Opening {
 
   static Answers answers(Path directory) {
     return new Answers(dataSet(directory));
+  }
+
+  /** Answers over a data set and the correction file that a command line names, if any. */
+  static Answers answers(Path directory, CorrectionsOption corrections) {
+    LocalCorrections read =
+        corrections.file == null ? LocalCorrections.NONE : LocalCorrections.read(corrections.file);
+    return new Answers(dataSet(directory), read);
   }
 }

@@ -30,6 +30,7 @@ final class SensitivityCommand implements Callable<Integer> {
   @Spec private CommandSpec spec;
   @Mixin private PlaceOptions place;
   @Mixin private WheelOptions wheel;
+  @Mixin private CorrectionsOption corrections;
   @Mixin private CommonOptions common;
 
   @Override
@@ -41,7 +42,7 @@ final class SensitivityCommand implements Callable<Integer> {
     Map<String, String> values = place.values();
     values.putAll(wheel.values());
     Parameters parameters = new Parameters(values, Questions.ADVICE);
-    Tornado tornado = Opening.answers(common.data).prepare().sensitivity(parameters);
+    Tornado tornado = Opening.answers(common.data, corrections).prepare().sensitivity(parameters);
     PrintWriter out = spec.commandLine().getOut();
     if (common.json) {
       out.println(Json.pretty(json(tornado)));

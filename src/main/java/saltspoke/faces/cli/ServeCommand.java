@@ -20,6 +20,7 @@ import saltspoke.values.Refusal;
     footer = {"", "Example:", "  saltspoke serve --port 8080"})
 final class ServeCommand implements Callable<Integer> {
   @Spec private CommandSpec spec;
+  @Mixin private CorrectionsOption corrections;
   @Mixin private CommonOptions common;
 
   @Option(names = "--port", paramLabel = "N", description = "TCP port, 0 for any free one (8080).")
@@ -30,7 +31,7 @@ final class ServeCommand implements Callable<Integer> {
     if (port < 0 || port > 65535) {
       throw Refusal.outOfRange("port", port, "0..65535");
     }
-    Answers answers = Opening.answers(common.data).prepare();
+    Answers answers = Opening.answers(common.data, corrections).prepare();
     PrintWriter out = spec.commandLine().getOut();
     try (WebServer server = Api.server(port, answers)) {
       Runtime.getRuntime().addShutdownHook(new Thread(() -> stop(server), "stop"));

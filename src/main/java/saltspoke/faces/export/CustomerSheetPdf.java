@@ -26,7 +26,7 @@ import saltspoke.values.Note;
 
 /**
  * The sheet that a customer takes home, A4: interval first and large, then why, the year, the
- * dates, how to look, when to stop, and the cautions.
+ * dates, how to look, and when to stop; the cautions stand right under the interval.
  */
 public final class CustomerSheetPdf {
   private static final int MOST_REASONS = 4;
@@ -65,6 +65,8 @@ public final class CustomerSheetPdf {
       document.open();
       document.add(head());
       document.add(tag());
+      document.add(SheetStyle.heading(wording.say("page-cautions"), SheetStyle.RUST));
+      document.add(SheetStyle.bullets(said(advice.cautions()), false));
       document.add(SheetStyle.heading(wording.say("page-why"), SheetStyle.VERDIGRIS));
       document.add(SheetStyle.bullets(reasons(), false));
       document.add(SheetStyle.heading(wording.say("page-times"), SheetStyle.VERDIGRIS));
@@ -77,8 +79,6 @@ public final class CustomerSheetPdf {
       document.add(SheetStyle.bullets(said(advice.look()), true));
       document.add(SheetStyle.heading(wording.say("page-stop"), SheetStyle.RUST));
       document.add(SheetStyle.bullets(said(advice.stopSigns()), false));
-      document.add(SheetStyle.heading(wording.say("page-cautions"), SheetStyle.RUST));
-      document.add(SheetStyle.bullets(said(advice.cautions()), false));
     } catch (DocumentException e) {
       throw new IllegalStateException("the customer sheet could not be set", e);
     }

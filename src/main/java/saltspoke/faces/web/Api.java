@@ -172,6 +172,7 @@ public final class Api {
     ObjectNode node = About.json(answers.dataSet());
     ArrayNode countries = node.putArray("postcodeCountries");
     answers.postcodeCountries().forEach(countries::add);
+    node.set("corrections", answers.corrections().json());
     return Reply.json(node);
   }
 
