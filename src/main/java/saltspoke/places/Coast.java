@@ -136,7 +136,7 @@ final class Coast {
                     Math.sin(azimuth) * Math.sin(arc) * Math.cos(phi),
                     Math.cos(arc) - Math.sin(phi) * sin));
     double wrapped = lon - 360 * Math.floor((lon + 180) / 360);
-    return closedSeas.ratioAt(Math.toDegrees(Math.asin(sin)), wrapped);
+    return closedSeas.ratioAt(Math.toDegrees(Vantage.arcSine(sin)), wrapped);
   }
 
   private synchronized List<CoastBin> coarse() {

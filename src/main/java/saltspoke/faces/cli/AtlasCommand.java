@@ -68,6 +68,7 @@ final class AtlasCommand implements Callable<Integer> {
   @Spec private CommandSpec spec;
   @Mixin private WheelOptions wheel;
   @Mixin private CommonOptions common;
+  @Mixin private CorrectionsOption corrections;
 
   @Option(names = "--layer", paramLabel = "LAYER", required = true, description = "What to show.")
   private String layer;
@@ -115,7 +116,7 @@ final class AtlasCommand implements Callable<Integer> {
     CoordinateSystem system = CoordinateSystem.of(crs);
     AtlasFrame frame = system.frame(edges, step(system));
     PlaneToEarth earth = system.toEarth(edges);
-    Answers answers = Opening.answers(common.data).prepare();
+    Answers answers = Opening.answers(common.data, corrections).prepare();
     PointValues points = points(answers, which, parameters);
 
     Path workFile = out.get(0).resolveSibling(out.get(0).getFileName() + ".part");
@@ -127,7 +128,8 @@ final class AtlasCommand implements Callable<Integer> {
             frame.toString(),
             Arrays.toString(edges),
             values.toString(),
-            wheel.profileFile == null ? "" : Files.readString(wheel.profileFile),
+            content(wheel.profileFile),
+            content(corrections.file),
             answers.dataSet().manifest().files().toString());
     PrintWriter err = spec.commandLine().getErr();
     try (AtlasWorkFile tiles = AtlasWorkFile.open(workFile, request, frame.tiles())) {
@@ -142,6 +144,10 @@ final class AtlasCommand implements Callable<Integer> {
     }
     Files.delete(workFile);
     return ExitCode.DONE;
+  }
+
+  private static String content(Path file) throws IOException {
+    return file == null ? "" : Files.readString(file);
   }
 
   private PointValues points(Answers answers, AtlasLayer which, Parameters parameters) {
