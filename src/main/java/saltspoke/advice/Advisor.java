@@ -71,6 +71,18 @@ public final class Advisor {
     return cases(shop, request).stream().map(c -> Answer.of(c, request)).toList();
   }
 
+  /**
+   * New wheels under a profile, for whoever asks for a few pairings one after the other.
+   *
+   * @throws Refusal for numbers out of range, and for a wheel already in service
+   */
+  public WheelsAt wheels(AirClimate air, AdviceRequest request) {
+    if (request.ageMonths() != 0) {
+      throw Refusal.outOfRange("ageMonths", request.ageMonths(), "0, a new wheel");
+    }
+    return new WheelsAt(open(air, checked(request), DRAWS, WheelRisk.NIPPLE_SCATTER), request);
+  }
+
   private List<Case> cases(Workshop shop, AdviceRequest request) {
     List<Case> cases = new ArrayList<>();
     for (Pairing pairing :

@@ -52,6 +52,14 @@ final class Fate {
     return first == null ? null : first.site();
   }
 
+  /** Shares of new wheels in each state after some months. */
+  StateShares shares(double months) {
+    double attacked = risk.chance(State.ATTACKED, months);
+    double seized = Math.min(attacked, risk.chance(State.SEIZED, months));
+    double lost = Math.min(seized, risk.chance(State.LOST, months));
+    return new StateShares(1 - attacked, attacked - seized, seized - lost, lost);
+  }
+
   /** Quantiles of the time to a state. */
   StateTimes times(State state) {
     int s = state.ordinal();

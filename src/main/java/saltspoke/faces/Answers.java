@@ -12,6 +12,9 @@ import saltspoke.atlas.AtlasLayer;
 import saltspoke.atlas.LayerValues;
 import saltspoke.atlas.PointValues;
 import saltspoke.atlas.RegionOutlook;
+import saltspoke.atlas.stock.CustomerDesk;
+import saltspoke.atlas.stock.Preference;
+import saltspoke.atlas.stock.StockQuestion;
 import saltspoke.atmosphere.AirClimate;
 import saltspoke.atmosphere.AirModel;
 import saltspoke.atmosphere.AirOverrides;
@@ -171,6 +174,33 @@ public final class Answers {
     Advisor one = advisor.get();
     return LayerValues.firstLook(
         places.get(), airModel.get(), air -> one.pairings(air, request).get(0).firstLookMonths());
+  }
+
+  /** What is asked of a customer list, for the ready profile that the question names. */
+  public StockQuestion stockQuestion(Parameters parameters) {
+    RidingProfile profile =
+        namedProfile(parameters).orElseGet(() -> profiles.get(StockQuestions.USUAL_PROFILE));
+    return stockQuestion(parameters, profile, Preference.shipped(catalogue));
+  }
+
+  /** The same for a profile and an order of preference of one's own. */
+  public StockQuestion stockQuestion(
+      Parameters parameters, RidingProfile profile, List<Preference> preference) {
+    StockQuestion question = StockQuestions.question(parameters, profile, preference);
+    catalogue
+        .refusal(question.today())
+        .ifPresent(
+            why -> {
+              throw Refusal.wrongUse(
+                  "parts-do-not-fit", "nipple", question.today(), "parts that fit");
+            });
+    return question;
+  }
+
+  /** A desk that answers customers. */
+  public CustomerDesk desk(StockQuestion question) {
+    return new CustomerDesk(
+        places.get(), airModel.get(), advisor.get(), catalogue, profiles, question);
   }
 
   /** First-level regions of the world. */

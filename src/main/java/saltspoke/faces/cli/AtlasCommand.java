@@ -136,7 +136,7 @@ final class AtlasCommand implements Callable<Integer> {
       if (tiles.count() > 0) {
         err.printf("going on: %d of %d tiles are there%n", tiles.count(), frame.tiles());
       }
-      ProgressLine progress = new ProgressLine(err);
+      ProgressLine progress = new ProgressLine(err, "land cells");
       new AtlasRun(frame, earth, points, threads).into(tiles, progress::report);
       for (Path file : out) {
         write(file, which, frame, earth, tiles, edges, points, answers, texts);

@@ -21,6 +21,7 @@ import saltspoke.values.Refusal;
       PairingsCommand.class,
       CompareCommand.class,
       SensitivityCommand.class,
+      StockCommand.class,
       RegionCommand.class,
       AtlasCommand.class,
       ServeCommand.class,

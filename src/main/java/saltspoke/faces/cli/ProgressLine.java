@@ -12,20 +12,25 @@ final class ProgressLine {
   private static final long LOG_MS = 10_000;
 
   private final PrintWriter err;
+  private final String what;
   private final boolean terminal = System.console() != null;
   private final long startMs = now();
   private double startShare = Double.NaN;
   private long lastMs = now();
 
-  ProgressLine(PrintWriter err) {
+  /**
+   * @param what the pieces of work are
+   */
+  ProgressLine(PrintWriter err, String what) {
     this.err = err;
+    this.what = what;
   }
 
   /**
-   * @param cells worked out since the start
+   * @param pieces worked out since the start
    * @param share of the whole that is done, 0..1; what was there before counts
    */
-  synchronized void report(long cells, double share) {
+  synchronized void report(long pieces, double share) {
     if (Double.isNaN(startShare)) {
       startShare = share;
     }
@@ -39,11 +44,12 @@ final class ProgressLine {
     double left = seconds * (1 - share) / Math.max(1e-9, share - startShare);
     err.printf(
         Locale.ROOT,
-        "%s%3.0f %%  %,d land cells  %,.0f/s  %s%s",
+        "%s%3.0f %%  %,d %s  %,.0f/s  %s%s",
         terminal ? "\r" : "",
         100 * share,
-        cells,
-        cells / seconds,
+        pieces,
+        what,
+        pieces / seconds,
         done ? clock(seconds) + " in all" : clock(left) + " left   ",
         terminal && !done ? "" : System.lineSeparator());
     err.flush();

@@ -1,0 +1,2 @@
+/** What a list of customers needs: classes, pairings, states, demand and orders. */
+package saltspoke.atlas.stock;
