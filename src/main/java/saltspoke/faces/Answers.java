@@ -91,6 +91,12 @@ public final class Answers {
     return places.get().isLand(latitudeDeg, longitudeDeg);
   }
 
+  /** Land beside a point in the water, see {@link PlaceDirectory#landBeside}. */
+  public Optional<double[]> landBeside(
+      double latitudeDeg, double longitudeDeg, double reachKm, double inlandKm) {
+    return places.get().landBeside(latitudeDeg, longitudeDeg, reachKm, inlandKm);
+  }
+
   /** Codes of the countries whose postcodes are known. */
   public List<String> postcodeCountries() {
     return places.get().postcodeCountries();

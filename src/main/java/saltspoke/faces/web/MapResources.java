@@ -45,7 +45,20 @@ final class MapResources {
 
   MapResources(Answers answers) {
     this.answers = answers;
-    this.nodes = new AirNodes(this::airOnLand);
+    this.nodes =
+        new AirNodes(
+            new AirNodes.World() {
+              @Override
+              public Optional<AirClimate> air(double latitudeDeg, double longitudeDeg) {
+                return airOnLand(latitudeDeg, longitudeDeg);
+              }
+
+              @Override
+              public Optional<double[]> landBeside(
+                  double latitudeDeg, double longitudeDeg, double reachKm, double inlandKm) {
+                return answers.landBeside(latitudeDeg, longitudeDeg, reachKm, inlandKm);
+              }
+            });
   }
 
   /** A tile: {@code /api/tiles/LAYER/Z/X/Y.png}. */
