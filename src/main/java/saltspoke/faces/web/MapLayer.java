@@ -25,7 +25,7 @@ enum MapLayer {
       LayerStyle.steps("chloride", "mg/(m² d)", ColourRamp.OXIDE, 3, 10, 30, 60, 150, 300),
       air -> air.chlorideDepositionMgPerM2Day().median()),
   NEAR_FREEZING_DAYS(
-      LayerStyle.steps("near-freezing-days", "d/a", ColourRamp.WATER, 5, 20, 40, 60, 80, 100),
+      LayerStyle.steps("near-freezing-days", "d/a", ColourRamp.WATER, 5, 20, 40, 70, 100, 140),
       air -> air.annual().nearFreezingDays());
 
   private final Optional<Metal> metal;
