@@ -8,14 +8,20 @@ import saltspoke.advice.AdviceRequest;
 import saltspoke.advice.Advisor;
 import saltspoke.advice.Sensitivity;
 import saltspoke.advice.Tornado;
+import saltspoke.atlas.AtlasLayer;
+import saltspoke.atlas.LayerValues;
+import saltspoke.atlas.PointValues;
+import saltspoke.atlas.RegionOutlook;
 import saltspoke.atmosphere.AirClimate;
 import saltspoke.atmosphere.AirModel;
 import saltspoke.atmosphere.AirOverrides;
 import saltspoke.fields.DataSet;
+import saltspoke.places.Area;
 import saltspoke.places.Place;
 import saltspoke.places.PlaceDirectory;
 import saltspoke.places.PlaceHit;
 import saltspoke.places.PlaceOverrides;
+import saltspoke.places.Regions;
 import saltspoke.values.Refusal;
 import saltspoke.wheel.Catalogue;
 import saltspoke.wheel.Profiles;
@@ -33,6 +39,7 @@ public final class Answers {
   private final Catalogue catalogue = Catalogue.shipped();
   private final Profiles profiles = Profiles.shipped();
   private final Supplier<Advisor> advisor;
+  private final Supplier<Regions> regions;
 
   public Answers(DataSet dataSet) {
     this(dataSet, LocalCorrections.NONE);
@@ -45,6 +52,7 @@ public final class Answers {
     this.places = once(() -> PlaceDirectory.open(dataSet));
     this.airModel = once(() -> AirModel.from(dataSet, corrections.sites()));
     this.advisor = once(() -> new Advisor(catalogue));
+    this.regions = once(() -> Regions.from(dataSet));
   }
 
   /** Begins to make the air model and the advisor in the background, while the place is sought. */
@@ -140,6 +148,80 @@ public final class Answers {
     AirClimate air = air(PlaceQuestion.from(parameters));
     return new Sensitivity(catalogue)
         .of(air, Questions.wheel(parameters, profiles.get(profileName(parameters))));
+  }
+
+  /** The values of an atlas layer at any point. */
+  public PointValues values(AtlasLayer layer) {
+    return LayerValues.of(layer, places.get(), airModel.get());
+  }
+
+  /** The same for the ready profile that the question names. */
+  public PointValues firstLook(Parameters parameters) {
+    return firstLook(parameters, profiles.get(profileName(parameters)));
+  }
+
+  /** The months to the first look at any point, for the one pairing in question. */
+  public PointValues firstLook(Parameters parameters, RidingProfile profile) {
+    AdviceRequest request = Questions.wheel(parameters, profile);
+    int pairings =
+        catalogue
+            .pairings(request.rim(), request.nipple(), request.between(), request.spoke())
+            .size();
+    if (pairings != 1) {
+      throw Refusal.wrongUse(
+          "not-one-pairing",
+          "pairing",
+          pairings + " pairings",
+          "rim, nipple, interface and spoke of one pairing");
+    }
+    Advisor one = advisor.get();
+    return LayerValues.firstLook(
+        places.get(), airModel.get(), air -> one.pairings(air, request).get(0).firstLookMonths());
+  }
+
+  /** First-level regions of the world. */
+  public Regions regions() {
+    return regions.get();
+  }
+
+  /** What the region that a question names is like, for a ready profile if it names one. */
+  public RegionOutlook outlook(Parameters parameters) {
+    String name =
+        parameters
+            .text("region")
+            .orElseThrow(() -> Refusal.wrongUse("empty", "region", "", "a region's name"));
+    Area area = regions.get().find(name);
+    return outlook(area, regions.get().belongingTo(area), parameters, namedProfile(parameters));
+  }
+
+  /**
+   * What an area is like for the people who live in it.
+   *
+   * @param belongs which points are of the area
+   * @param profile how they ride; nothing leaves the wheels out
+   */
+  public RegionOutlook outlook(
+      Area area,
+      Regions.PointTest belongs,
+      Parameters parameters,
+      Optional<RidingProfile> profile) {
+    int sample = parameters.whole("sample", 4, 400, RegionOutlook.USUAL_SAMPLE);
+    return RegionOutlook.of(
+        area,
+        places.get().within(belongs),
+        places.get(),
+        airModel.get(),
+        sample,
+        profile.map(
+            ridden -> {
+              AdviceRequest request = Questions.wheel(parameters, ridden);
+              return air -> advisor.get().pairings(air, request);
+            }));
+  }
+
+  /** The ready profile that a question names, if it names one. */
+  public Optional<RidingProfile> namedProfile(Parameters parameters) {
+    return parameters.text("profile").map(profiles::get);
   }
 
   private static String profileName(Parameters parameters) {

@@ -129,6 +129,12 @@ final class Gazetteer {
     return near;
   }
 
+  List<Town> within(Regions.PointTest test) {
+    return all().parallelStream()
+        .filter(town -> test.test(town.latitudeDeg, town.longitudeDeg))
+        .toList();
+  }
+
   static double distanceKm(Town town, double latitudeDeg, double longitudeDeg) {
     double phi1 = Math.toRadians(town.latitudeDeg);
     double phi2 = Math.toRadians(latitudeDeg);

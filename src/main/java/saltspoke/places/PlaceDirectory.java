@@ -80,6 +80,24 @@ public final class PlaceDirectory {
         flags);
   }
 
+  /** Towns whose centre passes a test, in the order of the gazetteer. */
+  public List<PlaceHit> within(Regions.PointTest test) {
+    return gazetteer.within(test).stream().map(gazetteer::hit).toList();
+  }
+
+  /** The place of a town that a search found. */
+  public Place of(PlaceHit hit) {
+    return assembly.named(
+        hit.name(),
+        hit.regionName(),
+        hit.countryCode(),
+        hit.lat(),
+        hit.lon(),
+        hit.elevationM(),
+        PlaceOverrides.NONE,
+        new ArrayList<>());
+  }
+
   /** The place of a postcode. Leading zeros that a spreadsheet ate are put back, with a flag. */
   public Place byPostcode(String code, String countryCode, PlaceOverrides overrides) {
     PostcodeBook.Found found = postcodes.find(code, countryCode);

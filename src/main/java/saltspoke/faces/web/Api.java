@@ -29,6 +29,7 @@ import saltspoke.faces.json.CatalogueJson;
 import saltspoke.faces.json.Json;
 import saltspoke.faces.json.PlacesJson;
 import saltspoke.faces.json.ProfileJson;
+import saltspoke.faces.json.RegionJson;
 import saltspoke.values.Refusal;
 
 /** The resources under {@code /api}, each a function from a request to a reply. */
@@ -49,6 +50,7 @@ public final class Api {
     resources.put("/api/air", new ResourceHandler(GET, api::air));
     resources.put("/api/advice", new ResourceHandler(Set.of("GET", "POST"), api::advice));
     resources.put("/api/places", new ResourceHandler(GET, api::places));
+    resources.put("/api/region", new ResourceHandler(GET, api::region));
     resources.put("/api/profiles", new ResourceHandler(GET, api::profiles));
     resources.put("/api/pairings", new ResourceHandler(GET, api::pairings));
     resources.put("/api/about", new ResourceHandler(GET, api::about));
@@ -150,6 +152,12 @@ public final class Api {
             .text("q")
             .orElseThrow(() -> Refusal.wrongUse("empty", "q", "", "the beginning of a name"));
     return Reply.json(PlacesJson.of(answers.search(query, parameters.whole("limit", 1, 50, 10))));
+  }
+
+  private Reply region(Ask ask) {
+    Parameters parameters = new Parameters(ask.query(), Questions.REGION);
+    Texts texts = Answers.textsFor(parameters);
+    return Reply.json(RegionJson.of(answers.outlook(parameters), texts));
   }
 
   private Reply profiles(Ask ask) {

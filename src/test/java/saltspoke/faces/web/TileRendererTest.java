@@ -11,6 +11,8 @@ import java.nio.charset.StandardCharsets;
 import javax.imageio.ImageIO;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
+import saltspoke.faces.picture.ColourRamp;
+import saltspoke.faces.picture.LayerStyle;
 import saltspoke.values.Refusal;
 
 /** Two square made-up countries side by side: 0..40 E and 40..80 E, 0..60 N. */
