@@ -371,7 +371,7 @@ def surroundings(f, near, wide, light, country):
     return roughness, 0.8 * level * over_city, np.hypot(np.hypot(spread, 0.4), 0.4)
 
 
-def median_loss(t, rh, pd, sd, pd_spread, sd_spread=0.9, t_spread=1.0, rh_spread=5.0):
+def median_loss(t, rh, pd, sd, t_spread, rh_spread, pd_spread, sd_spread=0.9):
     """Median first-year loss of carbon steel, µm."""
     outside = (
         ((t < -17.1) | (t > 28.7)).astype(int)
@@ -432,7 +432,16 @@ def classes(f, points):
     temperature, humidity, wind, rain = climate(f, lat, lon, elevation, sea_km)
     roughness, so2, so2_spread = surroundings(f, near, wide, light, country)
     salt = chloride(f, lat, lon, elevation, sea_km, roughness, sea, wind, rain)
-    loss = median_loss(temperature.mean(0), humidity.mean(0), so2, salt, so2_spread)
+    height = np.clip(elevation / 1000, 0, 4.5)
+    loss = median_loss(
+        temperature.mean(0),
+        humidity.mean(0),
+        so2,
+        salt,
+        0.54 + 0.50 * height,
+        3.3 + 1.6 * height,
+        so2_spread,
+    )
     return np.searchsorted([1.3, 25, 50, 80, 200], loss, side="left").astype(np.uint8) + 1
 
 

@@ -15,13 +15,11 @@ import saltspoke.wheel.Pairing;
  *
  * @param firstLookMonths 10, 50 and 90 % of the people have at most this
  * @param everyMonths likewise
- * @param replaceByMonths likewise; beyond 240 months counts as 240
+ * @param replaceByMonths likewise; beyond the horizon of {@link PairingAdvice} counts as the
+ *     horizon
  */
 public record PairingOutlook(
     Pairing pairing, Quantiles firstLookMonths, Quantiles everyMonths, Quantiles replaceByMonths) {
-  /** Horizon of the advice, months. */
-  public static final double HORIZON_MONTHS = 240;
-
   /**
    * The pairings by the interval that nine people in ten can keep to, the longest first; of equals
    * the one that lasts longer.
@@ -53,7 +51,7 @@ public record PairingOutlook(
 
   private static double replaceBy(PairingAdvice advice) {
     Double months = advice.replaceByMonths();
-    return months == null ? HORIZON_MONTHS : Math.min(HORIZON_MONTHS, months);
+    return months == null ? PairingAdvice.HORIZON_MONTHS : months;
   }
 
   private static Quantiles quantiles(double[] values) {

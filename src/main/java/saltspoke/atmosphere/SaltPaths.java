@@ -62,7 +62,8 @@ final class SaltPaths {
         double sinArc = Math.sin(arc);
         double cosArc = Math.cos(arc);
         double sine = sinLatitude * cosArc + cosLatitude * sinArc * COS[k];
-        double toLatitude = Math.asin(Math.max(-1, Math.min(1, sine)));
+        // Not by asin, which costs three times as much.
+        double toLatitude = Math.atan2(sine, Math.sqrt(Math.max(0, 1 - sine * sine)));
         double east = Math.atan2(SIN[k] * sinArc * cosLatitude, cosArc - sinLatitude * sine);
         double height =
             elevation.sample(

@@ -22,6 +22,9 @@ final class Coast {
   /** Error of the coarse coast with some room, m. */
   private static final double COARSE_ERROR_M = 4_000;
 
+  /** Coast beyond this is never seen, m. */
+  private static final double HORIZON_M = SeaRays.SHORE_LIMIT_M + SeaRays.FETCH_LIMIT_M;
+
   /** Water this far beyond the shore, at most, tells which sea it is, km. */
   private static final double SEA_SAMPLE_KM = 20;
 
@@ -37,7 +40,7 @@ final class Coast {
   private final DataSet data;
   private final Map<Integer, Map<Integer, CoastBin>> fineTiles = new ConcurrentHashMap<>();
   private final ClosedSeas closedSeas = new ClosedSeas();
-  private List<CoastBin> coarse;
+  private volatile CoarseCoast coarse;
 
   Coast(DataSet data) {
     this.data = data;
@@ -54,7 +57,7 @@ final class Coast {
   Shore nearest(double latitudeDeg, double longitudeDeg) {
     Vantage from = new Vantage(latitudeDeg, longitudeDeg);
     NearestShore search = new NearestShore(from);
-    search.offer(coarse());
+    search.offer(coarse().from(latitudeDeg, longitudeDeg));
     if (search.bestM() < FINE_M + COARSE_ERROR_M) {
       double reach = search.bestM() + COARSE_ERROR_M;
       NearestShore fine = new NearestShore(from);
@@ -114,11 +117,11 @@ final class Coast {
         rays.add(bin.shape(), 0, FINE_M);
       }
     }
-    double horizonM = SeaRays.SHORE_LIMIT_M + SeaRays.FETCH_LIMIT_M;
-    double chord = Vantage.chordOfArcM(horizonM);
-    for (CoastBin bin : coarse()) {
-      if (bin.leastM(from) < chord) {
-        rays.add(bin.shape(), fineM, horizonM);
+    double chord = Vantage.chordOfArcM(HORIZON_M);
+    CoarseCoast.Order order = coarse().from(latitudeDeg, longitudeDeg);
+    for (int b = 0; b < order.bins().length && order.leastM()[b] < chord; b++) {
+      if (order.bins()[b].leastM(from) < chord) {
+        rays.add(order.bins()[b].shape(), fineM, HORIZON_M);
       }
     }
     return rays;
@@ -136,23 +139,30 @@ final class Coast {
                     Math.sin(azimuth) * Math.sin(arc) * Math.cos(phi),
                     Math.cos(arc) - Math.sin(phi) * sin));
     double wrapped = lon - 360 * Math.floor((lon + 180) / 360);
-    return closedSeas.ratioAt(Math.toDegrees(Math.asin(sin)), wrapped);
+    return closedSeas.ratioAt(Math.toDegrees(Vantage.arcSine(sin)), wrapped);
   }
 
-  private synchronized List<CoastBin> coarse() {
+  private CoarseCoast coarse() {
     if (coarse == null) {
-      List<CoastBin> bins = new ArrayList<>();
-      new TiledTable(data, "coast-coarse")
-          .all(
-              line -> {
-                // A row without a fraction is a whole bin of land and has no coast.
-                if (line.indexOf('.') >= 0) {
-                  bins.add(CoastBin.parse(line));
-                }
-              });
-      coarse = bins;
+      readCoarse();
     }
     return coarse;
+  }
+
+  private synchronized void readCoarse() {
+    if (coarse != null) {
+      return;
+    }
+    List<CoastBin> bins = new ArrayList<>();
+    new TiledTable(data, "coast-coarse")
+        .all(
+            line -> {
+              // A row without a fraction is a whole bin of land and has no coast.
+              if (line.indexOf('.') >= 0) {
+                bins.add(CoastBin.parse(line));
+              }
+            });
+    coarse = new CoarseCoast(bins, Vantage.chordOfArcM(HORIZON_M));
   }
 
   private CoastBin fineBin(int key, int tile) {

@@ -32,6 +32,7 @@ import saltspoke.faces.export.AtlasPicture;
 import saltspoke.faces.export.AtlasWorkFile;
 import saltspoke.faces.export.CloudGeoTiff;
 import saltspoke.faces.export.CoordinateSystem;
+import saltspoke.faces.picture.LayerStyle;
 import saltspoke.faces.picture.LayerStyles;
 import saltspoke.values.Note;
 import saltspoke.values.Refusal;
@@ -67,6 +68,7 @@ final class AtlasCommand implements Callable<Integer> {
   @Spec private CommandSpec spec;
   @Mixin private WheelOptions wheel;
   @Mixin private CommonOptions common;
+  @Mixin private CorrectionsOption corrections;
 
   @Option(names = "--layer", paramLabel = "LAYER", required = true, description = "What to show.")
   private String layer;
@@ -114,7 +116,7 @@ final class AtlasCommand implements Callable<Integer> {
     CoordinateSystem system = CoordinateSystem.of(crs);
     AtlasFrame frame = system.frame(edges, step(system));
     PlaneToEarth earth = system.toEarth(edges);
-    Answers answers = Opening.answers(common.data).prepare();
+    Answers answers = Opening.answers(common.data, corrections).prepare();
     PointValues points = points(answers, which, parameters);
 
     Path workFile = out.get(0).resolveSibling(out.get(0).getFileName() + ".part");
@@ -126,7 +128,8 @@ final class AtlasCommand implements Callable<Integer> {
             frame.toString(),
             Arrays.toString(edges),
             values.toString(),
-            wheel.profileFile == null ? "" : Files.readString(wheel.profileFile),
+            content(wheel.profileFile),
+            content(corrections.file),
             answers.dataSet().manifest().files().toString());
     PrintWriter err = spec.commandLine().getErr();
     try (AtlasWorkFile tiles = AtlasWorkFile.open(workFile, request, frame.tiles())) {
@@ -141,6 +144,10 @@ final class AtlasCommand implements Callable<Integer> {
     }
     Files.delete(workFile);
     return ExitCode.DONE;
+  }
+
+  private static String content(Path file) throws IOException {
+    return file == null ? "" : Files.readString(file);
   }
 
   private PointValues points(Answers answers, AtlasLayer which, Parameters parameters) {
@@ -167,7 +174,16 @@ final class AtlasCommand implements Callable<Integer> {
     String source = texts.say(Note.of("atlas-source", "version", About.version()));
     PrintWriter console = spec.commandLine().getOut();
     switch (form(file)) {
-      case "png" -> AtlasPicture.write(file, frame, LayerStyles.of(which), tiles, title, source);
+      case "png" -> {
+        LayerStyle style = LayerStyles.of(which);
+        String unit = which == AtlasLayer.FIRST_LOOK ? texts.say("atlas-months") : style.unit();
+        AtlasPicture.write(
+            file,
+            frame,
+            style,
+            tiles,
+            new AtlasPicture.Words(title, wheel.title(texts), unit, source));
+      }
       case "geojson" -> {
         List<AreaValue> areas =
             AreaTally.of(

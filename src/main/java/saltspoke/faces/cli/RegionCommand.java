@@ -44,6 +44,7 @@ final class RegionCommand implements Callable<Integer> {
   @Spec private CommandSpec spec;
   @Mixin private WheelOptions wheel;
   @Mixin private CommonOptions common;
+  @Mixin private CorrectionsOption corrections;
 
   @picocli.CommandLine.Parameters(
       paramLabel = "NAME",
@@ -71,7 +72,7 @@ final class RegionCommand implements Callable<Integer> {
     PlaceOptions.put(values, "lang", common.language);
     Parameters parameters = new Parameters(values, Questions.REGION);
     Texts texts = Answers.textsFor(parameters);
-    Answers answers = Opening.answers(common.data).prepare();
+    Answers answers = Opening.answers(common.data, corrections).prepare();
     Area area = area(answers, parameters);
     Optional<RidingProfile> profile =
         wheel.profileFile == null

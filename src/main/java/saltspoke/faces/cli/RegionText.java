@@ -2,6 +2,7 @@ package saltspoke.faces.cli;
 
 import java.util.Locale;
 import java.util.Map;
+import saltspoke.advice.PairingAdvice;
 import saltspoke.atlas.PairingOutlook;
 import saltspoke.atlas.RegionOutlook;
 import saltspoke.atmosphere.Category;
@@ -76,7 +77,7 @@ final class RegionText {
   }
 
   private static String month(double months, Texts texts) {
-    return months >= PairingOutlook.HORIZON_MONTHS ? ">240" : texts.format(months);
+    return months >= PairingAdvice.HORIZON_MONTHS ? ">240" : texts.format(months);
   }
 
   private static String cell(double pct) {

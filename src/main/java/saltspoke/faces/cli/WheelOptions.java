@@ -5,9 +5,12 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.LinkedHashMap;
+import java.util.List;
 import java.util.Map;
+import java.util.stream.Collectors;
 import picocli.CommandLine.Option;
 import saltspoke.faces.Parameters;
+import saltspoke.faces.Texts;
 import saltspoke.faces.json.Json;
 import saltspoke.faces.json.ProfileJson;
 import saltspoke.values.Refusal;
@@ -107,6 +110,15 @@ final class WheelOptions {
     PlaceOptions.put(values, "tape-sound", tapeSound);
     PlaceOptions.put(values, "hidden-nipples", hiddenNipples);
     return values;
+  }
+
+  /** Parts and profile as people call them; empty when none is named. */
+  String title(Texts texts) {
+    Map<String, String> titles = new LinkedHashMap<>(values());
+    titles.keySet().retainAll(List.of("profile", "rim", "nipple", "interface", "spoke"));
+    return titles.entrySet().stream()
+        .map(part -> texts.say("page-" + part.getKey() + "-" + part.getValue()))
+        .collect(Collectors.joining(" · "));
   }
 
   /** The profile in the file that was named. */

@@ -40,19 +40,25 @@ public final class AtlasPicture {
     this.style = style;
     int longest = Math.max(frame.columns(), frame.rows());
     thin = (longest + MOST_PX - 1) / MOST_PX;
-    widen = Math.max(1, LEAST_PX / frame.columns());
+    widen = Math.max(1, (LEAST_PX + frame.columns() - 1) / frame.columns());
     width = Math.max(1, frame.columns() / thin) * widen;
     height = Math.max(1, frame.rows() / thin) * widen;
   }
 
   /**
-   * @param title above the map
+   * What is written around the map.
+   *
+   * @param title above it
+   * @param subtitle below the title, may be empty
+   * @param unit behind the legend
    * @param source below the legend
    */
+  public record Words(String title, String subtitle, String unit, String source) {}
+
   public static void write(
-      Path target, AtlasFrame frame, LayerStyle style, TileStore tiles, String title, String source)
+      Path target, AtlasFrame frame, LayerStyle style, TileStore tiles, Words words)
       throws IOException {
-    BufferedImage image = new AtlasPicture(frame, style).draw(tiles, title, source);
+    BufferedImage image = new AtlasPicture(frame, style).draw(tiles, words);
     Path aside = WholeFile.aside(target);
     ImageIO.setUseCache(false);
     if (!ImageIO.write(image, "png", aside.toFile())) {
@@ -61,7 +67,7 @@ public final class AtlasPicture {
     WholeFile.moveInto(aside, target);
   }
 
-  private BufferedImage draw(TileStore tiles, String title, String source) throws IOException {
+  private BufferedImage draw(TileStore tiles, Words words) throws IOException {
     BufferedImage image =
         new BufferedImage(
             Math.max(width, LEAST_PX) + 2 * MARGIN,
@@ -79,8 +85,10 @@ public final class AtlasPicture {
     }
     g.setColor(INK);
     g.setFont(new Font(Font.SANS_SERIF, Font.BOLD, 22));
-    g.drawString(title, MARGIN, MARGIN + 22);
-    legend(g, MARGIN + TITLE + height + 16, source);
+    g.drawString(words.title, MARGIN, MARGIN + 14);
+    g.setFont(new Font(Font.SANS_SERIF, Font.PLAIN, 13));
+    g.drawString(words.subtitle, MARGIN, MARGIN + 34);
+    legend(g, MARGIN + TITLE + height + 16, words);
     g.dispose();
     return image;
   }
@@ -107,7 +115,7 @@ public final class AtlasPicture {
     }
   }
 
-  private void legend(Graphics2D g, int top, String source) {
+  private void legend(Graphics2D g, int top, Words words) {
     g.setFont(new Font(Font.SANS_SERIF, Font.PLAIN, 15));
     int x = MARGIN;
     for (int i = 0; i < style.labels().size(); i++) {
@@ -118,8 +126,8 @@ public final class AtlasPicture {
       g.drawString(style.labels().get(i), x + BOX + 6, top + 17);
       x += BOX + 24 + g.getFontMetrics().stringWidth(style.labels().get(i));
     }
-    g.drawString(style.unit(), x, top + 17);
+    g.drawString(words.unit, x, top + 17);
     g.setFont(new Font(Font.SANS_SERIF, Font.PLAIN, 12));
-    g.drawString(source, MARGIN, top + BOX + 28);
+    g.drawString(words.source, MARGIN, top + BOX + 28);
   }
 }
