@@ -6,6 +6,7 @@ import java.util.List;
 import saltspoke.atmosphere.AirClimate;
 import saltspoke.values.Note;
 import saltspoke.values.Refusal;
+import saltspoke.values.Stopped;
 import saltspoke.wheel.Catalogue;
 import saltspoke.wheel.CellTables;
 import saltspoke.wheel.Pairing;
@@ -75,6 +76,7 @@ public final class Advisor {
     List<Case> cases = new ArrayList<>();
     for (Pairing pairing :
         catalogue.pairings(request.rim(), request.nipple(), request.between(), request.spoke())) {
+      Stopped.check();
       cases.add(shop.of(pairing));
     }
     cases.sort(

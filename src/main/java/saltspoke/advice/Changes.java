@@ -5,6 +5,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.function.Function;
 import saltspoke.values.Note;
+import saltspoke.values.Stopped;
 import saltspoke.wheel.Catalogue;
 import saltspoke.wheel.Pairing;
 import saltspoke.wheel.RidingProfile;
@@ -33,6 +34,7 @@ final class Changes {
   List<Change> of(Case now, Workshop open, boolean south) {
     List<Change> found = new ArrayList<>();
     for (Option option : habits(south)) {
+      Stopped.check();
       Case then = opener.apply(option.request()).of(now.pairing());
       found.add(change(option.field(), option.value(), option.cost(), now, then));
     }

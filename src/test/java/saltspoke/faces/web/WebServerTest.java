@@ -29,7 +29,8 @@ class WebServerTest {
   static void start() throws Exception {
     server =
         new WebServer(
-            0,
+            ServerSettings.local(0),
+            ServerLimits.USUAL,
             Map.of(
                 "/ok", new ResourceHandler(Set.of("GET"), ask -> Reply.json(Json.object())),
                 "/echo",
@@ -48,7 +49,8 @@ class WebServerTest {
                         ask -> {
                           throw Refusal.dataDamaged("damaged", "a.tif", "", "fetch it again");
                         }),
-                "/*", new ResourceHandler(Set.of("GET"), new StaticFiles()::serve)));
+                "/*", new ResourceHandler(Set.of("GET"), new StaticFiles()::serve)),
+            () -> true);
     base = server.start();
   }
 
