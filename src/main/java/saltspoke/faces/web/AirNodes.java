@@ -1,12 +1,10 @@
 package saltspoke.faces.web;
 
 import java.util.Arrays;
-import java.util.Collections;
-import java.util.LinkedHashMap;
-import java.util.Map;
 import java.util.Optional;
 import java.util.function.BiFunction;
 import saltspoke.atmosphere.AirClimate;
+import saltspoke.values.Kept;
 
 /**
  * The air at the nodes of nested lattices in the Web Mercator plane, worked out when a tile first
@@ -18,20 +16,11 @@ final class AirNodes {
   /** Nodes along a tile's edge: one every 16 pixels. */
   static final int PER_TILE = 16;
 
-  private static final int MOST_KEPT = 300_000;
+  private static final int MOST_KEPT = 100_000;
   private static final int LAYERS = MapLayer.values().length;
 
   private final BiFunction<Double, Double, Optional<AirClimate>> air;
-  private final Map<Long, float[]> kept =
-      Collections.synchronizedMap(
-          new LinkedHashMap<>(1024, 0.75f, true) {
-            private static final long serialVersionUID = 1L;
-
-            @Override
-            protected boolean removeEldestEntry(Map.Entry<Long, float[]> eldest) {
-              return size() > MOST_KEPT;
-            }
-          });
+  private final Kept<Long, float[]> kept = new Kept<>(MOST_KEPT, node -> 1);
 
   /**
    * @param air the air at a latitude and longitude, nothing at sea
@@ -67,12 +56,10 @@ final class AirNodes {
       y /= 2;
     }
     long key = (long) level << 48 | (long) y << 24 | x;
-    float[] node = kept.get(key);
-    if (node == null) {
-      node = work(level, x, y);
-      kept.put(key, node);
-    }
-    return node;
+    int ofLevel = level;
+    int atX = x;
+    int atY = y;
+    return kept.get(key, k -> work(ofLevel, atX, atY));
   }
 
   private float[] work(int level, int x, int y) {
