@@ -12,7 +12,6 @@ import net.jqwik.api.constraints.IntRange;
 import org.junit.jupiter.api.Test;
 
 @Tag("law")
-@org.junit.jupiter.api.Tag("law")
 class KeptTest {
   @Property(tries = 200)
   void theWeightNeverPassesTheLimit(@ForAll List<@IntRange(min = 0, max = 30) Integer> keys) {
@@ -24,6 +23,7 @@ class KeptTest {
   }
 
   @Test
+  @org.junit.jupiter.api.Tag("law")
   void whatWasAskedForLastStays() {
     Kept<String, String> kept = new Kept<>(2, String::length);
     List<String> made = new ArrayList<>();
@@ -40,6 +40,7 @@ class KeptTest {
   }
 
   @Test
+  @org.junit.jupiter.api.Tag("law")
   void aValueHeavierThanAllIsMadeAndNotKept() {
     Kept<String, String> kept = new Kept<>(2, String::length);
     assertEquals("long", kept.get("long", k -> k));

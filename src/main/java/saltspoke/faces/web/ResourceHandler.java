@@ -111,7 +111,7 @@ final class ResourceHandler extends Handler.Abstract {
   private static String body(Request request) {
     try {
       return Content.Source.asString(request, StandardCharsets.UTF_8);
-    } catch (IOException e) {
+    } catch (IOException | IllegalArgumentException e) {
       throw Refusal.wrongUse("unreadable-body", "body", "", "a JSON object in UTF-8");
     }
   }
