@@ -1,12 +1,9 @@
 package saltspoke.faces.web;
 
 import java.util.Arrays;
-import java.util.Collections;
-import java.util.LinkedHashMap;
-import java.util.Map;
 import java.util.Optional;
-import java.util.function.Supplier;
 import saltspoke.atmosphere.AirClimate;
+import saltspoke.values.Kept;
 
 /**
  * The air at the nodes of nested lattices in the Web Mercator plane, worked out when a tile first
@@ -22,7 +19,7 @@ final class AirNodes {
   /** Nodes along a tile's edge: one every 16 pixels. */
   static final int PER_TILE = 16;
 
-  private static final int MOST_KEPT = 300_000;
+  private static final int MOST_KEPT = 100_000;
   private static final int LAYERS = MapLayer.values().length;
 
   /** Farthest shore that a node in the water stands for, in steps: the diagonal of a cell. */
@@ -47,16 +44,7 @@ final class AirNodes {
   }
 
   private final World world;
-  private final Map<Long, float[]> kept =
-      Collections.synchronizedMap(
-          new LinkedHashMap<>(1024, 0.75f, true) {
-            private static final long serialVersionUID = 1L;
-
-            @Override
-            protected boolean removeEldestEntry(Map.Entry<Long, float[]> eldest) {
-              return size() > MOST_KEPT;
-            }
-          });
+  private final Kept<Long, float[]> kept = new Kept<>(MOST_KEPT, node -> 1);
 
   AirNodes(World world) {
     this.world = world;
@@ -92,23 +80,14 @@ final class AirNodes {
     int coarsestX = x;
     int coarsestY = y;
     float[] node =
-        kept(
+        kept.get(
             key(level, x, y),
-            () ->
+            k ->
                 onLand(latitudeDeg(coarsest, coarsestY), longitudeDeg(coarsest, coarsestX))
                     .orElse(IN_WATER));
     return node == IN_WATER
-        ? kept(WATER | key(zoom, column, row), () -> beside(zoom, column, row))
+        ? kept.get(WATER | key(zoom, column, row), k -> beside(zoom, column, row))
         : node;
-  }
-
-  private float[] kept(long key, Supplier<float[]> work) {
-    float[] node = kept.get(key);
-    if (node == null) {
-      node = work.get();
-      kept.put(key, node);
-    }
-    return node;
   }
 
   private static long key(int level, int x, int y) {
