@@ -2,6 +2,7 @@
 # Compares the program with the same fields and formulas in NumPy and SciPy: class of steel at the
 # land points of a world grid, from the same files, in one run on the same machine.
 # Usage: src/bench/compare.sh [STEP_DEG] after `mvn -B -q -DskipTests package`.
+# Wall times mean something on a quiet machine only; CPU times bear some company.
 # Needs GNU time, and python3 with numpy, scipy and tifffile (PYTHON names another one).
 set -euo pipefail
 cd "$(dirname "$0")/../.."
@@ -44,6 +45,7 @@ print(f"same class at {100 * same:.4f} % of {len(java)} points, {(java != numpy)
 for other in ("numpy", "numpy-2-processes", "numpy-in-pieces"):
     a = [float(x) for x in open(f"{work}/java.time").read().split()]
     b = [float(x) for x in open(f"{work}/{other}.time").read().split()]
-    print(f"java over {other}: wall {a[0] / b[0]:.2f}, memory {a[3] / b[3]:.2f}")
+    cpu = (a[1] + a[2]) / (b[1] + b[2])
+    print(f"java over {other}: wall {a[0] / b[0]:.2f}, CPU {cpu:.2f}, memory {a[3] / b[3]:.2f}")
 sys.exit(0 if same >= 0.999 else 1)
 PY
