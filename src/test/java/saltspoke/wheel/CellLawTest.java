@@ -24,6 +24,13 @@ import saltspoke.values.Refusal;
 @Tag("law")
 class CellLawTest {
   private static final int TRIES = 150;
+
+  /**
+   * Thinner than this is droplets, no film; the wheel's weather counts less than 1 µm as dry. In a
+   * film of 5 nm ten times the oxygen lowered the dissolution by 1e-5, the grid's own error.
+   */
+  private static final double THINNEST_UM = 0.1;
+
   private static final double ROUNDING = 1 + 1e-7;
 
   @Property(tries = TRIES)
@@ -241,6 +248,7 @@ class CellLawTest {
                     ? ThinFilm.inEquilibrium(new SaltMix(0, mg, 0, 0), h, t)
                     : k == 1
                         ? ThinFilm.inEquilibrium(new SaltMix(mg, 0, mg / 3, 0), h, t)
-                        : ThinFilm.ofWater(new SaltMix(0.01 * mg, 0, 0, 0), h, Math.abs(t)));
+                        : ThinFilm.ofWater(new SaltMix(0.01 * mg, 0, 0, 0), h, Math.abs(t)))
+        .filter(film -> film.thicknessUm() >= THINNEST_UM);
   }
 }
