@@ -23,6 +23,7 @@ import saltspoke.places.PlaceHit;
 import saltspoke.places.PlaceOverrides;
 import saltspoke.places.Regions;
 import saltspoke.values.Refusal;
+import saltspoke.values.Stopped;
 import saltspoke.wheel.Catalogue;
 import saltspoke.wheel.Profiles;
 import saltspoke.wheel.RidingProfile;
@@ -34,12 +35,12 @@ import saltspoke.wheel.RidingProfile;
 public final class Answers {
   private final DataSet dataSet;
   private final LocalCorrections corrections;
-  private final Supplier<PlaceDirectory> places;
-  private final Supplier<AirModel> airModel;
+  private final Once<PlaceDirectory> places;
+  private final Once<AirModel> airModel;
   private final Catalogue catalogue = Catalogue.shipped();
   private final Profiles profiles = Profiles.shipped();
-  private final Supplier<Advisor> advisor;
-  private final Supplier<Regions> regions;
+  private final Once<Advisor> advisor;
+  private final Once<Regions> regions;
 
   public Answers(DataSet dataSet) {
     this(dataSet, LocalCorrections.NONE);
@@ -49,15 +50,15 @@ public final class Answers {
   public Answers(DataSet dataSet, LocalCorrections corrections) {
     this.dataSet = dataSet;
     this.corrections = corrections;
-    this.places = once(() -> PlaceDirectory.open(dataSet));
-    this.airModel = once(() -> AirModel.from(dataSet, corrections.sites()));
-    this.advisor = once(() -> new Advisor(catalogue));
-    this.regions = once(() -> Regions.from(dataSet));
+    this.places = new Once<>(() -> PlaceDirectory.open(dataSet));
+    this.airModel = new Once<>(() -> AirModel.from(dataSet, corrections.sites()));
+    this.advisor = new Once<>(() -> new Advisor(catalogue));
+    this.regions = new Once<>(() -> Regions.from(dataSet));
   }
 
-  /** Begins to make the air model and the advisor in the background, while the place is sought. */
+  /** Begins to make all parts in the background, while the place is sought. */
   public Answers prepare() {
-    for (Supplier<?> part : List.of(airModel, advisor)) {
+    for (Once<?> part : List.of(places, airModel, advisor)) {
       Thread thread = new Thread(() -> tryToMake(part), "prepare");
       thread.setDaemon(true);
       thread.start();
@@ -65,7 +66,12 @@ public final class Answers {
     return this;
   }
 
-  private static void tryToMake(Supplier<?> part) {
+  /** Whether all parts are made, so that the next answer need not wait for any. */
+  public boolean ready() {
+    return places.isMade() && airModel.isMade() && advisor.isMade();
+  }
+
+  private static void tryToMake(Once<?> part) {
     try {
       part.get();
     } catch (RuntimeException e) {
@@ -99,6 +105,12 @@ public final class Answers {
     return places.get().isLand(latitudeDeg, longitudeDeg);
   }
 
+  /** Land beside a point in the water, see {@link PlaceDirectory#landBeside}. */
+  public Optional<double[]> landBeside(
+      double latitudeDeg, double longitudeDeg, double reachKm, double inlandKm) {
+    return places.get().landBeside(latitudeDeg, longitudeDeg, reachKm, inlandKm);
+  }
+
   /** Codes of the countries whose postcodes are known. */
   public List<String> postcodeCountries() {
     return places.get().postcodeCountries();
@@ -122,6 +134,7 @@ public final class Answers {
 
   /** The air at the place of a question. */
   public AirClimate air(PlaceQuestion question) {
+    Stopped.check();
     return airModel.get().at(place(question), AirOverrides.of(question.setting().orElse(null)));
   }
 
@@ -233,17 +246,28 @@ public final class Answers {
     return Texts.in(language.orElse("en"));
   }
 
-  private static <T> Supplier<T> once(Supplier<T> maker) {
-    return new Supplier<>() {
-      private T made;
+  /** A part that is made at its first use, by one thread. */
+  private static final class Once<T> {
+    private final Supplier<T> maker;
+    private volatile T made;
 
-      @Override
-      public synchronized T get() {
-        if (made == null) {
-          made = maker.get();
-        }
-        return made;
+    Once(Supplier<T> maker) {
+      this.maker = maker;
+    }
+
+    T get() {
+      return made == null ? make() : made;
+    }
+
+    boolean isMade() {
+      return made != null;
+    }
+
+    private synchronized T make() {
+      if (made == null) {
+        made = maker.get();
       }
-    };
+      return made;
+    }
   }
 }

@@ -4,11 +4,11 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.concurrent.ConcurrentHashMap;
 import net.sf.geographiclib.Geodesic;
 import net.sf.geographiclib.GeodesicData;
 import net.sf.geographiclib.GeodesicMask;
 import saltspoke.fields.DataSet;
+import saltspoke.values.Kept;
 
 /**
  * The coast of the world: which points are land, how far the nearest shore is, and what the sea
@@ -36,9 +36,21 @@ final class Coast {
    */
   record Shore(double latitudeDeg, double longitudeDeg, double distanceKm, double azimuthDeg) {}
 
+  /**
+   * The bins of one tile.
+   *
+   * @param bytes about as much memory as they take once parsed: a vertex has some 20 characters in
+   *     the table and 20 bytes as numbers
+   */
+  private record FineTile(Map<Integer, CoastBin> bins, long bytes) {}
+
   private final TiledTable fineTable;
   private final DataSet data;
-  private final Map<Integer, Map<Integer, CoastBin>> fineTiles = new ConcurrentHashMap<>();
+
+  /** Tiles in use, within a quarter of the heap: the whole world's where there is room. */
+  private final Kept<Integer, FineTile> fineTiles =
+      new Kept<>(Runtime.getRuntime().maxMemory() / 4, FineTile::bytes);
+
   private final ClosedSeas closedSeas = new ClosedSeas();
   private volatile CoarseCoast coarse;
 
@@ -166,20 +178,20 @@ final class Coast {
   }
 
   private CoastBin fineBin(int key, int tile) {
-    return fineTiles
-        .computeIfAbsent(
-            tile,
-            t -> {
-              Map<Integer, CoastBin> bins = new HashMap<>();
-              fineTable.tile(
-                  t,
-                  line -> {
-                    CoastBin bin = CoastBin.parse(line);
-                    bins.put(bin.key(), bin);
-                  });
-              return bins;
-            })
-        .get(key);
+    return fineTiles.get(tile, this::readTile).bins().get(key);
+  }
+
+  private FineTile readTile(int tile) {
+    Map<Integer, CoastBin> bins = new HashMap<>();
+    long[] bytes = {0};
+    fineTable.tile(
+        tile,
+        line -> {
+          CoastBin bin = CoastBin.parse(line);
+          bins.put(bin.key(), bin);
+          bytes[0] += line.length();
+        });
+    return new FineTile(bins, bytes[0]);
   }
 
   private List<CoastBin> fineBins(double latitudeDeg, double longitudeDeg, double reachM) {

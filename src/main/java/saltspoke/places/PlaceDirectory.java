@@ -153,6 +153,20 @@ public final class PlaceDirectory {
     return coast.isLand(latitudeDeg, longitudeDeg);
   }
 
+  /**
+   * A point of land for one in the water: from the nearest shore straight on inland, so far as
+   * there is land; nothing when no shore lies within reach. For maps, where a node off the shore
+   * stands for the land beside it.
+   *
+   * @param reachKm farthest shore that counts
+   * @param inlandKm wanted distance behind the shore
+   * @return latitude and longitude, degrees
+   */
+  public Optional<double[]> landBeside(
+      double latitudeDeg, double longitudeDeg, double reachKm, double inlandKm) {
+    return assembly.landBeside(latitudeDeg, longitudeDeg, reachKm, inlandKm);
+  }
+
   /** The sea as seen from a point, without looking for names: for maps of many points. */
   public SeaView seaView(double latitudeDeg, double longitudeDeg) {
     return coast.view(latitudeDeg, longitudeDeg);

@@ -43,7 +43,7 @@ public final class LayerStyles {
       case WET_HOURS ->
           LayerStyle.steps(id, "h/a", ColourRamp.WATER, 250, 1000, 2500, 3500, 4500, 5500);
       case NEAR_FREEZING_DAYS ->
-          LayerStyle.steps(id, "d/a", ColourRamp.WATER, 5, 20, 40, 60, 80, 100);
+          LayerStyle.steps(id, "d/a", ColourRamp.WATER, 5, 20, 40, 70, 100, 140);
       case FIRST_LOOK -> firstLook(id);
     };
   }

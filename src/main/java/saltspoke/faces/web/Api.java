@@ -45,6 +45,15 @@ public final class Api {
 
   /** A server for these answers on a port of the loopback address, 0 for any free one. */
   public static WebServer server(int port, Answers answers) {
+    return server(ServerSettings.local(port), answers);
+  }
+
+  /** A server for these answers under the usual limits. */
+  public static WebServer server(ServerSettings settings, Answers answers) {
+    return new WebServer(settings, ServerLimits.USUAL, resources(answers), answers::ready);
+  }
+
+  private static Map<String, ResourceHandler> resources(Answers answers) {
     Api api = new Api(answers);
     Map<String, ResourceHandler> resources = new LinkedHashMap<>();
     resources.put("/api/air", new ResourceHandler(GET, api::air));
@@ -66,7 +75,7 @@ public final class Api {
     resources.put("/api/advice.csv", new ResourceHandler(Set.of("GET", "POST"), api::table));
     resources.put("/api/openapi.json", new ResourceHandler(GET, api::document));
     resources.put("/*", new ResourceHandler(GET, new StaticFiles()::serve));
-    return new WebServer(port, resources);
+    return resources;
   }
 
   private Reply air(Ask ask) {
