@@ -1,5 +1,7 @@
 package saltspoke.faces.cli;
 
+import com.fasterxml.jackson.databind.node.ArrayNode;
+import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.io.IOException;
 import java.io.PrintWriter;
 import java.nio.file.Files;
@@ -32,6 +34,7 @@ import saltspoke.faces.export.AtlasPicture;
 import saltspoke.faces.export.AtlasWorkFile;
 import saltspoke.faces.export.CloudGeoTiff;
 import saltspoke.faces.export.CoordinateSystem;
+import saltspoke.faces.json.Json;
 import saltspoke.faces.picture.LayerStyle;
 import saltspoke.faces.picture.LayerStyles;
 import saltspoke.values.Note;
@@ -141,6 +144,7 @@ final class AtlasCommand implements Callable<Integer> {
       for (Path file : out) {
         write(file, which, frame, earth, tiles, edges, points, answers, texts);
       }
+      tell(which, frame);
     }
     Files.delete(workFile);
     return ExitCode.DONE;
@@ -172,7 +176,6 @@ final class AtlasCommand implements Callable<Integer> {
       throws IOException {
     String title = texts.say("page-layer-" + which.id());
     String source = texts.say(Note.of("atlas-source", "version", About.version()));
-    PrintWriter console = spec.commandLine().getOut();
     switch (form(file)) {
       case "png" -> {
         LayerStyle style = LayerStyles.of(which);
@@ -195,13 +198,30 @@ final class AtlasCommand implements Callable<Integer> {
       }
       default -> CloudGeoTiff.write(file, frame, which, tiles, description(which));
     }
-    console.printf(
-        Locale.ROOT,
-        "%s: %d × %d cells, %,d bytes%n",
-        file,
-        frame.columns(),
-        frame.rows(),
-        Files.size(file));
+  }
+
+  private void tell(AtlasLayer which, AtlasFrame frame) throws IOException {
+    ObjectNode answer = Json.object();
+    answer.put("layer", which.id());
+    answer.put("unit", which.unit());
+    answer.put("crs", "EPSG:" + frame.epsg());
+    answer.put("columns", frame.columns());
+    answer.put("rows", frame.rows());
+    ArrayNode files = answer.putArray("files");
+    StringBuilder lines = new StringBuilder();
+    for (Path file : out) {
+      files.addObject().put("file", file.toString()).put("bytes", Files.size(file));
+      AirText.line(
+          lines,
+          "%s: %d × %d cells, %,d bytes",
+          file,
+          frame.columns(),
+          frame.rows(),
+          Files.size(file));
+    }
+    spec.commandLine()
+        .getOut()
+        .print(common.json ? Json.pretty(answer) + System.lineSeparator() : lines);
   }
 
   private static String description(AtlasLayer which) {

@@ -28,6 +28,12 @@ public final class CoordinateSystem {
   /** A point that does not come back to within this, degrees, lies off the map. */
   private static final double ROUND_TRIP_DEG = 1e-4;
 
+  /** Points each way by which a box is tried. */
+  private static final int SURVEY = 20;
+
+  /** Of them must be shown: a system for one zone cannot hold the world. */
+  private static final double LEAST_SHOWN = 0.95;
+
   private final int epsg;
   private final boolean geographic;
   private final MathTransform toPlane;
@@ -79,7 +85,32 @@ public final class CoordinateSystem {
    * @param step in the unit of the plane
    */
   public AtlasFrame frame(double[] box, double step) {
+    if (toPlane != null && shareShown(box) < LEAST_SHOWN) {
+      throw offTheMap(box);
+    }
     return AtlasFrame.over(toPlane == null ? box : inPlane(box), step, epsg, geographic);
+  }
+
+  /** Share of a grid of points in the box that go to the plane and come back. */
+  private double shareShown(double[] box) {
+    int shown = 0;
+    PlaneToEarth earth = toEarth(box);
+    for (int i = 0; i < SURVEY * SURVEY; i++) {
+      double[] plane = {
+        box[0] + (box[2] - box[0]) * (i % SURVEY + 0.5) / SURVEY,
+        box[1] + (box[3] - box[1]) * (i / SURVEY + 0.5) / SURVEY
+      };
+      try {
+        double lon = plane[0];
+        toPlane.transform(plane, 0, plane, 0, 1);
+        double[] back = earth.lonLat(plane[0], plane[1]);
+        shown += back != null && Math.abs(back[0] - lon) < ROUND_TRIP_DEG ? 1 : 0;
+      } catch (TransformException | RuntimeException e) {
+        // A point that the plane cannot show is counted by not being counted.
+        continue;
+      }
+    }
+    return shown / (double) (SURVEY * SURVEY);
   }
 
   private double[] inPlane(double[] box) {

@@ -52,8 +52,12 @@ class AtlasCommandTest {
             "--out",
             png.toString(),
             "--out",
-            json.toString());
+            json.toString(),
+            "--json");
     assertEquals(ExitCode.DONE, code, err.toString());
+    JsonNode told = new ObjectMapper().readTree(out.toString());
+    assertEquals(12, told.path("columns").asInt());
+    assertEquals(Files.size(tif), told.at("/files/0/bytes").asLong());
     try (var files = Files.list(folder)) {
       assertEquals(3, files.count());
     }

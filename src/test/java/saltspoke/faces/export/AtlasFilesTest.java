@@ -123,6 +123,17 @@ class AtlasFilesTest {
     assertEquals(null, earth.lonLat(4_321_000, 5_500_000));
   }
 
+  /** A grid made for a strip six degrees wide. */
+  @Test
+  void aBoxThatASystemCannotShowIsRefused() {
+    CoordinateSystem zone = CoordinateSystem.of("EPSG:25832");
+    assertTrue(zone.frame(new double[] {5, 47, 16, 55}, 20_000).columns() > 30);
+    assertEquals(
+        Refusal.Kind.OUT_OF_RANGE,
+        assertThrows(Refusal.class, () -> zone.frame(new double[] {-180, -90, 180, 90}, 20_000))
+            .kind());
+  }
+
   @Test
   void anUnknownSystemIsRefused() {
     assertEquals(
