@@ -26,7 +26,7 @@ export function hangUp(line) {
  * @param line name of the line
  * @param path such as /api/air
  * @param parameters for the query string
- * @param body sent by POST when given
+ * @param body sent by POST when given: a text as CSV, anything else as JSON
  */
 export async function ask(line, path, parameters = {}, body = null) {
   hangUp(line);
@@ -36,8 +36,9 @@ export async function ask(line, path, parameters = {}, body = null) {
   const request = { signal: controller.signal, headers: { Accept: "application/json" } };
   if (body) {
     request.method = "POST";
-    request.headers["Content-Type"] = "application/json";
-    request.body = JSON.stringify(body);
+    const text = typeof body === "string";
+    request.headers["Content-Type"] = text ? "text/csv;charset=utf-8" : "application/json";
+    request.body = text ? body : JSON.stringify(body);
   }
   try {
     const response = await fetch(query ? `${path}?${query}` : path, request);

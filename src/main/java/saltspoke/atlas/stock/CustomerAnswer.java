@@ -13,6 +13,8 @@ import saltspoke.wheel.Pairing;
  * @param place name as found
  * @param regionName first-level region, empty when unknown
  * @param countryCode ISO 3166-1 alpha-2
+ * @param latitudeDeg of the place
+ * @param longitudeDeg of the place
  * @param steelCategory class of the outside air for carbon steel
  * @param today pairing of today's wheels
  * @param todayProspect what becomes of them
@@ -28,6 +30,8 @@ public record CustomerAnswer(
     String place,
     String regionName,
     String countryCode,
+    double latitudeDeg,
+    double longitudeDeg,
     Category steelCategory,
     Pairing today,
     Prospect todayProspect,

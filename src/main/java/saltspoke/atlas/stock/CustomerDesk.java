@@ -36,9 +36,16 @@ public final class CustomerDesk {
 
   private record Spot(String postcode, String town, String country) {}
 
-  private record Settled(Place place, AirClimate air, Category steel) {}
+  /** Postcodes of one town often share its point, and so all that follows from it. */
+  private record Point(double latitudeDeg, double longitudeDeg, double elevationM) {
+    static Point of(Place place) {
+      return new Point(place.latitudeDeg(), place.longitudeDeg(), place.elevationM());
+    }
+  }
 
-  private record Wheel(Spot spot, String profile, Pairing today) {}
+  private record Weather(AirClimate air, Category steel) {}
+
+  private record Wheel(Point point, String profile, Pairing today) {}
 
   private record Choice(
       Prospect today,
@@ -54,7 +61,8 @@ public final class CustomerDesk {
   private final Catalogue catalogue;
   private final Profiles profiles;
   private final StockQuestion question;
-  private final Recent<Spot, Settled> settled = new Recent<>(MOST_PLACES);
+  private final Recent<Spot, Place> found = new Recent<>(MOST_PLACES);
+  private final Recent<Point, Weather> weathers = new Recent<>(MOST_PLACES);
   private final Recent<Wheel, Choice> choices = new Recent<>(MOST_WHEELS);
 
   public CustomerDesk(
@@ -79,22 +87,26 @@ public final class CustomerDesk {
    */
   public CustomerAnswer answer(Customer customer) {
     Spot spot = new Spot(customer.postcode(), customer.town(), customer.country());
-    Settled at = settled.get(spot, this::settle);
+    Place place = found.get(spot, this::find);
+    Point point = Point.of(place);
+    Weather weather = weathers.get(point, p -> weather(place));
     Pairing today =
         new Pairing(customer.rim(), customer.nipple(), customer.between(), customer.spoke());
     RidingProfile profile = profile(customer.profile());
     Choice choice =
         choices.get(
-            new Wheel(spot, customer.profile(), today),
-            wheel -> choose(at.air(), profile, wheel.today()));
+            new Wheel(point, customer.profile(), today),
+            wheel -> choose(weather.air(), profile, wheel.today()));
     List<Note> notes = new ArrayList<>(customer.mends());
-    notes.addAll(at.place().flags());
+    notes.addAll(place.flags());
     return new CustomerAnswer(
         customer,
-        at.place().name(),
-        at.place().regionName(),
-        at.place().countryCode(),
-        at.steel(),
+        place.name(),
+        place.regionName(),
+        place.countryCode(),
+        place.latitudeDeg(),
+        place.longitudeDeg(),
+        weather.steel(),
         today,
         choice.today(),
         choice.taken(),
@@ -109,13 +121,15 @@ public final class CustomerDesk {
     return question.profile().name().equals(name) ? question.profile() : profiles.get(name);
   }
 
-  private Settled settle(Spot spot) {
-    Place place =
-        spot.postcode().isEmpty()
-            ? places.byName(
-                spot.country().isEmpty() ? spot.town() : spot.town() + ", " + spot.country(),
-                PlaceOverrides.NONE)
-            : places.byPostcode(spot.postcode(), spot.country(), PlaceOverrides.NONE);
+  private Place find(Spot spot) {
+    return spot.postcode().isEmpty()
+        ? places.byName(
+            spot.country().isEmpty() ? spot.town() : spot.town() + ", " + spot.country(),
+            PlaceOverrides.NONE)
+        : places.byPostcode(spot.postcode(), spot.country(), PlaceOverrides.NONE);
+  }
+
+  private Weather weather(Place place) {
     AirClimate climate = air.at(place, AirOverrides.NONE);
     Category steel =
         climate.corrosivity().stream()
@@ -123,7 +137,7 @@ public final class CustomerDesk {
             .findFirst()
             .orElseThrow()
             .category();
-    return new Settled(place, climate, steel);
+    return new Weather(climate, steel);
   }
 
   /** The first pairing of the order of preference that is good enough, else the longest lasting. */

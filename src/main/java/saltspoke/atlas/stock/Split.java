@@ -14,6 +14,8 @@ import saltspoke.atmosphere.Category;
  */
 public final class Split {
   private long customers;
+  private double latitudeDeg = Double.NaN;
+  private double longitudeDeg = Double.NaN;
   private BigDecimal wheels = BigDecimal.ZERO;
   private BigDecimal notEnough = BigDecimal.ZERO;
   private final Map<Category, BigDecimal> byClass = new EnumMap<>(Category.class);
@@ -25,6 +27,10 @@ public final class Split {
 
   void add(CustomerAnswer answer, int buildMonth) {
     BigDecimal weight = answer.customer().wheels();
+    if (customers == 0) {
+      latitudeDeg = answer.latitudeDeg();
+      longitudeDeg = answer.longitudeDeg();
+    }
     customers++;
     wheels = wheels.add(weight);
     if (!answer.enough()) {
@@ -54,6 +60,16 @@ public final class Split {
   /** A pairing as one word for tables: rim, nipple, interface, spoke. */
   public static String pairingName(saltspoke.wheel.Pairing pairing) {
     return String.join("/", pairing.rim(), pairing.nipple(), pairing.between(), pairing.spoke());
+  }
+
+  /** Latitude of the first customer's place, to find the region on a map. */
+  public double latitudeDeg() {
+    return latitudeDeg;
+  }
+
+  /** Longitude of the first customer's place. */
+  public double longitudeDeg() {
+    return longitudeDeg;
   }
 
   /** Rows answered. */

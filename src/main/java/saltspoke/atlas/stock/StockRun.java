@@ -6,6 +6,7 @@ import java.util.function.LongConsumer;
 import java.util.stream.IntStream;
 import saltspoke.sources.LooseTable;
 import saltspoke.values.Refusal;
+import saltspoke.values.Stopped;
 
 /**
  * Goes through a customer list: rows are answered some at a time on all cores and handed on in the
@@ -39,6 +40,7 @@ public final class StockRun {
     long done = 0;
     List<LooseTable.Row> rows = new ArrayList<>(TOGETHER);
     while (table.hasNext()) {
+      Stopped.check();
       rows.add(table.next());
       if (rows.size() == TOGETHER || !table.hasNext()) {
         Answered[] answered = new Answered[rows.size()];

@@ -63,13 +63,13 @@ public final class AdviceCsv {
   private static List<String> row(Advice advice, PairingAdvice pairing) {
     Place place = advice.air().place();
     List<String> row = new ArrayList<>();
-    row.add(plain(place.name()));
+    row.add(Plain.of(place.name()));
     row.add(place.countryCode());
     row.add(String.format(Locale.ROOT, "%.5f", place.latitudeDeg()));
     row.add(String.format(Locale.ROOT, "%.5f", place.longitudeDeg()));
     row.add(number(place.elevationM()));
     row.add(number(place.sea().distanceKm()));
-    row.add(plain(advice.request().profile().name()));
+    row.add(Plain.of(advice.request().profile().name()));
     row.add(advice.request().risk().id());
     for (MetalCorrosivity metal : advice.air().corrosivity()) {
       row.add(metal.category().name());
@@ -98,10 +98,5 @@ public final class AdviceCsv {
 
   private static String number(Double value) {
     return value == null ? "" : String.format(Locale.ROOT, "%.4g", value);
-  }
-
-  /** A text that a spreadsheet does not take for a formula. */
-  private static String plain(String text) {
-    return !text.isEmpty() && "=+-@\t\r".indexOf(text.charAt(0)) >= 0 ? "'" + text : text;
   }
 }

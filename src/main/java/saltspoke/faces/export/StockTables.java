@@ -54,9 +54,9 @@ public final class StockTables {
   public void answered(CSVPrinter out, CustomerAnswer answer) throws IOException {
     out.printRecord(
         answer.customer().line(),
-        answer.customer().postcode(),
-        answer.place(),
-        answer.regionName(),
+        Plain.of(answer.customer().postcode()),
+        Plain.of(answer.place()),
+        Plain.of(answer.regionName()),
         answer.countryCode(),
         answer.customer().wheels().toPlainString(),
         answer.customer().profile(),
@@ -67,7 +67,7 @@ public final class StockTables {
         number(answer.firstLookMonths()),
         number(answer.everyMonths()),
         answer.enough(),
-        notes(answer.notes()));
+        Plain.of(notes(answer.notes())));
   }
 
   private String notes(List<Note> notes) {
@@ -77,7 +77,7 @@ public final class StockTables {
   /** The columns of the list as it came, after three that say what is wrong. */
   public static void refusedHeader(CSVPrinter out, List<String> header) throws IOException {
     List<String> columns = new ArrayList<>(List.of("line", "reason", "field", "was", "allowed"));
-    columns.addAll(header);
+    header.forEach(name -> columns.add(Plain.of(name)));
     out.printRecord(columns);
   }
 
@@ -86,9 +86,9 @@ public final class StockTables {
     cells.add(row.row().line());
     cells.add(row.reason().error());
     cells.add(row.reason().field());
-    cells.add(row.reason().was());
+    cells.add(Plain.of(row.reason().was()));
     cells.add(row.reason().allowed());
-    cells.addAll(row.row().cells());
+    row.row().cells().forEach(cell -> cells.add(Plain.of(cell)));
     out.printRecord(cells);
   }
 

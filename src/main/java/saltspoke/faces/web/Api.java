@@ -64,6 +64,12 @@ public final class Api {
     resources.put("/api/pairings", new ResourceHandler(GET, api::pairings));
     resources.put("/api/about", new ResourceHandler(GET, api::about));
     resources.put("/api/texts", new ResourceHandler(GET, api::texts));
+    resources.put(
+        "/api/stock",
+        new ResourceHandler(
+            Set.of("POST"),
+            new StockResource(answers)::list,
+            ServerLimits.USUAL.answeringWithin(StockResource.LONGEST)));
     MapResources map = new MapResources(answers);
     resources.put("/api/tiles/*", new ResourceHandler(GET, map::tile));
     resources.put("/api/legend/*", new ResourceHandler(GET, map::legend));

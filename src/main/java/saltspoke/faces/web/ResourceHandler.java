@@ -20,7 +20,8 @@ import saltspoke.values.Refusal;
  * with its status. A bug becomes a 500 that tells nothing of the inside.
  */
 final class ResourceHandler extends Handler.Abstract {
-  static final int MOST_BODY_BYTES = 64 * 1024;
+  /** Room for a list of some thousand customers. */
+  static final int MOST_BODY_BYTES = 512 * 1024;
 
   private final Set<String> methods;
   private final Function<Ask, Reply> resource;

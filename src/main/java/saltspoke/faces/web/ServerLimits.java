@@ -38,4 +38,17 @@ record ServerLimits(
           Duration.ofSeconds(30),
           Duration.ofSeconds(15),
           Duration.ofSeconds(12));
+
+  /** The same limits with another time for one request; keep it below that of an exchange. */
+  ServerLimits answeringWithin(Duration longest) {
+    return new ServerLimits(
+        mostConnections,
+        mostAtOnce,
+        mostWaiting,
+        longestWait,
+        longest,
+        longestExchange,
+        longestIdle,
+        longestStop);
+  }
 }

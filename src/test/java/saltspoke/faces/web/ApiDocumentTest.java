@@ -23,6 +23,7 @@ import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
 import saltspoke.faces.Answers;
 import saltspoke.faces.Questions;
+import saltspoke.faces.StockQuestions;
 import saltspoke.faces.json.Json;
 import saltspoke.fields.DataSet;
 
@@ -158,11 +159,32 @@ class ApiDocumentTest {
   }
 
   @Test
+  void aCustomerListIsPostedAndAnswered() throws Exception {
+    HttpResponse<String> response =
+        post("api/stock?pack=50", "PLZ;Land;wheels\n24103;DE;2,5\n1067;DE;1\n99999;DE;1\n");
+    assertEquals(200, response.statusCode(), response.body());
+    validate(answerSchema("/api/stock", "post", "200"), response.body());
+    JsonNode stock = Json.MAPPER.readTree(response.body());
+    assertEquals(2, stock.get("answered").asInt());
+    assertEquals(2, stock.get("mended").asInt());
+    assertEquals(1, stock.get("refused").asInt());
+    assertEquals(3.5, stock.at("/all/wheels").asDouble());
+    assertTrue(stock.at("/outlines/0/0").size() > 3, "an outline of the first region");
+  }
+
+  @ParameterizedTest
+  @ValueSource(strings = {"", "a,b\n1,2\n", "\u0000\u0001\u0002"})
+  void aListThatIsNoneIsRefused(String body) throws Exception {
+    assertEquals(400, post("api/stock", body).statusCode());
+  }
+
+  @Test
   void theDocumentListsTheParametersThatTheHandlersTake() {
     assertEquals(Questions.AIR, parameters("/api/air"));
     assertEquals(Questions.ADVICE, parameters("/api/advice"));
     assertEquals(Questions.PLACES, parameters("/api/places"));
     assertEquals(Questions.REGION, parameters("/api/region"));
+    assertEquals(StockQuestions.NAMES, parameters("/api/stock"));
   }
 
   private static Set<String> parameters(String path) {
@@ -170,7 +192,7 @@ class ApiDocumentTest {
     document
         .at("/paths")
         .get(path)
-        .at("/get/parameters")
+        .findValue("parameters")
         .forEach(parameter -> names.add(parameter.get("name").asText()));
     return names;
   }
