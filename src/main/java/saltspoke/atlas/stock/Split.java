@@ -1,12 +1,14 @@
 package saltspoke.atlas.stock;
 
 import java.math.BigDecimal;
+import java.util.Collections;
 import java.util.EnumMap;
 import java.util.Map;
 import java.util.TreeMap;
 import saltspoke.advice.Prospect;
 import saltspoke.advice.StateShares;
 import saltspoke.atmosphere.Category;
+import saltspoke.wheel.Pairing;
 
 /**
  * What the customers of one region, or of all, come to. Wheels are added up exactly, so that the
@@ -58,7 +60,7 @@ public final class Split {
   }
 
   /** A pairing as one word for tables: rim, nipple, interface, spoke. */
-  public static String pairingName(saltspoke.wheel.Pairing pairing) {
+  public static String pairingName(Pairing pairing) {
     return String.join("/", pairing.rim(), pairing.nipple(), pairing.between(), pairing.spoke());
   }
 
@@ -89,17 +91,17 @@ public final class Split {
 
   /** Wheels by class of the outside air for carbon steel. */
   public Map<Category, BigDecimal> byClass() {
-    return Map.copyOf(byClass);
+    return Collections.unmodifiableMap(byClass);
   }
 
   /** Wheels by profile, in the order of names. */
   public Map<String, BigDecimal> byProfile() {
-    return new TreeMap<>(byProfile);
+    return Collections.unmodifiableMap(byProfile);
   }
 
   /** Wheels by recommended pairing ({@link #pairingName}), in the order of names. */
   public Map<String, BigDecimal> byPairing() {
-    return new TreeMap<>(byPairing);
+    return Collections.unmodifiableMap(byPairing);
   }
 
   /**

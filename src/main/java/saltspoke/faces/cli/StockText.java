@@ -23,7 +23,7 @@ final class StockText {
         all.customers(),
         splits.mended(),
         refused,
-        all.wheels().toPlainString());
+        all.wheels().stripTrailingZeros().toPlainString());
     if (all.customers() == 0) {
       return out.toString();
     }
@@ -35,7 +35,7 @@ final class StockText {
           out,
           "  For %s wheels no pairing in the order of preference reaches the wanted first look;"
               + " the longest was taken.",
-          all.notEnough().toPlainString());
+          all.notEnough().stripTrailingZeros().toPlainString());
     }
     out.append("\nWheels in each state if they stay as they are and nobody looks:\n");
     out.append("  after year     sound  attacked    seized      lost\n");
