@@ -138,6 +138,8 @@ class ApiDocumentTest {
         "400|api/advice?at=54.32,10.13",
         "400|api/advice?at=54.32,10.13&profile=no-such-profile",
         "400|api/advice?at=54.32,10.13&profile=trainer-only&risk=none",
+        "404|api/legend",
+        "404|api/tiles",
         "404|api/no-such-thing"
       })
   void badInputGetsItsStatusAndTheOneErrorForm(int status, String path) throws Exception {
