@@ -120,6 +120,18 @@ class ArchitectureTest {
     rule.check(SALTSPOKE);
   }
 
+  /** A clock that jumps can then move no time limit and no answer. */
+  @Test
+  void nothingReadsTheClockInMilliseconds() {
+    ArchRule rule =
+        noClasses()
+            .should()
+            .callMethod(System.class, "currentTimeMillis")
+            .orShould()
+            .callMethod(java.time.Instant.class, "now");
+    rule.check(SALTSPOKE);
+  }
+
   @Test
   void physicsIsPure() {
     ArchRule rule =

@@ -206,6 +206,18 @@ class DataFolderTest {
     }
   }
 
+  /** A killed run leaves its half-written folder beside the old one, and nothing else. */
+  @Test
+  void whatAKilledRunLeftIsInNobodysWay() throws IOException {
+    ingest(target, new SmallBuilder());
+    TreeMap<String, String> before = contents(target);
+    Path half = Files.createDirectories(temp.resolve("world.new-1").resolve("h"));
+    Files.writeString(half.resolve("height.tif"), "half");
+    assertEquals(2, DataSet.in(target).stack("height").band(0).grid().rows());
+    ingest(target, new SmallBuilder());
+    assertEquals(before, contents(target));
+  }
+
   @Test
   void keepsFilesThatAreNotItsOwnAndSpareFolders() throws IOException {
     ingest(target, new SmallBuilder());

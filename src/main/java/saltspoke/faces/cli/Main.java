@@ -50,7 +50,12 @@ public final class Main implements Runnable {
   @Spec private CommandSpec spec;
 
   public static void main(String[] args) {
-    System.exit(run(args, utf8(System.out), utf8(System.err)));
+    try {
+      System.exit(run(args, utf8(System.out), utf8(System.err)));
+    } catch (OutOfMemoryError e) {
+      System.err.println("saltspoke: out of memory; give it more, such as java -Xmx256m -jar …");
+      System.exit(ExitCode.BUG);
+    }
   }
 
   /** Runs one command line; results go to {@code out}, complaints to {@code err}. */

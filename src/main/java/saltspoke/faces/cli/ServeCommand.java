@@ -6,6 +6,8 @@ import java.net.BindException;
 import java.net.InetAddress;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.security.GeneralSecurityException;
+import java.security.KeyStore;
 import java.util.Optional;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
@@ -106,6 +108,15 @@ final class ServeCommand implements Callable<Integer> {
       }
     }
     String password = Files.readString(passwordFile).lines().findFirst().orElse("");
+    try {
+      KeyStore.getInstance(keystore.toFile(), password.toCharArray());
+    } catch (IOException | GeneralSecurityException e) {
+      throw Refusal.wrongUse(
+          "unreadable-keystore",
+          "tls-keystore",
+          keystore,
+          "a PKCS #12 file and, in the password file, the password that opens it");
+    }
     return Optional.of(new ServerSettings.Tls(keystore, password));
   }
 

@@ -70,7 +70,9 @@ final class MapResources {
 
   /** Steps and colours of a layer. */
   Reply legend(Ask ask) {
-    return Reply.json(MapLayer.of(ask.path().substring(LEGEND.length())).style().legend());
+    // The path spec takes the bare folder too, without its slash.
+    String layer = ask.path().substring(Math.min(LEGEND.length(), ask.path().length()));
+    return Reply.json(MapLayer.of(layer).style().legend());
   }
 
   /** The value of a layer at a point; null at sea, which is no error for a pointer that passes. */

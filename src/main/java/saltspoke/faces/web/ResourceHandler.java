@@ -58,12 +58,10 @@ final class ResourceHandler extends Handler.Abstract {
     } catch (Refusal refusal) {
       write(response, status(refusal), Reply.json(Json.error(refusal)), callback);
     } catch (Busy busy) {
-      Busy.askAgainLater(response);
-      write(
-          response,
-          HttpStatus.SERVICE_UNAVAILABLE_503,
-          error(busy.error(), "request", "", Busy.ALLOWED),
-          callback);
+      putOff(response, busy.error(), callback);
+    } catch (OutOfMemoryError e) {
+      System.err.println("saltspoke: out of memory while answering; give it more with -Xmx");
+      putOff(response, "out-of-memory", callback);
     } catch (RuntimeException | LinkageError e) {
       System.err.println(
           "saltspoke: a bug while answering " + request.getHttpURI().getDecodedPath());
@@ -75,6 +73,15 @@ final class ResourceHandler extends Handler.Abstract {
           callback);
     }
     return true;
+  }
+
+  private static void putOff(Response response, String error, Callback callback) {
+    Busy.askAgainLater(response);
+    write(
+        response,
+        HttpStatus.SERVICE_UNAVAILABLE_503,
+        error(error, "request", "", Busy.ALLOWED),
+        callback);
   }
 
   static int status(Refusal refusal) {

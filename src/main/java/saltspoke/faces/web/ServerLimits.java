@@ -12,7 +12,7 @@ import java.time.Duration;
  * @param longestAnswer work on one request; beyond, it is stopped and answered with 503
  * @param longestExchange from the first byte of a request to the last of its answer; beyond, the
  *     connection is cut
- * @param longestIdle silence on a connection; beyond, it is cut
+ * @param longestIdle silence on a connection; beyond, it is cut; more than wait and work together
  * @param longestStop time that running requests get when the server stops
  */
 record ServerLimits(
@@ -33,10 +33,10 @@ record ServerLimits(
           2000,
           Math.max(8, AT_ONCE_PER_CORE * Runtime.getRuntime().availableProcessors()),
           256,
-          Duration.ofSeconds(5),
+          Duration.ofSeconds(8),
           Duration.ofSeconds(10),
           Duration.ofSeconds(30),
-          Duration.ofSeconds(15),
+          Duration.ofSeconds(20),
           Duration.ofSeconds(12));
 
   /** The same limits with another time for one request; keep it below that of an exchange. */

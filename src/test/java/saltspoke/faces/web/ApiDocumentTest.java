@@ -143,6 +143,8 @@ class ApiDocumentTest {
         "400|api/region",
         "400|api/region?region=Nord",
         "404|api/region?region=Nowhereland",
+        "404|api/legend",
+        "404|api/tiles",
         "404|api/no-such-thing"
       })
   void badInputGetsItsStatusAndTheOneErrorForm(int status, String path) throws Exception {

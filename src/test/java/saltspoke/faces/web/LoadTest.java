@@ -45,6 +45,7 @@ class LoadTest {
   private final ConcurrentLinkedQueue<String> faults = new ConcurrentLinkedQueue<>();
   private final AtomicInteger asked = new AtomicInteger();
   private final AtomicInteger refused = new AtomicInteger();
+  private final AtomicInteger putOff = new AtomicInteger();
 
   @Test
   void everyAnswerUnderLoadIsTheLibrarysOwn() throws Exception {
@@ -66,7 +67,12 @@ class LoadTest {
     assertEquals("", String.join("\n", faults.stream().limit(5).toList()));
     assertTrue(asked.get() - refused.get() > 0);
     System.out.println(
-        "load: " + asked + " answers compared, of them " + refused + " refusals, none differed");
+        "load: "
+            + asked
+            + " answers compared, of them "
+            + refused
+            + " refusals, none differed; put off with 503: "
+            + putOff);
   }
 
   private void ask(URI base, Random random, long end) {
@@ -77,18 +83,25 @@ class LoadTest {
       try {
         StringBuilder query = new StringBuilder("api/advice?");
         question.forEach((name, value) -> query.append(name).append('=').append(value).append('&'));
-        HttpResponse<String> response =
-            client.send(
-                HttpRequest.newBuilder(base.resolve(query.toString()))
-                    .timeout(Duration.ofSeconds(30))
-                    .build(),
-                HttpResponse.BodyHandlers.ofString());
-        compare(question, response);
+        compare(question, patiently(client, base.resolve(query.toString())));
       } catch (Exception e) {
         faults.add(question + ": " + e);
       }
       asked.incrementAndGet();
     }
+  }
+
+  /** Asks, and again when told to come again later, which is no fault but is counted. */
+  private HttpResponse<String> patiently(HttpClient client, URI uri) throws Exception {
+    HttpRequest request = HttpRequest.newBuilder(uri).timeout(Duration.ofSeconds(30)).build();
+    HttpResponse<String> response = client.send(request, HttpResponse.BodyHandlers.ofString());
+    var later = response.headers().firstValueAsLong("Retry-After");
+    if (later.isEmpty()) {
+      return response;
+    }
+    putOff.incrementAndGet();
+    Thread.sleep(1000 * later.getAsLong());
+    return patiently(client, uri);
   }
 
   private void compare(Map<String, String> question, HttpResponse<String> response) {
