@@ -91,26 +91,24 @@ public final class AirModel {
       List<MonthClimate> months, double temperatureSpreadK, double humiditySpreadPct) {}
 
   private Climate climate(Place place, Set<Note> flags) {
-    SiteMove warmer = moved(CorrectedQuantity.TEMPERATURE, place, flags);
-    SiteMove moister = moved(CorrectedQuantity.RELATIVE_HUMIDITY, place, flags);
-    MonthMeans means = climate.means(place);
-    if (!warmer.isNone() || !moister.isNone()) {
-      means = means.moved(warmer.departure(), moister.departure());
-    }
+    MovedClimate moved =
+        MovedClimate.of(climate.means(place), corrections, CorrectionSpot.of(place));
+    moved
+        .moves()
+        .forEach(
+            (quantity, move) -> {
+              if (!move.isNone()) {
+                flags.add(move.note(quantity));
+                flags.addAll(corrections.provenance());
+              }
+            });
     double elevationM = place.elevationM();
     return new Climate(
-        means.climate(place.latitudeDeg()),
-        warmer.spreadFactor() * ClimateSpread.annualTemperatureK(elevationM),
-        moister.spreadFactor() * ClimateSpread.annualHumidityPct(elevationM));
-  }
-
-  /** How far local measurements move a quantity, said in the flags where they do. */
-  private SiteMove moved(CorrectedQuantity quantity, Place place, Set<Note> flags) {
-    SiteMove move = corrections.at(quantity, CorrectionSpot.of(place));
-    if (!move.isNone()) {
-      flags.add(move.note(quantity));
-    }
-    return move;
+        moved.months(),
+        moved.moves().get(CorrectedQuantity.TEMPERATURE).spreadFactor()
+            * ClimateSpread.annualTemperatureK(elevationM),
+        moved.moves().get(CorrectedQuantity.RELATIVE_HUMIDITY).spreadFactor()
+            * ClimateSpread.annualHumidityPct(elevationM));
   }
 
   private record Salt(List<MonthAir> months, Quantiles annual, double lnSpread) {}
@@ -146,7 +144,10 @@ public final class AirModel {
     double scale = 1;
     double lnSpread = SeaSalt.LN_SPREAD;
     if (overrides.chlorideMgPerM2Day().isEmpty()) {
-      SiteMove saltier = moved(CorrectedQuantity.CHLORIDE, place, flags);
+      SiteMove saltier = corrections.at(CorrectedQuantity.CHLORIDE, CorrectionSpot.of(place));
+      if (!saltier.isNone()) {
+        flags.add(saltier.note(CorrectedQuantity.CHLORIDE));
+      }
       for (int m = 0; m < monthly.size(); m++) {
         monthly.set(m, monthly.get(m) * Math.exp(saltier.departure()[m]));
       }
