@@ -110,9 +110,15 @@ public final class StationIngest {
       read(items, journal, resumed);
       Path aside = work.resolve("out");
       deleteTree(aside);
-      result =
-          new StationMerge(request, world, journal, List.copyOf(items.keySet()), resumed)
-              .publish(aside);
+      try {
+        result =
+            new StationMerge(request, world, journal, List.copyOf(items.keySet()), resumed)
+                .publish(aside);
+      } catch (Refusal refusal) {
+        // Nothing could be read: what is mended should not be held against an old journal.
+        deleteTree(work);
+        throw refusal;
+      }
       // While the lock is still held: whoever gets it next finds no folder and begins anew.
       deleteTree(work);
     }

@@ -39,13 +39,16 @@ final class SeparatedHours implements HourlyFormat {
       skip(lines);
     }
     Columns columns = new Columns(map, lines);
-    if (columns.needHeader()) {
+    boolean header = columns.needHeader();
+    if (header) {
       columns.header();
-      skip(lines);
     }
     StationCells station = new StationCells(map, columns, lines, fileName, stations);
     TimeCells time = new TimeCells(map, columns, lines);
     List<ValueCell> values = values(columns, lines);
+    if (header) {
+      skip(lines);
+    }
     Plausibility plausible = new Plausibility(lines);
     HourlyRow row = new HourlyRow();
     do {

@@ -282,8 +282,8 @@ class HourlyFormatsTest {
         "station|time|t|rh;P|2020-02-01T00:00|warm|50 ! not-a-number ! t.csv:2 temperature (cell 3)",
         "station|time|t|rh;P|2020-02-01T00:00|5 ! short-row ! t.csv:2 cell 4",
         "station|time|t|rh;P|2020-02-01T00:00|\"5|50 ! open-quote ! t.csv:2 cell 3",
-        "station|time|temp|rh;P|2020-02-01T00:00|5|50 ! missing-column ! t.csv:2 header",
-        "station|when|t|rh;P|2020-02-01T00:00|5|50 ! missing-column ! t.csv:2 time",
+        "station|time|temp|rh;P|2020-02-01T00:00|5|50 ! missing-column ! t.csv:1 header",
+        "station|when|t|rh;P|2020-02-01T00:00|5|50 ! missing-column ! t.csv:1 time",
         "station|time|t|rh ! no-rows ! t.csv:1 line",
         "station|time|t|rh;P|2020-02-01T00:00|5000|50 ! impossible-values ! t.csv:2 temperature"
       })
