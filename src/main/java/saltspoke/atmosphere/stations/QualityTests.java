@@ -28,6 +28,9 @@ final class QualityTests {
   private static final int STUCK_WHOLE = 40;
   private static final int DEW_POINT_FACTOR = 2;
 
+  /** Share of whole numbers from which a sensor is read in whole degrees. */
+  private static final double MOSTLY = 0.9;
+
   /** Air can stay saturated in fog for days: humidity from here is not held to be stuck, %. */
   private static final double SATURATED_PCT = 99;
 
@@ -113,7 +116,7 @@ final class QualityTests {
   }
 
   private static long stuck(double[] values, int n, int fine, int whole, double free) {
-    int most = isWhole(values, n) ? whole : fine;
+    int most = fine == whole || !isWhole(values, n) ? fine : whole;
     long struck = 0;
     int at = next(values, 0, n);
     while (at < n) {
@@ -139,11 +142,11 @@ final class QualityTests {
     int whole = 0;
     int all = 0;
     for (int i = 0; i < n; i++) {
-      if (!Double.isNaN(values[i])) {
-        all++;
-        whole += values[i] == Math.rint(values[i]) ? 1 : 0;
-      }
+      double value = values[i];
+      // No value is neither equal to itself nor to a whole number.
+      all += value == value ? 1 : 0;
+      whole += value == (int) value ? 1 : 0;
     }
-    return whole > 0.9 * all;
+    return whole > MOSTLY * all;
   }
 }

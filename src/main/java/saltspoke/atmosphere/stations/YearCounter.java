@@ -163,9 +163,10 @@ public final class YearCounter {
       double high = Double.NEGATIVE_INFINITY;
       int count = 0;
       for (int i = day; i < day + DAY; i++) {
-        if (!Double.isNaN(temperature[i])) {
-          low = Math.min(low, temperature[i]);
-          high = Math.max(high, temperature[i]);
+        double t = temperature[i];
+        if (!Double.isNaN(t)) {
+          low = t < low ? t : low;
+          high = t > high ? t : high;
           count++;
         }
       }

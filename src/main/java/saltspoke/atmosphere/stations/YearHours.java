@@ -16,6 +16,9 @@ public final class YearHours {
   private static final int[] DAYS = {31, 28, 31, 30, 31, 30, 31, 31, 30, 31, 30, 31};
   private static final HourlyQuantity[] QUANTITIES = HourlyQuantity.values();
 
+  /** The quantities up to here are those of hours; days have the rest too. */
+  private static final int HOURLY = HourlyQuantity.DAY_MINIMUM.ordinal();
+
   private final double[][] values = new double[QUANTITIES.length][LONGEST_YEAR * DAY];
 
   /** Minutes from the full hour of the report that is kept, plus 1; 0 where there is none. */
@@ -35,12 +38,12 @@ public final class YearHours {
     rows = 0;
     impossible = 0;
     duplicates = 0;
-    for (double[] column : values) {
-      Arrays.fill(column, Double.NaN);
-    }
     Arrays.fill(reported, (byte) 0);
     for (int m = 0; m < MONTHS; m++) {
       firstDay[m + 1] = firstDay[m] + DAYS[m] + (m == 1 && leap(year) ? 1 : 0);
+    }
+    for (double[] column : values) {
+      Arrays.fill(column, 0, slots(), Double.NaN);
     }
   }
 
@@ -70,8 +73,9 @@ public final class YearHours {
       }
     }
     reported[slot] = (byte) off;
-    for (HourlyQuantity quantity : QUANTITIES) {
-      values[quantity.ordinal()][slot] = row.get(quantity);
+    int quantities = daily ? QUANTITIES.length : HOURLY;
+    for (int q = 0; q < quantities; q++) {
+      values[q][slot] = row.get(QUANTITIES[q]);
     }
   }
 

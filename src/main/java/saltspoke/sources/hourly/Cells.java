@@ -27,33 +27,37 @@ final class Cells {
   /** Parts the current line up to the given number of cells; the rest of it is not looked at. */
   void split(int wanted) {
     byte[] bytes = lines.bytes();
+    byte between = separator;
     int at = lines.start();
     int end = lines.end();
-    count = 0;
-    while (count < wanted) {
+    int cell = 0;
+    while (cell < wanted) {
       while (at < end && bytes[at] == ' ') {
         at++;
       }
-      if (separator == ' ' && at == end) {
-        return;
+      if (between == ' ' && at == end) {
+        break;
       }
-      if (count == MOST) {
+      if (cell == MOST) {
         throw lines.refuse("too-many-cells", "line", lines.text(), "at most " + MOST + " cells");
       }
       if (at < end && bytes[at] == '"') {
+        count = cell;
         at = quoted(bytes, at, end);
       } else {
-        int start = at;
-        while (at < end && bytes[at] != separator) {
+        from[cell] = at;
+        while (at < end && bytes[at] != between) {
           at++;
         }
-        close(bytes, start, at);
+        to[cell] = withoutBlanks(bytes, from[cell], at);
       }
+      cell++;
       if (at >= end) {
-        return;
+        break;
       }
       at++;
     }
+    count = cell;
   }
 
   private int quoted(byte[] bytes, int start, int end) {
@@ -68,26 +72,28 @@ final class Cells {
     while (inside < at && bytes[inside] == ' ') {
       inside++;
     }
-    close(bytes, inside, at);
+    from[count] = inside;
+    to[count] = withoutBlanks(bytes, inside, at);
     at++;
     while (at < end && bytes[at] != separator) {
       if (bytes[at] != ' ') {
         throw lines.refuse(
-            "text-after-quote", "cell " + count, lines.text(), "a separator after a closing quote");
+            "text-after-quote",
+            "cell " + (count + 1),
+            lines.text(),
+            "a separator after a closing quote");
       }
       at++;
     }
     return at;
   }
 
-  private void close(byte[] bytes, int start, int end) {
+  private static int withoutBlanks(byte[] bytes, int start, int end) {
     int last = end;
     while (last > start && bytes[last - 1] == ' ') {
       last--;
     }
-    from[count] = start;
-    to[count] = last;
-    count++;
+    return last;
   }
 
   int count() {

@@ -47,9 +47,7 @@ final class LineReader {
     int from = next;
     int at = next;
     while (true) {
-      while (at < filled && buffer[at] != '\n') {
-        at++;
-      }
+      at = lineEnd(buffer, at, filled);
       if (at < filled || ended) {
         break;
       }
@@ -76,6 +74,15 @@ final class LineReader {
       end--;
     }
     return true;
+  }
+
+  /** Kept small and free of fields, so that the compiler makes a tight loop of it. */
+  private static int lineEnd(byte[] bytes, int from, int to) {
+    int at = from;
+    while (at < to && bytes[at] != '\n') {
+      at++;
+    }
+    return at;
   }
 
   private void fill() {

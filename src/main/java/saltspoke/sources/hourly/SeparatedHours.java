@@ -45,7 +45,7 @@ final class SeparatedHours implements HourlyFormat {
     }
     StationCells station = new StationCells(map, columns, lines, fileName, stations);
     TimeCells time = new TimeCells(map, columns, lines);
-    List<ValueCell> values = values(columns, lines);
+    ValueCell[] values = values(columns, lines).toArray(ValueCell[]::new);
     if (header) {
       skip(lines);
     }
