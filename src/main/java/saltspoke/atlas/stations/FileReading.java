@@ -30,6 +30,7 @@ public final class FileReading implements HourlySink {
   private HourlyStation station;
   private int year;
   private boolean open;
+  private String name = "";
 
   public FileReading(HourlyFormats formats) {
     this.formats = formats;
@@ -41,7 +42,8 @@ public final class FileReading implements HourlySink {
   }
 
   /** Reads a file; one that cannot be read gives its refusal. */
-  public FileOutcome read(String name, Source source) {
+  public FileOutcome read(String fileName, Source source) {
+    name = fileName;
     done.clear();
     seen.clear();
     station = null;
@@ -80,8 +82,8 @@ public final class FileReading implements HourlySink {
       if (!seen.add(station.id() + " " + year)) {
         throw Refusal.dataDamaged(
             "scattered-rows",
-            station.id() + " " + year,
-            "rows in several places of the file",
+            name + ":" + row.line() + " station",
+            station.id() + " " + year + " once more",
             "the rows of a station and year together: sort by station, then time");
       }
       hours.begin(year, station.kind() == HourlyStation.Kind.DAILY);

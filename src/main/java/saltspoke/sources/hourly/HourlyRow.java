@@ -14,6 +14,7 @@ public final class HourlyRow {
   private int hour;
   private int minute;
   private int impossible;
+  private long line;
 
   /** The value in the unit of the quantity; NaN when missing or impossible. */
   public double get(HourlyQuantity quantity) {
@@ -50,7 +51,13 @@ public final class HourlyRow {
     return impossible;
   }
 
-  void clear() {
+  /** Line of its file, counted from 1. */
+  public long line() {
+    return line;
+  }
+
+  void clear(long newLine) {
+    line = newLine;
     Arrays.fill(values, Double.NaN);
     impossible = 0;
     minute = 0;

@@ -66,7 +66,7 @@ final class IsdLite implements HourlyFormat {
         throw lines.refuse(
             "short-row", "line", lines.text(), LEAST_LENGTH + " characters, all columns");
       }
-      row.clear();
+      row.clear(lines.number());
       row.at(
           Clock.year(lines, bytes, start, start + 4),
           Clock.month(lines, bytes, start + 5, start + 7),

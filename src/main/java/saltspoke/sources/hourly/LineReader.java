@@ -114,6 +114,11 @@ final class LineReader {
     return end;
   }
 
+  /** The number of the current line, from 1. */
+  long number() {
+    return number;
+  }
+
   /** The current line, bytes that are no ASCII replaced; for messages and headers. */
   String text() {
     return new String(buffer, start, end - start, StandardCharsets.UTF_8);

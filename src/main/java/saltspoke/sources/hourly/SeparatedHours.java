@@ -53,7 +53,7 @@ final class SeparatedHours implements HourlyFormat {
     HourlyRow row = new HourlyRow();
     do {
       columns.split();
-      row.clear();
+      row.clear(lines.number());
       time.read(row);
       station.read(sink);
       for (ValueCell value : values) {

@@ -163,6 +163,23 @@ class StationIngestTest {
   }
 
   @Test
+  void scatteredRowsAreRefusedByLine() throws IOException {
+    String head = "station,lat,lon,elev,time,t,td,dir,speed\n";
+    String a = "A,50,8,100,2001-01-01T00:00,1,0,90,1\n";
+    String b = "B,50,8,100,2001-01-01T00:00,1,0,90,1\n";
+    FileOutcome outcome =
+        new FileReading(formats())
+            .read(
+                "x.csv",
+                () ->
+                    new ByteArrayInputStream(
+                        (head + a + b + a).getBytes(StandardCharsets.UTF_8)));
+    Refusal refusal = outcome.refusal().orElseThrow();
+    assertEquals("scattered-rows", refusal.error());
+    assertEquals("x.csv:4 station", refusal.field());
+  }
+
+  @Test
   void nothingForeignIsOverwrittenOrRemoved() throws IOException {
     Path archive = InventedArchive.write(folder.resolve("in"), 1, 1);
     Refusal refusal = assertThrows(Refusal.class, () -> ingest(archive, "in", 1));
