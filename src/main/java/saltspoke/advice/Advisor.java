@@ -2,13 +2,18 @@ package saltspoke.advice;
 
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import saltspoke.atmosphere.AirClimate;
 import saltspoke.values.Note;
 import saltspoke.values.Refusal;
+import saltspoke.values.Stopped;
 import saltspoke.wheel.Catalogue;
 import saltspoke.wheel.CellTables;
 import saltspoke.wheel.Pairing;
+import saltspoke.wheel.ThreadCompound;
+import saltspoke.wheel.WheelYear;
 import saltspoke.wheel.damage.CellRates;
 import saltspoke.wheel.rim.WheelWeather;
 
@@ -40,11 +45,12 @@ public final class Advisor {
    * @throws Refusal for parts that are unknown or do not fit, and numbers out of range
    */
   public Advice advise(AirClimate air, AdviceRequest request) {
-    Workshop shop = open(air, checked(request), DRAWS, WheelRisk.NIPPLE_SCATTER);
+    WheelYears shared = sharing(weather);
+    Workshop shop = open(air, checked(request), shared);
     List<Case> cases = cases(shop, request);
     Case focus = focus(cases);
     List<Change> changes =
-        new Changes(catalogue, request, other -> open(air, other, DRAWS, WheelRisk.NIPPLE_SCATTER))
+        new Changes(catalogue, request, other -> open(air, other, shared))
             .of(focus, shop, air.place().latitudeDeg() < 0);
     List<PairingAdvice> answers = cases.stream().map(c -> Answer.of(c, request)).toList();
     List<Note> flags = new ArrayList<>(Reasons.whatDecides(focus, changes, shop.year(), request));
@@ -67,7 +73,7 @@ public final class Advisor {
    * whoever asks for many places.
    */
   public List<PairingAdvice> pairings(AirClimate air, AdviceRequest request) {
-    Workshop shop = open(air, checked(request), DRAWS, WheelRisk.NIPPLE_SCATTER);
+    Workshop shop = open(air, checked(request), weather);
     return cases(shop, request).stream().map(c -> Answer.of(c, request)).toList();
   }
 
@@ -75,12 +81,26 @@ public final class Advisor {
     List<Case> cases = new ArrayList<>();
     for (Pairing pairing :
         catalogue.pairings(request.rim(), request.nipple(), request.between(), request.spoke())) {
+      Stopped.check();
       cases.add(shop.of(pairing));
     }
     cases.sort(
         Comparator.comparingDouble((Case c) -> -c.interval().freeFirstMonths())
             .thenComparingDouble(c -> -c.interval().replaceByMonths()));
     return cases;
+  }
+
+  private Workshop open(AirClimate air, AdviceRequest request, WheelYears years) {
+    return new Workshop(catalogue, air, request, years, rates, DRAWS, WheelRisk.NIPPLE_SCATTER);
+  }
+
+  /** A year worked out once for profiles that differ in the thread's compound only. */
+  private static WheelYears sharing(WheelYears weather) {
+    Map<List<Object>, WheelYear> known = new HashMap<>();
+    return (air, profile, build) ->
+        known.computeIfAbsent(
+            List.of(Profiled.compound(profile, ThreadCompound.NONE), build),
+            k -> weather.over(air, profile, build));
   }
 
   Workshop open(AirClimate air, AdviceRequest request, Draws draws, double scatter) {

@@ -3,8 +3,11 @@ package saltspoke.advice;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Locale;
 import java.util.function.Function;
+import java.util.regex.Pattern;
 import saltspoke.values.Note;
+import saltspoke.values.Stopped;
 import saltspoke.wheel.Catalogue;
 import saltspoke.wheel.Pairing;
 import saltspoke.wheel.RidingProfile;
@@ -18,6 +21,8 @@ import saltspoke.wheel.WheelBuild;
 final class Changes {
   /** A change: one other request, or one other pairing under the same one. */
   private record Option(String field, String value, String cost, AdviceRequest request) {}
+
+  private static final Pattern CAPITAL = Pattern.compile("([A-Z])");
 
   private final Catalogue catalogue;
   private final AdviceRequest request;
@@ -33,6 +38,7 @@ final class Changes {
   List<Change> of(Case now, Workshop open, boolean south) {
     List<Change> found = new ArrayList<>();
     for (Option option : habits(south)) {
+      Stopped.check();
       Case then = opener.apply(option.request()).of(now.pairing());
       found.add(change(option.field(), option.value(), option.cost(), now, then));
     }
@@ -143,7 +149,7 @@ final class Changes {
   }
 
   private static String dashed(String field) {
-    return field.replaceAll("([A-Z])", "-$1").toLowerCase(java.util.Locale.ROOT);
+    return CAPITAL.matcher(field).replaceAll("-$1").toLowerCase(Locale.ROOT);
   }
 
   private static String yesNo(boolean value) {

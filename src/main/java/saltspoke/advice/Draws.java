@@ -1,6 +1,8 @@
 package saltspoke.advice;
 
+import java.util.Map;
 import java.util.SplittableRandom;
+import java.util.concurrent.ConcurrentHashMap;
 import saltspoke.wheel.damage.Assumption;
 
 /**
@@ -18,10 +20,12 @@ final class Draws {
 
   private final double[][] z;
   private final double[] worst;
+  private final Map<Integer, WorstOf> worstOf;
 
-  private Draws(double[][] z, double[] worst) {
+  private Draws(double[][] z, double[] worst, Map<Integer, WorstOf> worstOf) {
     this.z = z;
     this.worst = worst;
+    this.worstOf = worstOf;
   }
 
   /** The draws of a seed. */
@@ -54,7 +58,7 @@ final class Draws {
         z[2 * n + 1][k] = -half[k][n];
       }
     }
-    return new Draws(z, worst);
+    return new Draws(z, worst, new ConcurrentHashMap<>());
   }
 
   /** The root above 1 of x^(d+1) = x + 1. */
@@ -97,12 +101,17 @@ final class Draws {
       held[n] = z[n].clone();
       held[n][assumption.ordinal()] = deviations;
     }
-    return new Draws(held, worst);
+    return new Draws(held, worst, worstOf);
   }
 
   /** Standard deviations of all assumptions in draw n. */
   double[] row(int n) {
     return z[n];
+  }
+
+  /** The worst of so many nipples under these draws; made once for each number of spokes. */
+  WorstOf worstOf(int nipples) {
+    return worstOf.computeIfAbsent(nipples, n -> new WorstOf(n, this));
   }
 
   /** Where, between 0 and 1, the wheel's worst nipple stands among such wheels in draw n. */

@@ -33,6 +33,9 @@ public record PairingAdvice(
     String limitedBy,
     double meanPenetrationUmPerYear,
     List<Note> reasons) {
+  /** How far the model looks ahead, months: later dates are not told apart. */
+  public static final double HORIZON_MONTHS = RiskLimits.HORIZON_MONTHS;
+
   public PairingAdvice {
     reasons = List.copyOf(reasons);
   }

@@ -16,7 +16,8 @@ import java.util.function.DoubleUnaryOperator;
  * what this gives. Serves one thread.
  */
 final class Repeats {
-  private static final int HALVINGS = 40;
+  /** Error of a dose, as the table has it: a millionth of the scatter. */
+  private static final double DOSE_ERROR = 1e-6;
 
   private final RiskLimits limits;
   private final WorstOf worst;
@@ -50,31 +51,21 @@ final class Repeats {
     if (first == Double.POSITIVE_INFINITY) {
       return first;
     }
-    Evidence clean = new Evidence(new History(1, Finding.CLEAN, look.finds(State.ATTACKED)), worst);
+    FoundClean clean = new FoundClean(site, worst, look.finds(State.ATTACKED), first);
     double next =
         Math.min(
-            reaching(
-                table, limits.seized(), dose -> unseen(site, clean, State.SEIZED, first, dose)),
-            reaching(table, limits.lost(), dose -> unseen(site, clean, State.LOST, first, dose)));
+            reaching(table, limits.seized(), dose -> clean.chance(State.SEIZED, dose)),
+            reaching(table, limits.lost(), dose -> clean.chance(State.LOST, dose)));
     return table.monthsAt(next) - table.monthsAt(first);
   }
 
   /** Dose, as the table has it, at which a rising chance reaches a level; infinite beyond it. */
   private static double reaching(SiteTable table, double level, DoubleUnaryOperator chance) {
-    double low = table.least();
-    double high = table.most();
-    if (chance.applyAsDouble(high) < level) {
+    if (chance.applyAsDouble(table.most()) < level) {
       return Double.POSITIVE_INFINITY;
     }
-    for (int i = 0; i < HALVINGS && high - low > 1e-6; i++) {
-      double middle = (low + high) / 2;
-      if (chance.applyAsDouble(middle) < level) {
-        low = middle;
-      } else {
-        high = middle;
-      }
-    }
-    return high;
+    return Root.ofRising(
+        dose -> chance.applyAsDouble(dose) - level, table.least(), table.most(), DOSE_ERROR);
   }
 
   private double chance(SiteRisk site, State state, double dose) {
@@ -83,22 +74,5 @@ final class Repeats {
       free += worst.none(threshold - dose);
     }
     return 1 - free / Draws.COUNT;
-  }
-
-  /** Chance that a wheel was found clean at one dose and has reached the state at another. */
-  private static double unseen(
-      SiteRisk site, Evidence clean, State state, double then, double dose) {
-    double[] attacked = site.thresholds(State.ATTACKED);
-    double[] seized = site.thresholds(State.SEIZED);
-    double[] lost = site.thresholds(State.LOST);
-    double[] threshold = site.thresholds(state);
-    double reached = 0;
-    for (int n = 0; n < Draws.COUNT; n++) {
-      double a = attacked[n] - then;
-      double s = seized[n] - then;
-      double l = lost[n] - then;
-      reached += clean.weight(a, s, l) - clean.free(state, threshold[n] - dose, a, s, l);
-    }
-    return reached / Draws.COUNT;
   }
 }

@@ -49,7 +49,7 @@ final class Workshop {
     WheelBuild build = request.build();
     this.year = weather.over(air, profile, build);
     this.sites = new Sites(air, profile, build, request.buildMonth(), year, rates);
-    this.worst = new WorstOf(build.spokeCount(), draws);
+    this.worst = draws.worstOf(build.spokeCount());
     this.repeats = new Repeats(RiskLimits.of(request.risk()), worst);
   }
 

@@ -1,6 +1,7 @@
 package saltspoke.atmosphere;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Optional;
@@ -55,15 +56,16 @@ public final class AirModel {
     Optional<CountryAir.Country> country = countries.find(place.countryCode());
     Setting setting = overrides.setting().orElseGet(() -> Settings.guess(place.surroundings()));
 
-    Climate moved = climate(place, flags);
-    Salt salt = salt(place, setting, moved.months(), overrides, flags);
+    MovedClimate moved = climate(place, flags);
+    List<MonthClimate> months = moved.months();
+    Salt salt = salt(place, setting, months, overrides, flags);
     Sulfur sulfur = sulfur(setting, country, overrides, flags);
     AnnualAir annual = annual(salt.months());
     Exposure exposure = exposure(annual, sulfur, salt, overrides, flags);
     InputSpread spread =
         new InputSpread(
-            overrides.temperatureC().isPresent() ? 0 : moved.temperatureSpreadK(),
-            overrides.relativeHumidityPct().isPresent() ? 0 : moved.humiditySpreadPct(),
+            overrides.temperatureC().isPresent() ? 0 : temperatureSpreadK(moved, place),
+            overrides.relativeHumidityPct().isPresent() ? 0 : humiditySpreadPct(moved, place),
             sulfur.lnSpread(),
             salt.lnSpread());
     List<MetalCorrosivity> corrosivity = Corrosion.assess(exposure, spread);
@@ -87,28 +89,87 @@ public final class AirModel {
         List.copyOf(flags));
   }
 
-  private record Climate(
-      List<MonthClimate> months, double temperatureSpreadK, double humiditySpreadPct) {}
-
-  private Climate climate(Place place, Set<Note> flags) {
+  /** The climate at a place as local measurements move it, said in the flags where they do. */
+  private MovedClimate climate(Place place, Set<Note> flags) {
     MovedClimate moved =
         MovedClimate.of(climate.means(place), corrections, CorrectionSpot.of(place));
-    moved
-        .moves()
-        .forEach(
-            (quantity, move) -> {
-              if (!move.isNone()) {
-                flags.add(move.note(quantity));
-                flags.addAll(corrections.provenance());
-              }
-            });
-    double elevationM = place.elevationM();
-    return new Climate(
-        moved.months(),
-        moved.moves().get(CorrectedQuantity.TEMPERATURE).spreadFactor()
-            * ClimateSpread.annualTemperatureK(elevationM),
-        moved.moves().get(CorrectedQuantity.RELATIVE_HUMIDITY).spreadFactor()
-            * ClimateSpread.annualHumidityPct(elevationM));
+    flags.addAll(moved.notes());
+    if (moved.isMoved()) {
+      flags.addAll(corrections.provenance());
+    }
+    return moved;
+  }
+
+  private static double temperatureSpreadK(MovedClimate moved, Place place) {
+    return moved.temperatureSpreadFactor() * ClimateSpread.annualTemperatureK(place.elevationM());
+  }
+
+  private static double humiditySpreadPct(MovedClimate moved, Place place) {
+    return moved.humiditySpreadFactor() * ClimateSpread.annualHumidityPct(place.elevationM());
+  }
+
+  /**
+   * The annual means at a place that the class follows from, as in {@link #at} without overrides,
+   * to the last bit: no wet hours, no probabilities, a fraction of the work. For maps.
+   */
+  public AirGlance glance(Place place) {
+    Set<Note> flags = new LinkedHashSet<>();
+    Setting setting = Settings.guess(place.surroundings());
+    MovedClimate moved = climate(place, flags);
+    MonthMeans means = moved.means();
+    double temperatureC = 0;
+    double humidityPct = 0;
+    for (int m = 0; m < PlaceFields.MONTHS; m++) {
+      temperatureC += means.temperatureC()[m] / PlaceFields.MONTHS;
+      humidityPct += means.relativeHumidityPct()[m] / PlaceFields.MONTHS;
+    }
+    double rainMmPerYear = Arrays.stream(means.rainMm()).sum();
+    List<Double> monthly =
+        monthlySalt(seaSalt(place, setting, rainMmPerYear), place, means.windMPerS());
+    double saltSpread = SeaSalt.LN_SPREAD * moveSalt(monthly, place, flags);
+    Settings.So2 so2 = Settings.so2(setting, false, countries.find(place.countryCode()));
+    return new AirGlance(
+        new Exposure(
+            temperatureC,
+            humidityPct,
+            so2.depositionMgPerM2Day().median(),
+            SeaSalt.annual(monthly, saltSpread).median()),
+        new InputSpread(
+            temperatureSpreadK(moved, place), humiditySpreadPct(moved, place), so2.lnSpread(), saltSpread));
+  }
+
+  /** The climate of {@link #at}, January to December, alone. */
+  public List<MonthClimate> months(Place place) {
+    return climate(place, new LinkedHashSet<>()).months();
+  }
+
+  private SeaSalt seaSalt(Place place, Setting setting, double rainMmPerYear) {
+    return new SeaSalt(
+        place.sea(),
+        SaltPaths.crestsAboveLowAirM(place, elevation),
+        SaltPaths.roughness(setting, place.sea().distanceKm()),
+        place.elevationM(),
+        rainMmPerYear);
+  }
+
+  private List<Double> monthlySalt(SeaSalt model, Place place, double[] windMPerS) {
+    List<Double> monthly = new ArrayList<>();
+    for (WindMonth wind : winds.year(place, windMPerS)) {
+      monthly.add(model.monthMgPerM2Day(wind));
+    }
+    return monthly;
+  }
+
+  /** Moves salt by local measurements; gives what is left of its spread, 0..1 and a little more. */
+  private double moveSalt(List<Double> monthly, Place place, Set<Note> flags) {
+    SiteMove saltier = corrections.at(CorrectedQuantity.CHLORIDE, CorrectionSpot.of(place));
+    if (!saltier.isNone()) {
+      flags.add(saltier.note(CorrectedQuantity.CHLORIDE));
+    }
+    for (int m = 0; m < monthly.size(); m++) {
+      monthly.set(m, monthly.get(m) * Math.exp(saltier.departure()[m]));
+    }
+    return saltier.spreadFactor();
   }
 
   private record Salt(List<MonthAir> months, Quantiles annual, double lnSpread) {}
@@ -122,21 +183,15 @@ public final class AirModel {
       AirOverrides overrides,
       Set<Note> flags) {
     double rainMmPerYear = months.stream().mapToDouble(MonthClimate::rainMm).sum();
-    SeaSalt model =
-        new SeaSalt(
-            place.sea(),
-            SaltPaths.crestsAboveLowAirM(place, elevation),
-            SaltPaths.roughness(setting, place.sea().distanceKm()),
-            place.elevationM(),
-            rainMmPerYear);
-    List<Double> monthly = new ArrayList<>();
+    SeaSalt model = seaSalt(place, setting, rainMmPerYear);
     double calmestHeld = Double.POSITIVE_INFINITY;
     for (MonthClimate month : months) {
       if (SaltKernel.heldWind(month.windMPerS()) != month.windMPerS()) {
         calmestHeld = Math.min(calmestHeld, month.windMPerS());
       }
-      monthly.add(model.monthMgPerM2Day(winds.at(place, month)));
     }
+    double[] windMPerS = months.stream().mapToDouble(MonthClimate::windMPerS).toArray();
+    List<Double> monthly = monthlySalt(model, place, windMPerS);
     if (calmestHeld < Double.POSITIVE_INFINITY) {
       flags.add(SaltKernel.windHeld(calmestHeld));
     }
@@ -144,14 +199,7 @@ public final class AirModel {
     double scale = 1;
     double lnSpread = SeaSalt.LN_SPREAD;
     if (overrides.chlorideMgPerM2Day().isEmpty()) {
-      SiteMove saltier = corrections.at(CorrectedQuantity.CHLORIDE, CorrectionSpot.of(place));
-      if (!saltier.isNone()) {
-        flags.add(saltier.note(CorrectedQuantity.CHLORIDE));
-      }
-      for (int m = 0; m < monthly.size(); m++) {
-        monthly.set(m, monthly.get(m) * Math.exp(saltier.departure()[m]));
-      }
-      lnSpread *= saltier.spreadFactor();
+      lnSpread *= moveSalt(monthly, place, flags);
     }
     Quantiles annual = SeaSalt.annual(monthly, lnSpread);
     if (overrides.chlorideMgPerM2Day().isPresent()) {

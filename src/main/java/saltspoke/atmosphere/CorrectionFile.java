@@ -127,19 +127,7 @@ public final class CorrectionFile {
   /** The text of a correction file, with what was found by leaving sites out on its top. */
   public static String write(LeaveOneOut.Drafted drafted) {
     List<String> comments = new ArrayList<>(EXPLANATION);
-    for (LeaveOneOut error : drafted.errors()) {
-      comments.add(
-          String.format(
-              Locale.ROOT,
-              "left out one by one, %s: %d of %d sites have neighbours; error %.3g before,"
-                  + " %.3g after; %.0f %% inside the claimed 10-90 %% band",
-              error.quantity().id(),
-              error.withNeighbours(),
-              error.sites(),
-              error.rmseBefore(),
-              error.rmseAfter(),
-              error.bandCoveragePct()));
-    }
+    drafted.errors().forEach(error -> comments.add(error.sentence()));
     return CsvWriter.write(
         comments, COLUMNS, drafted.rows().stream().map(CorrectionFile::cells).toList());
   }

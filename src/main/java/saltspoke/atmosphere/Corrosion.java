@@ -34,6 +34,11 @@ public final class Corrosion {
     return distribution(metal, given, spread).quantilesUm();
   }
 
+  /** The median of {@link #firstYearUm} alone, by which the category goes; for maps. */
+  public static FirstYearLoss firstYearMedian(Metal metal, Exposure given, InputSpread spread) {
+    return new FirstYearLoss(distribution(metal, given, spread).medianUm());
+  }
+
   /** All four metals with categories, their probabilities and later losses. */
   public static List<MetalCorrosivity> assess(Exposure given, InputSpread spread) {
     List<MetalCorrosivity> all = new ArrayList<>();

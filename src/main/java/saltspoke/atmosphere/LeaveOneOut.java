@@ -2,6 +2,7 @@ package saltspoke.atmosphere;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 
 /**
  * How well the sites of a correction file foresee one another: each is left out in turn and worked
@@ -30,6 +31,31 @@ public record LeaveOneOut(
   private static final double STEP = 1.25;
 
   private static final double WANTED_PCT = 80;
+
+  /** What leaving sites out says, in one plain sentence; errors in the unit of the amount. */
+  public String sentence() {
+    if (withNeighbours == 0) {
+      return String.format(
+          Locale.ROOT,
+          "%s (%s): %d sites, none near enough to another to be judged by; spread %.3g",
+          quantity.id(),
+          quantity.kind(),
+          sites,
+          spread);
+    }
+    return String.format(
+        Locale.ROOT,
+        "%s (%s): %d sites, %d with neighbours; each left out in turn: error %.3g before, %.3g"
+            + " after; %.0f %% inside the claimed 10–90 %% band; spread %.3g",
+        quantity.id(),
+        quantity.kind(),
+        sites,
+        withNeighbours,
+        rmseBefore,
+        rmseAfter,
+        bandCoveragePct,
+        spread);
+  }
 
   /**
    * Rows with honest spreads: the usual one of the quantity, or a larger one until the bands that

@@ -99,7 +99,11 @@ final class LossDistribution {
   }
 
   Quantiles quantilesUm() {
-    return new Quantiles(quantileUm(0.1), quantileUm(0.5), quantileUm(0.9));
+    return new Quantiles(quantileUm(0.1), medianUm(), quantileUm(0.9));
+  }
+
+  double medianUm() {
+    return quantileUm(0.5);
   }
 
   private double quantileUm(double p) {

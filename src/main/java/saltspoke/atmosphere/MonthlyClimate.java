@@ -28,12 +28,6 @@ public final class MonthlyClimate {
     return new MonthlyClimate(new PlaceFields(layers));
   }
 
-  /** The modelled monthly means at a place. */
-  public MonthMeans means(Place place) {
-    return means(
-        place.latitudeDeg(), place.longitudeDeg(), place.elevationM(), place.sea().distanceKm());
-  }
-
   /**
    * January to December at a point.
    *
@@ -43,6 +37,12 @@ public final class MonthlyClimate {
   public List<MonthClimate> at(
       double latitudeDeg, double longitudeDeg, double elevationM, double seaDistanceKm) {
     return means(latitudeDeg, longitudeDeg, elevationM, seaDistanceKm).climate(latitudeDeg);
+  }
+
+  /** The modelled monthly means at a place, without what follows from them. */
+  public MonthMeans means(Place place) {
+    return means(
+        place.latitudeDeg(), place.longitudeDeg(), place.elevationM(), place.sea().distanceKm());
   }
 
   /** The modelled monthly means alone. */

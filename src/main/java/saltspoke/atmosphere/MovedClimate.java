@@ -1,23 +1,29 @@
 package saltspoke.atmosphere;
 
 import java.util.ArrayList;
-import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Map;
+import saltspoke.values.Note;
 
 /**
  * The climate at a spot as local measurements move it: first the means of temperature and humidity,
  * then the wet hours that follow from them.
- *
- * @param months January to December
- * @param moves how far each quantity was moved
  */
-public record MovedClimate(List<MonthClimate> months, Map<CorrectedQuantity, SiteMove> moves) {
+public final class MovedClimate {
   private static final int HOURS_OF_A_DAY = 24;
 
-  /** Whether any measurement was near enough. */
-  public boolean isMoved() {
-    return moves.values().stream().anyMatch(move -> !move.isNone());
+  private final MonthMeans means;
+  private final SiteMove warmer;
+  private final SiteMove moister;
+  private final SiteMove wetter;
+  private final double latitudeDeg;
+
+  private MovedClimate(
+      MonthMeans means, SiteMove warmer, SiteMove moister, SiteMove wetter, double latitudeDeg) {
+    this.means = means;
+    this.warmer = warmer;
+    this.moister = moister;
+    this.wetter = wetter;
+    this.latitudeDeg = latitudeDeg;
   }
 
   /**
@@ -27,32 +33,65 @@ public record MovedClimate(List<MonthClimate> months, Map<CorrectedQuantity, Sit
    */
   public static MovedClimate of(
       MonthMeans means, SiteCorrections corrections, CorrectionSpot spot) {
-    Map<CorrectedQuantity, SiteMove> moves = new LinkedHashMap<>();
-    for (CorrectedQuantity quantity :
-        List.of(
-            CorrectedQuantity.TEMPERATURE,
-            CorrectedQuantity.RELATIVE_HUMIDITY,
-            CorrectedQuantity.WET_HOURS)) {
-      moves.put(quantity, corrections.at(quantity, spot));
-    }
-    SiteMove warmer = moves.get(CorrectedQuantity.TEMPERATURE);
-    SiteMove moister = moves.get(CorrectedQuantity.RELATIVE_HUMIDITY);
-    SiteMove wetter = moves.get(CorrectedQuantity.WET_HOURS);
-    MonthMeans moved =
+    SiteMove warmer = corrections.at(CorrectedQuantity.TEMPERATURE, spot);
+    SiteMove moister = corrections.at(CorrectedQuantity.RELATIVE_HUMIDITY, spot);
+    return new MovedClimate(
         warmer.isNone() && moister.isNone()
             ? means
-            : means.moved(warmer.departure(), moister.departure());
-    List<MonthClimate> months = moved.climate(spot.latitudeDeg());
-    return new MovedClimate(wetter.isNone() ? months : wetter(months, wetter), moves);
+            : means.moved(warmer.departure(), moister.departure()),
+        warmer,
+        moister,
+        corrections.at(CorrectedQuantity.WET_HOURS, spot),
+        spot.latitudeDeg());
   }
 
-  private static List<MonthClimate> wetter(List<MonthClimate> months, SiteMove move) {
-    List<MonthClimate> wetter = new ArrayList<>(months.size());
-    for (MonthClimate month : months) {
-      double factor = Math.exp(move.departure()[month.month() - 1]);
-      double most = HOURS_OF_A_DAY * MonthMeans.daysIn(month.month());
-      wetter.add(month.withWetHours(WetHours.times(factor, month.wetHours(), most)));
+  /** Whether any measurement was near enough. */
+  public boolean isMoved() {
+    return !(warmer.isNone() && moister.isNone() && wetter.isNone());
+  }
+
+  /** Monthly means. */
+  MonthMeans means() {
+    return means;
+  }
+
+  /** Factor on the model's spread of the annual mean temperature, 0..1. */
+  double temperatureSpreadFactor() {
+    return warmer.spreadFactor();
+  }
+
+  /** Factor on the model's spread of the annual mean humidity, 0..1. */
+  double humiditySpreadFactor() {
+    return moister.spreadFactor();
+  }
+
+  /** January to December with the wet hours; worked out at every call. */
+  public List<MonthClimate> months() {
+    List<MonthClimate> months = means.climate(latitudeDeg);
+    if (wetter.isNone()) {
+      return months;
     }
-    return wetter;
+    List<MonthClimate> moved = new ArrayList<>(months.size());
+    for (MonthClimate month : months) {
+      double factor = Math.exp(wetter.departure()[month.month() - 1]);
+      double most = HOURS_OF_A_DAY * MonthMeans.daysIn(month.month());
+      moved.add(month.withWetHours(WetHours.times(factor, month.wetHours(), most)));
+    }
+    return moved;
+  }
+
+  /** What to tell of the moves, empty when there was none. */
+  List<Note> notes() {
+    List<Note> notes = new ArrayList<>();
+    add(notes, CorrectedQuantity.TEMPERATURE, warmer);
+    add(notes, CorrectedQuantity.RELATIVE_HUMIDITY, moister);
+    add(notes, CorrectedQuantity.WET_HOURS, wetter);
+    return notes;
+  }
+
+  private static void add(List<Note> notes, CorrectedQuantity quantity, SiteMove move) {
+    if (!move.isNone()) {
+      notes.add(move.note(quantity));
+    }
   }
 }

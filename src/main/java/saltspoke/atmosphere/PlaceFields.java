@@ -91,16 +91,16 @@ final class PlaceFields {
       }
     }
     return new At(
-        sample(temperature, latitudeDeg, longitudeDeg),
-        sample(vapourDensity, latitudeDeg, longitudeDeg),
+        temperature.sampleAll(latitudeDeg, longitudeDeg),
+        vapourDensity.sampleAll(latitudeDeg, longitudeDeg),
         scaleHeight.sample(EXCEEDED_50, latitudeDeg, longitudeDeg),
         vapourTopography.sample(0, latitudeDeg, longitudeDeg),
         around,
         elevation.sample(0, latitudeDeg, longitudeDeg),
-        sample(rain, latitudeDeg, longitudeDeg),
+        rain.sampleAll(latitudeDeg, longitudeDeg),
         seasonalVapour(latitudeDeg, longitudeDeg),
-        sample(marineTemperature, latitudeDeg, longitudeDeg),
-        sample(marineWind, latitudeDeg, longitudeDeg));
+        marineTemperature.sampleAll(latitudeDeg, longitudeDeg),
+        marineWind.sampleAll(latitudeDeg, longitudeDeg));
   }
 
   /**
@@ -123,13 +123,5 @@ final class PlaceFields {
       months[m] = mean + cosine * Math.cos(phase) + sine * Math.sin(phase);
     }
     return months;
-  }
-
-  private static double[] sample(FieldStack stack, double latitudeDeg, double longitudeDeg) {
-    double[] values = new double[stack.size()];
-    for (int i = 0; i < values.length; i++) {
-      values[i] = stack.sample(i, latitudeDeg, longitudeDeg);
-    }
-    return values;
   }
 }

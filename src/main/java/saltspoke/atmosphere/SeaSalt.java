@@ -23,7 +23,15 @@ public final class SeaSalt {
   private static final double NEGLIGIBLE_MG = 1e-6;
 
   private static final double SECTOR_RADIAN = 2 * Math.PI / SeaView.DIRECTIONS;
-  private static final double SECTOR_DEG = 360.0 / SeaView.DIRECTIONS;
+  private static final double[] SIN = new double[SeaView.DIRECTIONS];
+  private static final double[] COS = new double[SeaView.DIRECTIONS];
+
+  static {
+    for (int k = 0; k < SeaView.DIRECTIONS; k++) {
+      SIN[k] = Math.sin(k * SECTOR_RADIAN);
+      COS[k] = Math.cos(k * SECTOR_RADIAN);
+    }
+  }
 
   /** All-sided wind of the reference speed, to which the kernel's amounts belong. */
   private static final double COARSE_UNIT =
@@ -76,10 +84,10 @@ public final class SeaSalt {
     double carried = 0;
     for (int k = 0; k < SeaView.DIRECTIONS; k++) {
       if (fineMg[k] > 0) {
-        carried += fineMg[k] * fineShare(sectors, k * SECTOR_DEG) / FINE_UNIT;
+        carried += fineMg[k] * fineShare(sectors, k) / FINE_UNIT;
       }
       if (coarseMg[k] > NEGLIGIBLE_MG) {
-        carried += coarseMg[k] * coarseShare(sectors, k * SECTOR_DEG) / COARSE_UNIT;
+        carried += coarseMg[k] * coarseShare(sectors, k) / COARSE_UNIT;
       }
     }
     return steadyMg + carried;
@@ -116,19 +124,21 @@ public final class SeaSalt {
     return SeaView.DIRECTIONS * fineShare(new SectorWind(wind), 0);
   }
 
-  private static double coarseShare(SectorWind wind, double fromAzimuthDeg) {
+  private static double coarseShare(SectorWind wind, int direction) {
     return SECTOR_RADIAN
         * wind.carriedPerRadian(
-            fromAzimuthDeg,
+            SIN[direction],
+            COS[direction],
             SaltKernel.COARSE_THRESHOLD_M_PER_S,
             SaltKernel.COARSE_GROWTH_S_PER_M,
             SaltKernel.REFERENCE_WIND_M_PER_S);
   }
 
-  private static double fineShare(SectorWind wind, double fromAzimuthDeg) {
+  private static double fineShare(SectorWind wind, int direction) {
     return SECTOR_RADIAN
         * wind.carriedPerRadian(
-            fromAzimuthDeg,
+            SIN[direction],
+            COS[direction],
             SaltKernel.FINE_THRESHOLD_M_PER_S,
             0,
             SaltKernel.REFERENCE_WIND_M_PER_S);

@@ -40,7 +40,18 @@ final class SectorWind {
   double carriedPerRadian(
       double fromAzimuthDeg, double thresholdMPerS, double growthPerMPerS, double referenceMPerS) {
     double azimuth = Math.toRadians(fromAzimuthDeg);
-    double cosine = -(towardsEast * Math.sin(azimuth) + towardsNorth * Math.cos(azimuth));
+    return carriedPerRadian(
+        Math.sin(azimuth), Math.cos(azimuth), thresholdMPerS, growthPerMPerS, referenceMPerS);
+  }
+
+  /** The same for a direction whose sine and cosine are known. */
+  double carriedPerRadian(
+      double sinAzimuth,
+      double cosAzimuth,
+      double thresholdMPerS,
+      double growthPerMPerS,
+      double referenceMPerS) {
+    double cosine = -(towardsEast * sinAzimuth + towardsNorth * cosAzimuth);
     double s2 = sigmaMPerS * sigmaMPerS;
     double centre = meanVectorMPerS * cosine + growthPerMPerS * s2;
     double lead =

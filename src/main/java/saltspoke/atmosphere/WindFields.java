@@ -1,5 +1,7 @@
 package saltspoke.atmosphere;
 
+import java.util.ArrayList;
+import java.util.List;
 import saltspoke.fields.DataSet;
 import saltspoke.fields.FieldStack;
 import saltspoke.places.Place;
@@ -28,14 +30,22 @@ final class WindFields {
         data.stack("wind-direction-monthly-u"), data.stack("wind-direction-monthly-v"));
   }
 
-  WindMonth at(Place place, MonthClimate month) {
-    double speed = SaltKernel.heldWind(month.windMPerS());
-    int band = month.month() - 1;
-    double u = eastward.sample(band, place.latitudeDeg(), place.longitudeDeg());
-    double v = northward.sample(band, place.latitudeDeg(), place.longitudeDeg());
-    if (Double.isNaN(u) || Double.isNaN(v)) {
-      return WindMonth.fromAllSides(speed);
+  /**
+   * January to December.
+   *
+   * @param windMPerS mean speed of each month at the place
+   */
+  List<WindMonth> year(Place place, double[] windMPerS) {
+    double[] u = eastward.sampleAll(place.latitudeDeg(), place.longitudeDeg());
+    double[] v = northward.sampleAll(place.latitudeDeg(), place.longitudeDeg());
+    List<WindMonth> year = new ArrayList<>(windMPerS.length);
+    for (int m = 0; m < windMPerS.length; m++) {
+      double speed = SaltKernel.heldWind(windMPerS[m]);
+      year.add(
+          Double.isNaN(u[m]) || Double.isNaN(v[m])
+              ? WindMonth.fromAllSides(speed)
+              : new WindMonth(speed, VECTOR_STRETCH * u[m], VECTOR_STRETCH * v[m]));
     }
-    return new WindMonth(speed, VECTOR_STRETCH * u, VECTOR_STRETCH * v);
+    return year;
   }
 }

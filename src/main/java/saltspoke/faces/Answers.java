@@ -8,15 +8,22 @@ import saltspoke.advice.AdviceRequest;
 import saltspoke.advice.Advisor;
 import saltspoke.advice.Sensitivity;
 import saltspoke.advice.Tornado;
+import saltspoke.atlas.AtlasLayer;
+import saltspoke.atlas.LayerValues;
+import saltspoke.atlas.PointValues;
+import saltspoke.atlas.RegionOutlook;
 import saltspoke.atmosphere.AirClimate;
 import saltspoke.atmosphere.AirModel;
 import saltspoke.atmosphere.AirOverrides;
 import saltspoke.fields.DataSet;
+import saltspoke.places.Area;
 import saltspoke.places.Place;
 import saltspoke.places.PlaceDirectory;
 import saltspoke.places.PlaceHit;
 import saltspoke.places.PlaceOverrides;
+import saltspoke.places.Regions;
 import saltspoke.values.Refusal;
+import saltspoke.values.Stopped;
 import saltspoke.wheel.Catalogue;
 import saltspoke.wheel.Profiles;
 import saltspoke.wheel.RidingProfile;
@@ -28,11 +35,12 @@ import saltspoke.wheel.RidingProfile;
 public final class Answers {
   private final DataSet dataSet;
   private final LocalCorrections corrections;
-  private final Supplier<PlaceDirectory> places;
-  private final Supplier<AirModel> airModel;
+  private final Once<PlaceDirectory> places;
+  private final Once<AirModel> airModel;
   private final Catalogue catalogue = Catalogue.shipped();
   private final Profiles profiles = Profiles.shipped();
-  private final Supplier<Advisor> advisor;
+  private final Once<Advisor> advisor;
+  private final Once<Regions> regions;
 
   public Answers(DataSet dataSet) {
     this(dataSet, LocalCorrections.NONE);
@@ -42,14 +50,15 @@ public final class Answers {
   public Answers(DataSet dataSet, LocalCorrections corrections) {
     this.dataSet = dataSet;
     this.corrections = corrections;
-    this.places = once(() -> PlaceDirectory.open(dataSet));
-    this.airModel = once(() -> AirModel.from(dataSet, corrections.sites()));
-    this.advisor = once(() -> new Advisor(catalogue));
+    this.places = new Once<>(() -> PlaceDirectory.open(dataSet));
+    this.airModel = new Once<>(() -> AirModel.from(dataSet, corrections.sites()));
+    this.advisor = new Once<>(() -> new Advisor(catalogue));
+    this.regions = new Once<>(() -> Regions.from(dataSet));
   }
 
-  /** Begins to make the air model and the advisor in the background, while the place is sought. */
+  /** Begins to make all parts in the background, while the place is sought. */
   public Answers prepare() {
-    for (Supplier<?> part : List.of(airModel, advisor)) {
+    for (Once<?> part : List.of(places, airModel, advisor)) {
       Thread thread = new Thread(() -> tryToMake(part), "prepare");
       thread.setDaemon(true);
       thread.start();
@@ -57,7 +66,12 @@ public final class Answers {
     return this;
   }
 
-  private static void tryToMake(Supplier<?> part) {
+  /** Whether all parts are made, so that the next answer need not wait for any. */
+  public boolean ready() {
+    return places.isMade() && airModel.isMade() && advisor.isMade();
+  }
+
+  private static void tryToMake(Once<?> part) {
     try {
       part.get();
     } catch (RuntimeException e) {
@@ -91,6 +105,12 @@ public final class Answers {
     return places.get().isLand(latitudeDeg, longitudeDeg);
   }
 
+  /** Land beside a point in the water, see {@link PlaceDirectory#landBeside}. */
+  public Optional<double[]> landBeside(
+      double latitudeDeg, double longitudeDeg, double reachKm, double inlandKm) {
+    return places.get().landBeside(latitudeDeg, longitudeDeg, reachKm, inlandKm);
+  }
+
   /** Codes of the countries whose postcodes are known. */
   public List<String> postcodeCountries() {
     return places.get().postcodeCountries();
@@ -114,6 +134,7 @@ public final class Answers {
 
   /** The air at the place of a question. */
   public AirClimate air(PlaceQuestion question) {
+    Stopped.check();
     return airModel.get().at(place(question), AirOverrides.of(question.setting().orElse(null)));
   }
 
@@ -136,6 +157,80 @@ public final class Answers {
         .of(air, Questions.wheel(parameters, profiles.get(profileName(parameters))));
   }
 
+  /** The values of an atlas layer at any point. */
+  public PointValues values(AtlasLayer layer) {
+    return LayerValues.of(layer, places.get(), airModel.get());
+  }
+
+  /** The same for the ready profile that the question names. */
+  public PointValues firstLook(Parameters parameters) {
+    return firstLook(parameters, profiles.get(profileName(parameters)));
+  }
+
+  /** The months to the first look at any point, for the one pairing in question. */
+  public PointValues firstLook(Parameters parameters, RidingProfile profile) {
+    AdviceRequest request = Questions.wheel(parameters, profile);
+    int pairings =
+        catalogue
+            .pairings(request.rim(), request.nipple(), request.between(), request.spoke())
+            .size();
+    if (pairings != 1) {
+      throw Refusal.wrongUse(
+          "not-one-pairing",
+          "pairing",
+          pairings + " pairings",
+          "rim, nipple, interface and spoke of one pairing");
+    }
+    Advisor one = advisor.get();
+    return LayerValues.firstLook(
+        places.get(), airModel.get(), air -> one.pairings(air, request).get(0).firstLookMonths());
+  }
+
+  /** First-level regions of the world. */
+  public Regions regions() {
+    return regions.get();
+  }
+
+  /** What the region that a question names is like, for a ready profile if it names one. */
+  public RegionOutlook outlook(Parameters parameters) {
+    String name =
+        parameters
+            .text("region")
+            .orElseThrow(() -> Refusal.wrongUse("empty", "region", "", "a region's name"));
+    Area area = regions.get().find(name);
+    return outlook(area, regions.get().belongingTo(area), parameters, namedProfile(parameters));
+  }
+
+  /**
+   * What an area is like for the people who live in it.
+   *
+   * @param belongs which points are of the area
+   * @param profile how they ride; nothing leaves the wheels out
+   */
+  public RegionOutlook outlook(
+      Area area,
+      Regions.PointTest belongs,
+      Parameters parameters,
+      Optional<RidingProfile> profile) {
+    int sample = parameters.whole("sample", 4, 400, RegionOutlook.USUAL_SAMPLE);
+    return RegionOutlook.of(
+        area,
+        places.get().within(belongs),
+        places.get(),
+        airModel.get(),
+        sample,
+        profile.map(
+            ridden -> {
+              AdviceRequest request = Questions.wheel(parameters, ridden);
+              return air -> advisor.get().pairings(air, request);
+            }));
+  }
+
+  /** The ready profile that a question names, if it names one. */
+  public Optional<RidingProfile> namedProfile(Parameters parameters) {
+    return parameters.text("profile").map(profiles::get);
+  }
+
   private static String profileName(Parameters parameters) {
     return parameters
         .text("profile")
@@ -151,17 +246,28 @@ public final class Answers {
     return Texts.in(language.orElse("en"));
   }
 
-  private static <T> Supplier<T> once(Supplier<T> maker) {
-    return new Supplier<>() {
-      private T made;
+  /** A part that is made at its first use, by one thread. */
+  private static final class Once<T> {
+    private final Supplier<T> maker;
+    private volatile T made;
 
-      @Override
-      public synchronized T get() {
-        if (made == null) {
-          made = maker.get();
-        }
-        return made;
+    Once(Supplier<T> maker) {
+      this.maker = maker;
+    }
+
+    T get() {
+      return made == null ? make() : made;
+    }
+
+    boolean isMade() {
+      return made != null;
+    }
+
+    private synchronized T make() {
+      if (made == null) {
+        made = maker.get();
       }
-    };
+      return made;
+    }
   }
 }

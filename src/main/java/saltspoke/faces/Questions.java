@@ -36,6 +36,12 @@ public final class Questions {
   /** Names that a question about a wheel may carry. */
   public static final Set<String> ADVICE = union(AIR, WHEEL);
 
+  /** Names that an atlas of the first look may carry. */
+  public static final Set<String> ATLAS = union(WHEEL, Set.of("lang"));
+
+  /** Names that a question about a region may carry. */
+  public static final Set<String> REGION = union(ATLAS, Set.of("region", "sample"));
+
   /** Names that a search for places may carry. */
   public static final Set<String> PLACES = Set.of("q", "limit", "lang");
 

@@ -25,7 +25,7 @@ public final class Texts {
 
   /** Text files of a language, one per room. */
   public static final List<String> ROOMS =
-      List.of("places", "air", "air-climate", "wheel", "cell", "advice", "page", "cli");
+      List.of("places", "air", "air-climate", "wheel", "cell", "advice", "page", "atlas", "cli");
 
   private static final Pattern GAP = Pattern.compile("\\{([A-Za-z0-9]+)\\}");
   private static final Map<String, Texts> LOADED = new ConcurrentHashMap<>();

@@ -9,10 +9,10 @@ import java.security.NoSuchAlgorithmException;
 import java.util.HexFormat;
 
 /** SHA-256 (FIPS 180-4) as lower-case hexadecimal text. */
-final class Checksum {
+public final class Checksum {
   private Checksum() {}
 
-  static String of(byte[] bytes) {
+  public static String of(byte[] bytes) {
     return HexFormat.of().formatHex(digest().digest(bytes));
   }
 

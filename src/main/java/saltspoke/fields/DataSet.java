@@ -3,7 +3,6 @@ package saltspoke.fields;
 import java.io.ByteArrayInputStream;
 import java.io.IOException;
 import java.io.InputStream;
-import java.io.UncheckedIOException;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Map;
@@ -107,7 +106,7 @@ public final class DataSet {
    * @throws Refusal when there is no such layer
    */
   public InputStream openStored(String layerId) {
-    return new ByteArrayInputStream(bytes(manifest.get(layerId).path()));
+    return new ByteArrayInputStream(checkedBytes(manifest.get(layerId)));
   }
 
   /** All rows of a layer that is a table. */
@@ -117,7 +116,7 @@ public final class DataSet {
 
   private FieldStack read(String layerId) {
     Manifest.Entry entry = manifest.get(layerId);
-    GeoTiffRaster raster = GeoTiffRaster.read(bytes(entry.path()), entry.path());
+    GeoTiffRaster raster = GeoTiffRaster.read(checkedBytes(entry), entry.path());
     if (raster.bands().length != entry.bands().size()) {
       throw Refusal.dataDamaged(
           "wrong-bands",
@@ -142,16 +141,16 @@ public final class DataSet {
 
   /** What is wrong with a file, or nothing. */
   private String complaint(Manifest.Entry entry) {
-    byte[] found;
     try {
-      var read = home.find(entry.path());
-      if (read.isEmpty()) {
-        return entry.path() + " is missing";
-      }
-      found = read.get();
+      return home.find(entry.path())
+          .map(found -> complaint(entry, found))
+          .orElse(entry.path() + " is missing");
     } catch (IOException e) {
       return entry.path() + " cannot be read";
     }
+  }
+
+  private static String complaint(Manifest.Entry entry, byte[] found) {
     if (found.length != entry.bytes()) {
       return entry.path() + " has " + found.length + " bytes instead of " + entry.bytes();
     }
@@ -160,13 +159,23 @@ public final class DataSet {
         : entry.path() + " has another content (SHA-256) than the manifest says";
   }
 
+  /** The bytes of a file, which may have been damaged or removed since the data set was opened. */
+  private byte[] checkedBytes(Manifest.Entry entry) {
+    byte[] found = bytes(entry.path());
+    String complaint = complaint(entry, found);
+    if (!complaint.isEmpty()) {
+      throw Refusal.dataDamaged("damaged-data", home.name(), complaint, MEND);
+    }
+    return found;
+  }
+
   private byte[] bytes(String path) {
     try {
       return home.find(path)
           .orElseThrow(
               () -> Refusal.dataDamaged("damaged-data", home.name(), path + " is missing", MEND));
     } catch (IOException e) {
-      throw new UncheckedIOException(e);
+      throw Refusal.dataDamaged("damaged-data", home.name(), path + " cannot be read", MEND);
     }
   }
 }

@@ -43,31 +43,29 @@ public final class Field {
    * not wrap) the edge value holds.
    */
   public double sample(double latitudeDeg, double longitudeDeg) {
-    double y = (grid.northDeg() - latitudeDeg) / grid.stepLatDeg();
-    y = Math.max(0, Math.min(grid.rows() - 1, y));
-    int row = Math.min((int) y, grid.rows() - 2);
-    double fy = y - row;
+    return sample(new Corners(grid, latitudeDeg, longitudeDeg));
+  }
 
-    double x = (longitudeDeg - grid.westDeg()) / grid.stepLonDeg();
-    int columns = grid.columns();
-    int left;
-    int right;
-    double fx;
-    if (grid.wrapsLongitude()) {
-      x = x - columns * Math.floor(x / columns);
-      left = (int) x % columns;
-      right = (left + 1) % columns;
-      fx = x - Math.floor(x);
-    } else {
-      x = Math.max(0, Math.min(columns - 1, x));
-      left = Math.min((int) x, columns - 2);
-      right = left + 1;
-      fx = x - left;
-    }
+  /** The same for a point whose corners in this grid are known. */
+  double sample(Corners at) {
+    double sum =
+        at.northWest * values[at.upper + at.left]
+            + at.northEast * values[at.upper + at.right]
+            + at.southWest * values[at.lower + at.left]
+            + at.southEast * values[at.lower + at.right];
+    return Double.isNaN(sum) ? withoutMissing(at) : sum;
+  }
+
+  private double withoutMissing(Corners at) {
+    double[] corner = {
+      values[at.upper + at.left],
+      values[at.upper + at.right],
+      values[at.lower + at.left],
+      values[at.lower + at.right]
+    };
+    double[] share = {at.northWest, at.northEast, at.southWest, at.southEast};
     double sum = 0;
     double weight = 0;
-    double[] corner = {at(row, left), at(row, right), at(row + 1, left), at(row + 1, right)};
-    double[] share = {(1 - fy) * (1 - fx), (1 - fy) * fx, fy * (1 - fx), fy * fx};
     for (int i = 0; i < 4; i++) {
       if (!Double.isNaN(corner[i]) && share[i] > 0) {
         sum += share[i] * corner[i];

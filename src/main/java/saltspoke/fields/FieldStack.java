@@ -58,4 +58,14 @@ public final class FieldStack {
   public double sample(int index, double latitudeDeg, double longitudeDeg) {
     return bands.get(index).sample(latitudeDeg, longitudeDeg);
   }
+
+  /** Bilinear values of all bands at a point: one search for its corners serves them all. */
+  public double[] sampleAll(double latitudeDeg, double longitudeDeg) {
+    Corners at = new Corners(bands.get(0).grid(), latitudeDeg, longitudeDeg);
+    double[] values = new double[bands.size()];
+    for (int i = 0; i < values.length; i++) {
+      values[i] = bands.get(i).sample(at);
+    }
+    return values;
+  }
 }

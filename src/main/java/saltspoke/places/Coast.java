@@ -4,11 +4,11 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.concurrent.ConcurrentHashMap;
 import net.sf.geographiclib.Geodesic;
 import net.sf.geographiclib.GeodesicData;
 import net.sf.geographiclib.GeodesicMask;
 import saltspoke.fields.DataSet;
+import saltspoke.values.Kept;
 
 /**
  * The coast of the world: which points are land, how far the nearest shore is, and what the sea
@@ -22,6 +22,9 @@ final class Coast {
   /** Error of the coarse coast with some room, m. */
   private static final double COARSE_ERROR_M = 4_000;
 
+  /** Coast beyond this is never seen, m. */
+  private static final double HORIZON_M = SeaRays.SHORE_LIMIT_M + SeaRays.FETCH_LIMIT_M;
+
   /** Water this far beyond the shore, at most, tells which sea it is, km. */
   private static final double SEA_SAMPLE_KM = 20;
 
@@ -33,11 +36,23 @@ final class Coast {
    */
   record Shore(double latitudeDeg, double longitudeDeg, double distanceKm, double azimuthDeg) {}
 
+  /**
+   * The bins of one tile.
+   *
+   * @param bytes about as much memory as they take once parsed: a vertex has some 20 characters in
+   *     the table and 20 bytes as numbers
+   */
+  private record FineTile(Map<Integer, CoastBin> bins, long bytes) {}
+
   private final TiledTable fineTable;
   private final DataSet data;
-  private final Map<Integer, Map<Integer, CoastBin>> fineTiles = new ConcurrentHashMap<>();
+
+  /** Tiles in use, within a quarter of the heap: the whole world's where there is room. */
+  private final Kept<Integer, FineTile> fineTiles =
+      new Kept<>(Runtime.getRuntime().maxMemory() / 4, FineTile::bytes);
+
   private final ClosedSeas closedSeas = new ClosedSeas();
-  private List<CoastBin> coarse;
+  private volatile CoarseCoast coarse;
 
   Coast(DataSet data) {
     this.data = data;
@@ -54,7 +69,7 @@ final class Coast {
   Shore nearest(double latitudeDeg, double longitudeDeg) {
     Vantage from = new Vantage(latitudeDeg, longitudeDeg);
     NearestShore search = new NearestShore(from);
-    search.offer(coarse());
+    search.offer(coarse().from(latitudeDeg, longitudeDeg));
     if (search.bestM() < FINE_M + COARSE_ERROR_M) {
       double reach = search.bestM() + COARSE_ERROR_M;
       NearestShore fine = new NearestShore(from);
@@ -114,11 +129,11 @@ final class Coast {
         rays.add(bin.shape(), 0, FINE_M);
       }
     }
-    double horizonM = SeaRays.SHORE_LIMIT_M + SeaRays.FETCH_LIMIT_M;
-    double chord = Vantage.chordOfArcM(horizonM);
-    for (CoastBin bin : coarse()) {
-      if (bin.leastM(from) < chord) {
-        rays.add(bin.shape(), fineM, horizonM);
+    double chord = Vantage.chordOfArcM(HORIZON_M);
+    CoarseCoast.Order order = coarse().from(latitudeDeg, longitudeDeg);
+    for (int b = 0; b < order.bins().length && order.leastM()[b] < chord; b++) {
+      if (order.bins()[b].leastM(from) < chord) {
+        rays.add(order.bins()[b].shape(), fineM, HORIZON_M);
       }
     }
     return rays;
@@ -136,40 +151,47 @@ final class Coast {
                     Math.sin(azimuth) * Math.sin(arc) * Math.cos(phi),
                     Math.cos(arc) - Math.sin(phi) * sin));
     double wrapped = lon - 360 * Math.floor((lon + 180) / 360);
-    return closedSeas.ratioAt(Math.toDegrees(Math.asin(sin)), wrapped);
+    return closedSeas.ratioAt(Math.toDegrees(Vantage.arcSine(sin)), wrapped);
   }
 
-  private synchronized List<CoastBin> coarse() {
+  private CoarseCoast coarse() {
     if (coarse == null) {
-      List<CoastBin> bins = new ArrayList<>();
-      new TiledTable(data, "coast-coarse")
-          .all(
-              line -> {
-                // A row without a fraction is a whole bin of land and has no coast.
-                if (line.indexOf('.') >= 0) {
-                  bins.add(CoastBin.parse(line));
-                }
-              });
-      coarse = bins;
+      readCoarse();
     }
     return coarse;
   }
 
+  private synchronized void readCoarse() {
+    if (coarse != null) {
+      return;
+    }
+    List<CoastBin> bins = new ArrayList<>();
+    new TiledTable(data, "coast-coarse")
+        .all(
+            line -> {
+              // A row without a fraction is a whole bin of land and has no coast.
+              if (line.indexOf('.') >= 0) {
+                bins.add(CoastBin.parse(line));
+              }
+            });
+    coarse = new CoarseCoast(bins, Vantage.chordOfArcM(HORIZON_M));
+  }
+
   private CoastBin fineBin(int key, int tile) {
-    return fineTiles
-        .computeIfAbsent(
-            tile,
-            t -> {
-              Map<Integer, CoastBin> bins = new HashMap<>();
-              fineTable.tile(
-                  t,
-                  line -> {
-                    CoastBin bin = CoastBin.parse(line);
-                    bins.put(bin.key(), bin);
-                  });
-              return bins;
-            })
-        .get(key);
+    return fineTiles.get(tile, this::readTile).bins().get(key);
+  }
+
+  private FineTile readTile(int tile) {
+    Map<Integer, CoastBin> bins = new HashMap<>();
+    long[] bytes = {0};
+    fineTable.tile(
+        tile,
+        line -> {
+          CoastBin bin = CoastBin.parse(line);
+          bins.put(bin.key(), bin);
+          bytes[0] += line.length();
+        });
+    return new FineTile(bins, bytes[0]);
   }
 
   private List<CoastBin> fineBins(double latitudeDeg, double longitudeDeg, double reachM) {

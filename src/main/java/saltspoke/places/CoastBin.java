@@ -11,6 +11,8 @@ final class CoastBin {
   /** Width and height of a bin, degrees; the coast layer's own. */
   static final int SIZE_DEG = 2;
 
+  private static final int COLUMNS = 360 / SIZE_DEG;
+
   /** Coast edges to a chunk: few enough to skip cheaply, enough that the skipping costs little. */
   private static final int CHUNK_EDGES = 32;
 
@@ -116,12 +118,35 @@ final class CoastBin {
   /** Number by which a bin is found. */
   static int keyOf(double latitudeDeg, double longitudeDeg) {
     int row = (int) Math.floor(Math.min(latitudeDeg, 89.999999) / SIZE_DEG) + 45;
-    int column = Math.floorMod((int) Math.floor(longitudeDeg / SIZE_DEG) + 90, 180);
-    return row * 180 + column;
+    int column = Math.floorMod((int) Math.floor(longitudeDeg / SIZE_DEG) + 90, COLUMNS);
+    return row * COLUMNS + column;
   }
 
   int key() {
     return keyOf(southDeg + 1, westDeg + 1);
+  }
+
+  /** The bin that a point lies in, without any coast: for its place and size. */
+  static CoastBin empty(double latitudeDeg, double longitudeDeg) {
+    int key = keyOf(latitudeDeg, longitudeDeg);
+    return new CoastBin(key % COLUMNS * SIZE_DEG - 180, key / COLUMNS * SIZE_DEG - 90, "");
+  }
+
+  /** Least chord distance between any points of two bins, m; 0 where they may touch. */
+  double leastM(CoastBin other) {
+    return Math.max(0, centresM(other) - radiusM - other.radiusM);
+  }
+
+  /** Most chord distance between any points of two bins, m. */
+  double mostM(CoastBin other) {
+    return centresM(other) + radiusM + other.radiusM;
+  }
+
+  private double centresM(CoastBin other) {
+    double dx = centreX - other.centreX;
+    double dy = centreY - other.centreY;
+    double dz = centreZ - other.centreZ;
+    return Math.sqrt(dx * dx + dy * dy + dz * dz);
   }
 
   /** Least chord distance from a point to anything in the bin, m; 0 inside. */

@@ -129,6 +129,12 @@ final class Gazetteer {
     return near;
   }
 
+  List<Town> within(Regions.PointTest test) {
+    return all().parallelStream()
+        .filter(town -> test.test(town.latitudeDeg, town.longitudeDeg))
+        .toList();
+  }
+
   static double distanceKm(Town town, double latitudeDeg, double longitudeDeg) {
     double phi1 = Math.toRadians(town.latitudeDeg);
     double phi2 = Math.toRadians(latitudeDeg);
@@ -136,7 +142,7 @@ final class Gazetteer {
     double h =
         Math.pow(Math.sin((phi2 - phi1) / 2), 2)
             + Math.cos(phi1) * Math.cos(phi2) * Math.pow(Math.sin(dLon / 2), 2);
-    return 2 * Vantage.MEAN_RADIUS_M / 1000 * Math.asin(Math.sqrt(h));
+    return 2 * Vantage.MEAN_RADIUS_M / 1000 * Vantage.arcSine(Math.sqrt(h));
   }
 
   PlaceHit hit(Town town) {

@@ -46,6 +46,13 @@ final class NameTables {
     return regions().getOrDefault(countryCode + "." + regionCode, "");
   }
 
+  /** Whether a folded word is the country's code, full name or an everyday name. */
+  boolean isCountry(String countryCode, String folded) {
+    return folded.equalsIgnoreCase(countryCode)
+        || countryCode.equals(EVERYDAY.get(folded))
+        || FoldedName.of(country(countryCode)).equals(folded);
+  }
+
   /** Whether a folded word names the country or region, by its code or the start of its name. */
   boolean isWithin(String countryCode, String regionCode, String folded) {
     return folded.equalsIgnoreCase(countryCode)

@@ -45,6 +45,15 @@ final class NearestShore {
     }
   }
 
+  /** Searches bins from near to far until none can hold a nearer coast. */
+  void offer(CoarseCoast.Order order) {
+    for (int b = 0; b < order.bins().length && order.leastM()[b] < bestM; b++) {
+      if (order.bins()[b].leastM(from) < bestM) {
+        offer(order.bins()[b].shape());
+      }
+    }
+  }
+
   private void offer(CoastBin.Shape shape) {
     for (int c = 0; c < shape.chunks(); c++) {
       if (shape.leastM(c, from) < bestM) {

@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.stream.DoubleStream;
 import net.sf.geographiclib.Geodesic;
 import net.sf.geographiclib.GeodesicData;
 import saltspoke.fields.DataSet;
@@ -102,11 +103,29 @@ final class PlaceAssembly {
     return finish(named, point, OptionalDouble.empty(), overrides, flags);
   }
 
+  /** See {@link PlaceDirectory#landBeside}. */
+  Optional<double[]> landBeside(
+      double latitudeDeg, double longitudeDeg, double reachKm, double inlandKm) {
+    Coast.Shore shore = coast.nearest(latitudeDeg, longitudeDeg);
+    if (shore.distanceKm() > reachKm) {
+      return Optional.empty();
+    }
+    return DoubleStream.of(inlandKm, inlandKm / 4, INLAND_KM)
+        .mapToObj(km -> behind(shore, km))
+        .filter(point -> coast.isLand(point.latitudeDeg, point.longitudeDeg))
+        .map(point -> new double[] {point.latitudeDeg, point.longitudeDeg})
+        .findFirst();
+  }
+
   private Point movedTo(Coast.Shore shore, List<Note> flags) {
     flags.add(Note.of("place-moved-to-shore", "distanceKm", shore.distanceKm()));
+    return behind(shore, INLAND_KM);
+  }
+
+  private static Point behind(Coast.Shore shore, double km) {
     GeodesicData inland =
         Geodesic.WGS84.Direct(
-            shore.latitudeDeg(), shore.longitudeDeg(), shore.azimuthDeg(), INLAND_KM * 1000);
+            shore.latitudeDeg(), shore.longitudeDeg(), shore.azimuthDeg(), km * 1000);
     return new Point(inland.lat2, inland.lon2);
   }
 

@@ -80,6 +80,24 @@ public final class PlaceDirectory {
         flags);
   }
 
+  /** Towns whose centre passes a test, in the order of the gazetteer. */
+  public List<PlaceHit> within(Regions.PointTest test) {
+    return gazetteer.within(test).stream().map(gazetteer::hit).toList();
+  }
+
+  /** The place of a town that a search found. */
+  public Place of(PlaceHit hit) {
+    return assembly.named(
+        hit.name(),
+        hit.regionName(),
+        hit.countryCode(),
+        hit.lat(),
+        hit.lon(),
+        hit.elevationM(),
+        PlaceOverrides.NONE,
+        new ArrayList<>());
+  }
+
   /** The place of a postcode. Leading zeros that a spreadsheet ate are put back, with a flag. */
   public Place byPostcode(String code, String countryCode, PlaceOverrides overrides) {
     PostcodeBook.Found found = postcodes.find(code, countryCode);
@@ -133,6 +151,20 @@ public final class PlaceDirectory {
   /** Whether a point is on land; lakes are land, the Caspian is sea. */
   public boolean isLand(double latitudeDeg, double longitudeDeg) {
     return coast.isLand(latitudeDeg, longitudeDeg);
+  }
+
+  /**
+   * A point of land for one in the water: from the nearest shore straight on inland, so far as
+   * there is land; nothing when no shore lies within reach. For maps, where a node off the shore
+   * stands for the land beside it.
+   *
+   * @param reachKm farthest shore that counts
+   * @param inlandKm wanted distance behind the shore
+   * @return latitude and longitude, degrees
+   */
+  public Optional<double[]> landBeside(
+      double latitudeDeg, double longitudeDeg, double reachKm, double inlandKm) {
+    return assembly.landBeside(latitudeDeg, longitudeDeg, reachKm, inlandKm);
   }
 
   /** The sea as seen from a point, without looking for names: for maps of many points. */

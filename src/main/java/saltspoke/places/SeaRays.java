@@ -46,10 +46,11 @@ final class SeaRays {
 
   /** Notes the crossings of a bin's coast whose arc distance lies in a range, m. */
   void add(CoastBin.Shape shape, double fromM, double toM) {
+    double chordStart = Vantage.chordOfArcM(fromM);
     double chordLimit = Vantage.chordOfArcM(toM);
     for (int c = 0; c < shape.chunks(); c++) {
       if (shape.leastM(c, from) < chordLimit && touchesRay(shape, c)) {
-        add(shape, shape.chunk[2 * c], shape.chunk[2 * c + 1], fromM, toM);
+        add(shape, shape.chunk[2 * c], shape.chunk[2 * c + 1], chordStart, chordLimit);
       }
     }
   }
@@ -67,7 +68,8 @@ final class SeaRays {
         || Math.abs(e * COS[right] - n * SIN[right]) <= radius;
   }
 
-  private void add(CoastBin.Shape shape, int first, int last, double fromM, double toM) {
+  private void add(
+      CoastBin.Shape shape, int first, int last, double chordStart, double chordLimit) {
     double e0 = from.east(shape.x[first], shape.y[first]);
     double n0 = from.north(shape.x[first], shape.y[first], shape.z[first]);
     int sector0 = sector(e0, n0);
@@ -86,9 +88,9 @@ final class SeaRays {
           double px = shape.x[i - 1] + share * (shape.x[i] - shape.x[i - 1]);
           double py = shape.y[i - 1] + share * (shape.y[i] - shape.y[i - 1]);
           double pz = shape.z[i - 1] + share * (shape.z[i] - shape.z[i - 1]);
-          double distance = Vantage.arcM(from.chordM(px, py, pz));
-          if (distance >= fromM && distance < toM) {
-            note(k, clockwise ? distance : -distance);
+          double chord = from.chordM(px, py, pz);
+          if (chord >= chordStart && chord < chordLimit) {
+            note(k, clockwise ? chord : -chord);
           }
         }
       }
@@ -98,7 +100,7 @@ final class SeaRays {
     }
   }
 
-  /** Positive: land begins there; negative: water begins. */
+  /** A chord; positive: land begins there; negative: water begins. */
   private void note(int k, double signed) {
     if (count[k] == crossing[k].length) {
       crossing[k] = Arrays.copyOf(crossing[k], 2 * count[k]);
@@ -119,7 +121,8 @@ final class SeaRays {
     double start = land ? Double.NaN : 0;
     double end = Double.NaN;
     for (double c : sorted) {
-      double at = Math.abs(c);
+      // Crossings are kept as chords: few of them are ever needed as a distance.
+      double at = Vantage.arcM(Math.abs(c));
       boolean waterBegins = c < 0;
       if (waterBegins && Double.isNaN(start)) {
         start = at;

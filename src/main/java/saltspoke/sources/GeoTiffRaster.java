@@ -213,7 +213,10 @@ public record GeoTiffRaster(
         int firstRow = strip % stripsPerPlane * rowsPerStrip;
         int pixels = Math.min(rowsPerStrip, rows - firstRow) * columns;
         ByteBuffer data =
-            unpack((int) offsets[strip], (int) lengths[strip], pixels * perPixel * (bits / 8));
+            unpack(
+                (int) offsets[strip],
+                (int) lengths[strip],
+                Math.multiplyExact(pixels * perPixel, bits / 8));
         float[] samples = numbers(data, pixels * perPixel, bits, format);
         int start = firstRow * columns;
         if (perPixel == 1) {

@@ -44,6 +44,9 @@ public record NumpyArray(int[] shape, double[] values) {
           return fromNpy(zip, name + " " + entry.getName());
         }
       }
+    } catch (IllegalArgumentException e) {
+      // The JDK's way to say that an entry's name is not UTF-8.
+      throw refuse(name, String.valueOf(e.getMessage()), "a ZIP archive of NumPy arrays");
     }
     throw refuse(name, "no .npy member", "a ZIP archive of NumPy arrays");
   }

@@ -10,6 +10,7 @@ public final class PlaceBuilders {
     return List.of(
         new CoastBuilder(),
         new CountriesBuilder(),
+        new RegionsBuilder(),
         new GazetteerBuilder(),
         new UsPostcodesBuilder(),
         new IndiaPostcodesBuilder(),

@@ -3,6 +3,7 @@ package saltspoke.values;
 import java.util.Collections;
 import java.util.Map;
 import java.util.TreeMap;
+import java.util.regex.Pattern;
 
 /**
  * Something the program has to say to a person beside a number: a flag, a reason, a caution, an
@@ -14,8 +15,10 @@ import java.util.TreeMap;
  * @param args gap name → number or text
  */
 public record Note(String code, Map<String, Object> args) {
+  private static final Pattern CODE = Pattern.compile("[a-z0-9]+(-[a-z0-9]+)+");
+
   public Note {
-    if (!code.matches("[a-z0-9]+(-[a-z0-9]+)+")) {
+    if (!CODE.matcher(code).matches()) {
       throw new IllegalArgumentException("not a note code: " + code);
     }
     args = Collections.unmodifiableMap(new TreeMap<>(args));

@@ -206,7 +206,7 @@ class SiteCorrectionsTest {
     String text = CorrectionFile.write(LeaveOneOut.draft(rows));
     assertEquals(rows, read(text));
     assertTrue(text.startsWith("# Site corrections"), text);
-    assertTrue(text.contains("left out one by one"), text);
+    assertTrue(text.contains("# temperature (add): 1 sites, none near enough"), text);
   }
 
   @ParameterizedTest

@@ -1,6 +1,8 @@
 package saltspoke.bench;
 
 import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.concurrent.TimeUnit;
 import org.openjdk.jmh.annotations.Benchmark;
 import org.openjdk.jmh.annotations.BenchmarkMode;
@@ -15,6 +17,10 @@ import org.openjdk.jmh.annotations.Warmup;
 import saltspoke.atmosphere.AirClimate;
 import saltspoke.atmosphere.AirModel;
 import saltspoke.atmosphere.AirOverrides;
+import saltspoke.atmosphere.CorrectedQuantity;
+import saltspoke.atmosphere.CorrectionSpot;
+import saltspoke.atmosphere.SiteCorrection;
+import saltspoke.atmosphere.SiteCorrections;
 import saltspoke.fields.DataSet;
 import saltspoke.places.Place;
 import saltspoke.places.PlaceDirectory;
@@ -30,6 +36,7 @@ import saltspoke.places.PlaceOverrides;
 public class AirBench {
   private PlaceDirectory places;
   private AirModel model;
+  private AirModel corrected;
   private Place hamburg;
 
   @Setup
@@ -37,6 +44,7 @@ public class AirBench {
     DataSet data = DataSet.in(Path.of("climate-data"));
     places = PlaceDirectory.open(data);
     model = AirModel.from(data);
+    corrected = AirModel.from(data, thousandSites());
     hamburg = places.at(53.55, 9.99, PlaceOverrides.NONE);
   }
 
@@ -48,5 +56,24 @@ public class AirBench {
   @Benchmark
   public AirClimate placeAndAir() {
     return model.at(places.at(53.55, 9.99, PlaceOverrides.NONE), AirOverrides.NONE);
+  }
+
+  /** By a correction file of 1000 sites, 16 and more of them near. */
+  @Benchmark
+  public AirClimate airWithCorrections() {
+    return corrected.at(hamburg, AirOverrides.NONE);
+  }
+
+  private static SiteCorrections thousandSites() {
+    List<SiteCorrection> rows = new ArrayList<>();
+    for (int i = 0; i < 1000; i++) {
+      CorrectionSpot spot = new CorrectionSpot(40 + i % 25, i / 25 - 10, 100, 50);
+      for (int month = 1; month <= 12; month++) {
+        double kelvin = Math.sin(i + 0.3 * month);
+        rows.add(
+            new SiteCorrection("s" + i, spot, CorrectedQuantity.TEMPERATURE, month, kelvin, 0.3));
+      }
+    }
+    return SiteCorrections.of(rows);
   }
 }

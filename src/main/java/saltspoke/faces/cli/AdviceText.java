@@ -12,12 +12,18 @@ import saltspoke.faces.Texts;
 final class AdviceText {
   private static final int MOST_CHANGES = 6;
 
+  /** Of the air's many flags these are told here too: they say that a person's own file counted. */
+  private static final String MOVED_BY_MEASUREMENTS = "air-corrected-";
+
   private AdviceText() {}
 
   static String of(Advice advice, Texts texts) {
     StringBuilder out = new StringBuilder();
     AirText.place(out, advice.air().place(), texts);
     out.append(texts.say(advice.air().summary())).append('\n');
+    advice.air().flags().stream()
+        .filter(note -> note.code().startsWith(MOVED_BY_MEASUREMENTS))
+        .forEach(note -> AirText.line(out, "%s", texts.say(note)));
     AirText.line(out, "Profile: %s", advice.request().profile().title());
     out.append("\nfirst  every  replace  seized, months   pairing\n");
     out.append(" look              by  (10–50–90 %)     rim / nipple / interface / spoke\n");

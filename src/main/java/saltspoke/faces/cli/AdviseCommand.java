@@ -1,9 +1,5 @@
 package saltspoke.faces.cli;
 
-import com.fasterxml.jackson.core.JsonProcessingException;
-import java.io.IOException;
-import java.nio.file.Files;
-import java.nio.file.Path;
 import java.util.Map;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
@@ -17,9 +13,6 @@ import saltspoke.faces.Questions;
 import saltspoke.faces.Texts;
 import saltspoke.faces.json.AdviceJson;
 import saltspoke.faces.json.Json;
-import saltspoke.faces.json.ProfileJson;
-import saltspoke.values.Refusal;
-import saltspoke.wheel.RidingProfile;
 
 /** {@code advise}: when to look at a wheel at a place, for one pairing or all of them. */
 @Command(
@@ -52,29 +45,11 @@ final class AdviseCommand implements Callable<Integer> {
     Advice advice =
         wheel.profileFile == null
             ? answers.advise(parameters)
-            : answers.advise(parameters, profile(wheel.profileFile, parameters));
+            : answers.advise(parameters, wheel.ownProfile(parameters));
     spec.commandLine()
         .getOut()
         .println(
             common.json ? Json.pretty(AdviceJson.of(advice, texts)) : AdviceText.of(advice, texts));
     return ExitCode.DONE;
-  }
-
-  private static RidingProfile profile(Path file, Parameters parameters) {
-    if (parameters.has("profile")) {
-      throw Refusal.wrongUse(
-          "two-profiles", "profile", "", "either --profile or --profile-file, not both");
-    }
-    try {
-      return ProfileJson.read(Json.MAPPER.readTree(Files.readAllBytes(file)));
-    } catch (JsonProcessingException e) {
-      throw Refusal.wrongUse(
-          "not-json",
-          file + ":" + e.getLocation().getLineNr(),
-          "",
-          "a JSON object with the fields of a profile");
-    } catch (IOException e) {
-      throw Refusal.notFound("unreadable-file", "profile-file", file, "a file that can be read");
-    }
   }
 }

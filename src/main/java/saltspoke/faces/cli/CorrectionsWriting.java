@@ -57,9 +57,10 @@ final class CorrectionsWriting {
       entry.put("kind", error.quantity().kind());
       entry.put("sites", error.sites());
       entry.put("withNeighbours", error.withNeighbours());
-      Json.number(entry, "rmseBefore", error.rmseBefore());
-      Json.number(entry, "rmseAfter", error.rmseAfter());
-      Json.number(entry, "bandCoveragePct", error.bandCoveragePct());
+      boolean judged = error.withNeighbours() > 0;
+      Json.numberOrNull(entry, "rmseBefore", judged ? error.rmseBefore() : null);
+      Json.numberOrNull(entry, "rmseAfter", judged ? error.rmseAfter() : null);
+      Json.numberOrNull(entry, "bandCoveragePct", judged ? error.bandCoveragePct() : null);
       Json.number(entry, "spread", error.spread());
     }
     ArrayNode refused = node.putArray("refused");
@@ -72,21 +73,7 @@ final class CorrectionsWriting {
     out.append(
         String.format(
             Locale.ROOT, "Corrections: %d rows written to %s%n", drafted.rows().size(), target));
-    for (LeaveOneOut error : drafted.errors()) {
-      out.append(
-          String.format(
-              Locale.ROOT,
-              "  %s (%s): %d sites, %d with neighbours; each left out: error %.3g before, %.3g"
-                  + " after,%n    %.0f %% inside the claimed 10–90 %% band; spread %.3g%n",
-              error.quantity().id(),
-              error.quantity().kind(),
-              error.sites(),
-              error.withNeighbours(),
-              error.rmseBefore(),
-              error.rmseAfter(),
-              error.bandCoveragePct(),
-              error.spread()));
-    }
+    drafted.errors().forEach(e -> out.append("  ").append(e.sentence()).append('\n'));
     ComparisonText.refused(out, "Without a correction", departures.refused());
     return out.toString();
   }

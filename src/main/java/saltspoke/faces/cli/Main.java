@@ -21,6 +21,8 @@ import saltspoke.values.Refusal;
       PairingsCommand.class,
       CompareCommand.class,
       SensitivityCommand.class,
+      RegionCommand.class,
+      AtlasCommand.class,
       ServeCommand.class,
       IngestCommand.class,
       DatasetsCommand.class,

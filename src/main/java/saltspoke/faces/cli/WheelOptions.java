@@ -1,9 +1,20 @@
 package saltspoke.faces.cli;
 
+import com.fasterxml.jackson.core.JsonProcessingException;
+import java.io.IOException;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.LinkedHashMap;
+import java.util.List;
 import java.util.Map;
+import java.util.stream.Collectors;
 import picocli.CommandLine.Option;
+import saltspoke.faces.Parameters;
+import saltspoke.faces.Texts;
+import saltspoke.faces.json.Json;
+import saltspoke.faces.json.ProfileJson;
+import saltspoke.values.Refusal;
+import saltspoke.wheel.RidingProfile;
 
 /** The options that say how the bicycle is ridden and what its wheel is made of. */
 final class WheelOptions {
@@ -99,5 +110,34 @@ final class WheelOptions {
     PlaceOptions.put(values, "tape-sound", tapeSound);
     PlaceOptions.put(values, "hidden-nipples", hiddenNipples);
     return values;
+  }
+
+  /** Parts and profile as people call them; empty when none is named. */
+  String title(Texts texts) {
+    Map<String, String> titles = new LinkedHashMap<>(values());
+    titles.keySet().retainAll(List.of("profile", "rim", "nipple", "interface", "spoke"));
+    return titles.entrySet().stream()
+        .map(part -> texts.say("page-" + part.getKey() + "-" + part.getValue()))
+        .collect(Collectors.joining(" · "));
+  }
+
+  /** The profile in the file that was named. */
+  RidingProfile ownProfile(Parameters parameters) {
+    if (parameters.has("profile")) {
+      throw Refusal.wrongUse(
+          "two-profiles", "profile", "", "either --profile or --profile-file, not both");
+    }
+    try {
+      return ProfileJson.read(Json.MAPPER.readTree(Files.readAllBytes(profileFile)));
+    } catch (JsonProcessingException e) {
+      throw Refusal.wrongUse(
+          "not-json",
+          profileFile + ":" + e.getLocation().getLineNr(),
+          "",
+          "a JSON object with the fields of a profile");
+    } catch (IOException e) {
+      throw Refusal.notFound(
+          "unreadable-file", "profile-file", profileFile, "a file that can be read");
+    }
   }
 }

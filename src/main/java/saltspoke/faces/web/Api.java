@@ -29,6 +29,7 @@ import saltspoke.faces.json.CatalogueJson;
 import saltspoke.faces.json.Json;
 import saltspoke.faces.json.PlacesJson;
 import saltspoke.faces.json.ProfileJson;
+import saltspoke.faces.json.RegionJson;
 import saltspoke.values.Refusal;
 
 /** The resources under {@code /api}, each a function from a request to a reply. */
@@ -44,11 +45,21 @@ public final class Api {
 
   /** A server for these answers on a port of the loopback address, 0 for any free one. */
   public static WebServer server(int port, Answers answers) {
+    return server(ServerSettings.local(port), answers);
+  }
+
+  /** A server for these answers under the usual limits. */
+  public static WebServer server(ServerSettings settings, Answers answers) {
+    return new WebServer(settings, ServerLimits.USUAL, resources(answers), answers::ready);
+  }
+
+  private static Map<String, ResourceHandler> resources(Answers answers) {
     Api api = new Api(answers);
     Map<String, ResourceHandler> resources = new LinkedHashMap<>();
     resources.put("/api/air", new ResourceHandler(GET, api::air));
     resources.put("/api/advice", new ResourceHandler(Set.of("GET", "POST"), api::advice));
     resources.put("/api/places", new ResourceHandler(GET, api::places));
+    resources.put("/api/region", new ResourceHandler(GET, api::region));
     resources.put("/api/profiles", new ResourceHandler(GET, api::profiles));
     resources.put("/api/pairings", new ResourceHandler(GET, api::pairings));
     resources.put("/api/about", new ResourceHandler(GET, api::about));
@@ -64,7 +75,7 @@ public final class Api {
     resources.put("/api/advice.csv", new ResourceHandler(Set.of("GET", "POST"), api::table));
     resources.put("/api/openapi.json", new ResourceHandler(GET, api::document));
     resources.put("/*", new ResourceHandler(GET, new StaticFiles()::serve));
-    return new WebServer(port, resources);
+    return resources;
   }
 
   private Reply air(Ask ask) {
@@ -150,6 +161,12 @@ public final class Api {
             .text("q")
             .orElseThrow(() -> Refusal.wrongUse("empty", "q", "", "the beginning of a name"));
     return Reply.json(PlacesJson.of(answers.search(query, parameters.whole("limit", 1, 50, 10))));
+  }
+
+  private Reply region(Ask ask) {
+    Parameters parameters = new Parameters(ask.query(), Questions.REGION);
+    Texts texts = Answers.textsFor(parameters);
+    return Reply.json(RegionJson.of(answers.outlook(parameters), texts));
   }
 
   private Reply profiles(Ask ask) {

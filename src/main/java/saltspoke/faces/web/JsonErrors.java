@@ -1,7 +1,7 @@
 package saltspoke.faces.web;
 
+import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.nio.ByteBuffer;
-import java.nio.charset.StandardCharsets;
 import org.eclipse.jetty.http.HttpHeader;
 import org.eclipse.jetty.http.HttpStatus;
 import org.eclipse.jetty.server.Request;
@@ -15,6 +15,14 @@ final class JsonErrors extends ErrorHandler {
   @Override
   public boolean handle(Request request, Response response, Callback callback) {
     int status = response.getStatus();
+    if (status == HttpStatus.SERVICE_UNAVAILABLE_503) {
+      Busy.askAgainLater(response);
+      return write(response, Json.error(Busy.CROWDED, "request", "", Busy.ALLOWED), callback);
+    }
+    if (status == HttpStatus.PAYLOAD_TOO_LARGE_413) {
+      String most = "at most " + ResourceHandler.MOST_BODY_BYTES + " bytes";
+      return write(response, Json.error("too-large", "body", "", most), callback);
+    }
     String error =
         HttpStatus.getMessage(status).toLowerCase(java.util.Locale.ROOT).replace(' ', '-');
     String allowed =
@@ -22,10 +30,12 @@ final class JsonErrors extends ErrorHandler {
                 || status == HttpStatus.REQUEST_HEADER_FIELDS_TOO_LARGE_431
             ? "a query and headers of at most " + WebServer.MOST_HEADER_BYTES + " bytes"
             : "a plain HTTP request";
-    byte[] body =
-        Json.compact(Json.error(error, "request", "", allowed)).getBytes(StandardCharsets.UTF_8);
+    return write(response, Json.error(error, "request", "", allowed), callback);
+  }
+
+  private static boolean write(Response response, ObjectNode error, Callback callback) {
     response.getHeaders().put(HttpHeader.CONTENT_TYPE, Reply.JSON);
-    response.write(true, ByteBuffer.wrap(body), callback);
+    response.write(true, ByteBuffer.wrap(Reply.json(error).body()), callback);
     return true;
   }
 }

@@ -3,11 +3,12 @@ package saltspoke.faces.web;
 import java.util.Arrays;
 import java.util.Optional;
 import java.util.function.ToDoubleFunction;
+import saltspoke.atlas.AtlasLayer;
 import saltspoke.atmosphere.AirClimate;
-import saltspoke.atmosphere.Category;
-import saltspoke.atmosphere.CategoryLimits;
 import saltspoke.atmosphere.Metal;
 import saltspoke.atmosphere.MetalCorrosivity;
+import saltspoke.faces.picture.LayerStyle;
+import saltspoke.faces.picture.LayerStyles;
 import saltspoke.values.Refusal;
 
 /** What the map can show: each layer is a number of the air at a place, and how it is drawn. */
@@ -16,17 +17,9 @@ enum MapLayer {
   CLASS_ZINC(Metal.ZINC),
   CLASS_COPPER(Metal.COPPER),
   CLASS_ALUMINIUM(Metal.ALUMINIUM),
-  /** Steps on the bounds of the wetness classes τ2 to τ5 of ISO 9223, and between. */
-  WET_HOURS(
-      LayerStyle.steps("wet-hours", "h/a", ColourRamp.WATER, 250, 1000, 2500, 3500, 4500, 5500),
-      air -> air.annual().wetHours()),
-  /** Steps on the bounds of the salinity classes S0 to S3 of ISO 9223, and between. */
-  CHLORIDE(
-      LayerStyle.steps("chloride", "mg/(m² d)", ColourRamp.OXIDE, 3, 10, 30, 60, 150, 300),
-      air -> air.chlorideDepositionMgPerM2Day().median()),
-  NEAR_FREEZING_DAYS(
-      LayerStyle.steps("near-freezing-days", "d/a", ColourRamp.WATER, 5, 20, 40, 60, 80, 100),
-      air -> air.annual().nearFreezingDays());
+  WET_HOURS(AtlasLayer.WET_HOURS, air -> air.annual().wetHours()),
+  CHLORIDE(AtlasLayer.CHLORIDE, air -> air.chlorideDepositionMgPerM2Day().median()),
+  NEAR_FREEZING_DAYS(AtlasLayer.NEAR_FREEZING_DAYS, air -> air.annual().nearFreezingDays());
 
   private final Optional<Metal> metal;
   private final LayerStyle style;
@@ -34,18 +27,13 @@ enum MapLayer {
 
   MapLayer(Metal metal) {
     this.metal = Optional.of(metal);
-    double[] limitsUm =
-        Arrays.stream(Category.values())
-            .filter(category -> category != Category.CX)
-            .mapToDouble(category -> CategoryLimits.upperUm(metal, category))
-            .toArray();
-    this.style = LayerStyle.classes("class-" + metal.id(), limitsUm);
+    this.style = LayerStyles.classesOfLoss(metal);
     this.value = air -> corrosivity(air, metal).firstYearLossUm().median();
   }
 
-  MapLayer(LayerStyle style, ToDoubleFunction<AirClimate> value) {
+  MapLayer(AtlasLayer layer, ToDoubleFunction<AirClimate> value) {
     this.metal = Optional.empty();
-    this.style = style;
+    this.style = LayerStyles.of(layer);
     this.value = value;
   }
 

@@ -3,9 +3,6 @@ package saltspoke.faces.web;
 import com.fasterxml.jackson.databind.node.ArrayNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.io.InputStream;
-import java.util.Collections;
-import java.util.LinkedHashMap;
-import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Set;
@@ -17,6 +14,7 @@ import saltspoke.faces.Parameters;
 import saltspoke.faces.PlaceQuestion;
 import saltspoke.faces.json.Json;
 import saltspoke.fields.DataSet;
+import saltspoke.values.Kept;
 import saltspoke.values.Refusal;
 
 /** What the page's map asks for: tiles, legend, value under the pointer, land or sea, names. */
@@ -25,27 +23,31 @@ final class MapResources {
       Pattern.compile("/api/tiles/([a-z-]+)/(\\d{1,2})/(\\d{1,5})/(\\d{1,5})\\.png");
   private static final String LEGEND = "/api/legend/";
   private static final int TILE_AGE_SECONDS = 86_400;
-  private static final int MOST_TILES_KEPT = 600;
+  private static final long MOST_TILE_BYTES = 16L << 20;
   private static final Set<String> POINT = Set.of("at", "layer");
 
   private final Answers answers;
   private final AirNodes nodes;
-  private final Map<String, byte[]> tiles =
-      Collections.synchronizedMap(
-          new LinkedHashMap<>(64, 0.75f, true) {
-            private static final long serialVersionUID = 1L;
-
-            @Override
-            protected boolean removeEldestEntry(Map.Entry<String, byte[]> eldest) {
-              return size() > MOST_TILES_KEPT;
-            }
-          });
+  private final Kept<String, byte[]> tiles = new Kept<>(MOST_TILE_BYTES, png -> png.length);
   private TileRenderer renderer;
   private byte[] names;
 
   MapResources(Answers answers) {
     this.answers = answers;
-    this.nodes = new AirNodes(this::airOnLand);
+    this.nodes =
+        new AirNodes(
+            new AirNodes.World() {
+              @Override
+              public Optional<AirClimate> air(double latitudeDeg, double longitudeDeg) {
+                return airOnLand(latitudeDeg, longitudeDeg);
+              }
+
+              @Override
+              public Optional<double[]> landBeside(
+                  double latitudeDeg, double longitudeDeg, double reachKm, double inlandKm) {
+                return answers.landBeside(latitudeDeg, longitudeDeg, reachKm, inlandKm);
+              }
+            });
   }
 
   /** A tile: {@code /api/tiles/LAYER/Z/X/Y.png}. */
@@ -60,11 +62,9 @@ final class MapResources {
             Integer.parseInt(path.group(2)),
             Integer.parseInt(path.group(3)),
             Integer.parseInt(path.group(4)));
-    byte[] png = tiles.get(ask.path());
-    if (png == null) {
-      png = renderer().render(layer.style(), nodes.of(frame, layer), frame);
-      tiles.put(ask.path(), png);
-    }
+    byte[] png =
+        tiles.get(
+            ask.path(), key -> renderer().render(layer.style(), nodes.of(frame, layer), frame));
     return Reply.kept("image/png", png, TILE_AGE_SECONDS);
   }
 

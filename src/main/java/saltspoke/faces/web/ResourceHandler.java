@@ -24,10 +24,16 @@ final class ResourceHandler extends Handler.Abstract {
 
   private final Set<String> methods;
   private final Function<Ask, Reply> resource;
+  private final Deadline deadline;
 
   ResourceHandler(Set<String> methods, Function<Ask, Reply> resource) {
+    this(methods, resource, ServerLimits.USUAL);
+  }
+
+  ResourceHandler(Set<String> methods, Function<Ask, Reply> resource, ServerLimits limits) {
     this.methods = methods;
     this.resource = resource;
+    this.deadline = new Deadline(limits.longestAnswer());
   }
 
   @Override
@@ -46,15 +52,16 @@ final class ResourceHandler extends Handler.Abstract {
       }
       String body = method.equals("POST") ? body(request) : "";
       Ask ask = new Ask(method, request.getHttpURI().getDecodedPath(), Ask.queryOf(request), body);
-      Reply reply = resource.apply(ask);
+      Reply reply = deadline.within(() -> resource.apply(ask));
       write(response, HttpStatus.OK_200, reply, callback);
     } catch (Refusal refusal) {
       write(response, status(refusal), Reply.json(Json.error(refusal)), callback);
-    } catch (BodyTooLarge e) {
+    } catch (Busy busy) {
+      Busy.askAgainLater(response);
       write(
           response,
-          HttpStatus.PAYLOAD_TOO_LARGE_413,
-          error("too-large", "body", "", "at most " + MOST_BODY_BYTES + " bytes"),
+          HttpStatus.SERVICE_UNAVAILABLE_503,
+          error(busy.error(), "request", "", Busy.ALLOWED),
           callback);
     } catch (RuntimeException | LinkageError e) {
       System.err.println(
@@ -100,27 +107,12 @@ final class ResourceHandler extends Handler.Abstract {
     response.write(true, ByteBuffer.wrap(reply.body()), callback);
   }
 
+  /** The body, which the server has read before and found within {@link #MOST_BODY_BYTES}. */
   private static String body(Request request) {
-    if (request.getLength() > MOST_BODY_BYTES) {
-      throw new BodyTooLarge();
-    }
-    ByteBuffer bytes = ByteBuffer.allocate(MOST_BODY_BYTES + 1);
-    try (var in = Content.Source.asInputStream(request)) {
-      int n;
-      while (bytes.hasRemaining()
-          && (n = in.read(bytes.array(), bytes.position(), bytes.remaining())) >= 0) {
-        bytes.position(bytes.position() + n);
-      }
-    } catch (IOException e) {
+    try {
+      return Content.Source.asString(request, StandardCharsets.UTF_8);
+    } catch (IOException | IllegalArgumentException e) {
       throw Refusal.wrongUse("unreadable-body", "body", "", "a JSON object in UTF-8");
     }
-    if (bytes.position() > MOST_BODY_BYTES) {
-      throw new BodyTooLarge();
-    }
-    return new String(bytes.array(), 0, bytes.position(), StandardCharsets.UTF_8);
-  }
-
-  private static final class BodyTooLarge extends RuntimeException {
-    private static final long serialVersionUID = 1L;
   }
 }

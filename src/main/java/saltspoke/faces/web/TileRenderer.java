@@ -11,6 +11,7 @@ import java.io.ByteArrayOutputStream;
 import java.io.IOException;
 import java.io.UncheckedIOException;
 import javax.imageio.ImageIO;
+import saltspoke.faces.picture.LayerStyle;
 
 /**
  * Draws map tiles: the steps of a layer on land, a thin line where the step changes, hatching where

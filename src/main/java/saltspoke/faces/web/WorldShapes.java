@@ -6,6 +6,7 @@ import java.awt.geom.Path2D;
 import java.io.IOException;
 import java.io.InputStream;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
@@ -25,7 +26,12 @@ public final class WorldShapes {
 
   /** A ring or line with its box. */
   private record Line(
-      double[] x, double[] y, double west, double east, double north, double south) {}
+      double[] x, double[] y, double west, double east, double north, double south) {
+    Line movedEast(double worlds) {
+      double[] moved = Arrays.stream(x).map(each -> each + worlds).toArray();
+      return new Line(moved, y, west + worlds, east + worlds, north, south);
+    }
+  }
 
   private final List<Line> land;
   private final List<Line> borders;
@@ -41,7 +47,7 @@ public final class WorldShapes {
    */
   public static WorldShapes ofCountries(InputStream countries) {
     List<double[][]> rings = rings(countries);
-    List<Line> land = rings.stream().map(WorldShapes::line).toList();
+    List<Line> land = rings.stream().flatMap(ring -> onOneSheet(ring).stream()).toList();
     return new WorldShapes(land, borders(rings));
   }
 
@@ -79,6 +85,35 @@ public final class WorldShapes {
     if (closed) {
       path.closePath();
     }
+  }
+
+  /**
+   * A ring as it lies on the flat map. One that crosses longitude 180° is unrolled and drawn at
+   * both edges of the map; one that runs round a pole is closed along the map's edge there.
+   */
+  private static List<Line> onOneSheet(double[][] ring) {
+    List<double[]> unrolled = new ArrayList<>();
+    double turn = 0;
+    for (int i = 0; i < ring.length; i++) {
+      double step = i == 0 ? 0 : ring[i][0] - ring[i - 1][0];
+      turn -= step > 180 ? 360 : step < -180 ? -360 : 0;
+      unrolled.add(new double[] {ring[i][0] + turn, ring[i][1]});
+    }
+    if (turn != 0) {
+      double pole = ring[0][1] < 0 ? -90 : 90;
+      unrolled.add(new double[] {ring[0][0] + turn, pole});
+      unrolled.add(new double[] {ring[0][0], pole});
+      unrolled.add(ring[0]);
+    }
+    Line line = line(unrolled.toArray(double[][]::new));
+    List<Line> sheets = new ArrayList<>(List.of(line));
+    if (line.west < 0) {
+      sheets.add(line.movedEast(1));
+    }
+    if (line.east > 1) {
+      sheets.add(line.movedEast(-1));
+    }
+    return sheets;
   }
 
   /** Runs of edges that occur in two rings. */

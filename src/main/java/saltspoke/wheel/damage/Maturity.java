@@ -22,6 +22,14 @@ final class Maturity {
   /** Whole months for which the integral is kept ready. */
   static final int MONTHS = 481;
 
+  private static final double[] TABLED_MONTHS = new double[POINTS];
+
+  static {
+    for (int i = 0; i < POINTS; i++) {
+      TABLED_MONTHS[i] = Math.exp(LN_FIRST + LN_STEP * i);
+    }
+  }
+
   private final double[] integral = new double[POINTS];
   private final double[] atMonth = new double[MONTHS + 1];
   private final double compoundMonths;
@@ -68,6 +76,6 @@ final class Maturity {
   }
 
   private static double months(int i) {
-    return Math.exp(LN_FIRST + LN_STEP * i);
+    return TABLED_MONTHS[i];
   }
 }

@@ -100,6 +100,28 @@ class CorrectionsCommandTest {
     assertTrue(moved.get("flags").toString().contains("Hill (0 km)"));
     assertFalse(plain.get("flags").toString().contains("Hill"));
     assertEquals(names(plain), names(moved), "the form of the answer stays");
+    StringWriter advice = new StringWriter();
+    String[] advise = {
+      "advise",
+      "--at",
+      "54.32,10.13",
+      "--profile",
+      "trainer-only",
+      "--rim",
+      "carbon-bare",
+      "--nipple",
+      "brass-nickel",
+      "--interface",
+      "none",
+      "--spoke",
+      "stainless",
+      "--corrections",
+      file.toString()
+    };
+    assertEquals(
+        ExitCode.DONE,
+        Main.run(advise, new PrintWriter(advice), new PrintWriter(new StringWriter())));
+    assertTrue(advice.toString().contains("Hill (0 km)"), advice.toString());
   }
 
   private static List<String> names(JsonNode node) {

@@ -3,19 +3,34 @@ package saltspoke.faces.web;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.atomic.AtomicInteger;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
+import saltspoke.atmosphere.AirClimate;
 
 @Tag("law")
 class AirNodesTest {
   private final AtomicInteger asked = new AtomicInteger();
+  private final List<Double> reachesKm = new ArrayList<>();
   private final AirNodes nodes =
       new AirNodes(
-          (latitudeDeg, longitudeDeg) -> {
-            asked.incrementAndGet();
-            return Optional.empty();
+          new AirNodes.World() {
+            @Override
+            public Optional<AirClimate> air(double latitudeDeg, double longitudeDeg) {
+              asked.incrementAndGet();
+              return Optional.empty();
+            }
+
+            @Override
+            public Optional<double[]> landBeside(
+                double latitudeDeg, double longitudeDeg, double reachKm, double inlandKm) {
+              reachesKm.add(reachKm);
+              assertTrue(inlandKm < reachKm);
+              return Optional.empty();
+            }
           });
 
   @Test
@@ -39,7 +54,18 @@ class AirNodesTest {
   }
 
   @Test
-  void theSeaHasNoValue() {
+  void aNodeInTheWaterLooksForLandAgainAtEveryZoomAndHalfAsFar() {
+    nodes.of(new TileFrame(3, 4, 2), MapLayer.CHLORIDE);
+    double coarseKm = reachesKm.get(0);
+    int coarse = reachesKm.size();
+    nodes.of(new TileFrame(4, 8, 4), MapLayer.CHLORIDE);
+    int perEdge = AirNodes.PER_TILE + 1;
+    assertEquals(perEdge * perEdge, reachesKm.size() - coarse);
+    assertEquals(coarseKm / 2, reachesKm.get(coarse), 1e-6 * coarseKm);
+  }
+
+  @Test
+  void theOpenSeaHasNoValue() {
     TileValues values = nodes.of(new TileFrame(5, 16, 10), MapLayer.WET_HOURS);
     assertTrue(Double.isNaN(values.value(128, 128)));
   }

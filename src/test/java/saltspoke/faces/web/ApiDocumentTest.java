@@ -95,6 +95,7 @@ class ApiDocumentTest {
         "/api/advice|" + WHEEL,
         "/api/advice|" + PLACE + "&profile=trainer-only",
         "/api/places|q=Kiel",
+        "/api/region|region=Cornwall&profile=trainer-only&rim=carbon-bare&sample=4",
         "/api/profiles|",
         "/api/pairings|",
         "/api/about|",
@@ -138,6 +139,9 @@ class ApiDocumentTest {
         "400|api/advice?at=54.32,10.13",
         "400|api/advice?at=54.32,10.13&profile=no-such-profile",
         "400|api/advice?at=54.32,10.13&profile=trainer-only&risk=none",
+        "400|api/region",
+        "400|api/region?region=Nord",
+        "404|api/region?region=Nowhereland",
         "404|api/no-such-thing"
       })
   void badInputGetsItsStatusAndTheOneErrorForm(int status, String path) throws Exception {
@@ -158,6 +162,7 @@ class ApiDocumentTest {
     assertEquals(Questions.AIR, parameters("/api/air"));
     assertEquals(Questions.ADVICE, parameters("/api/advice"));
     assertEquals(Questions.PLACES, parameters("/api/places"));
+    assertEquals(Questions.REGION, parameters("/api/region"));
   }
 
   private static Set<String> parameters(String path) {

@@ -11,6 +11,8 @@ import java.nio.charset.StandardCharsets;
 import javax.imageio.ImageIO;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
+import saltspoke.faces.picture.ColourRamp;
+import saltspoke.faces.picture.LayerStyle;
 import saltspoke.values.Refusal;
 
 /** Two square made-up countries side by side: 0..40 E and 40..80 E, 0..60 N. */
@@ -27,16 +29,28 @@ class TileRendererTest {
   private static final LayerStyle STYLE =
       LayerStyle.classes("class-zinc", new double[] {0.1, 0.7, 2.1, 4.2, 8.4});
 
-  private static InputStream stream() {
-    return new ByteArrayInputStream(COUNTRIES.getBytes(StandardCharsets.UTF_8));
-  }
+  /** One country across longitude 180°, 170 E to 160 W, and one round the south pole. */
+  private static final String ACROSS =
+      """
+      {"type":"FeatureCollection","features":[
+      {"type":"Feature","properties":{},"geometry":{"type":"Polygon","coordinates":
+      [[[170,10],[-160,10],[-160,40],[170,40],[170,10]]]}},
+      {"type":"Feature","properties":{},"geometry":{"type":"Polygon","coordinates":
+      [[[-180,-60],[-60,-65],[60,-60],[180,-60],[-180,-60]]]}}]}
+      """;
 
   private static BufferedImage tile(double value, double sureness, int z, int x, int y)
       throws Exception {
+    return tile(COUNTRIES, value, sureness, z, x, y);
+  }
+
+  private static BufferedImage tile(
+      String countries, double value, double sureness, int z, int x, int y) throws Exception {
+    InputStream stream = new ByteArrayInputStream(countries.getBytes(StandardCharsets.UTF_8));
     double[] values = {value, value, value, value};
     double[] sure = {sureness, sureness, sureness, sureness};
     byte[] png =
-        new TileRenderer(WorldShapes.ofCountries(stream()), TileRendererTest::isLand)
+        new TileRenderer(WorldShapes.ofCountries(stream), TileRendererTest::isLand)
             .render(STYLE, new TileValues(2, values, sure), new TileFrame(z, x, y));
     return ImageIO.read(new ByteArrayInputStream(png));
   }
@@ -51,6 +65,20 @@ class TileRendererTest {
     int atTwentyEastThirtyNorth = world.getRGB(142, 105);
     assertEquals(STYLE.colours().get(3), atTwentyEastThirtyNorth);
     assertEquals(0, world.getRGB(20, 105) >>> 24, "the sea is transparent");
+  }
+
+  @Test
+  void landAcrossTheDateLineLiesAtBothEdgesAndLandRoundAPoleBelow() throws Exception {
+    BufferedImage world = tile(ACROSS, 3, 1, 0, 0, 0);
+    int fill = STYLE.colours().get(3);
+    int twentyFiveNorth = 109;
+    assertEquals(fill, world.getRGB(252, twentyFiveNorth), "174 E");
+    assertEquals(fill, world.getRGB(7, twentyFiveNorth), "170 W");
+    assertEquals(0, world.getRGB(128, twentyFiveNorth) >>> 24, "the sea at Greenwich");
+    assertEquals(0, world.getRGB(128, 180) >>> 24, "60° S less a little");
+    for (int x : new int[] {1, 60, 128, 200, 254}) {
+      assertEquals(fill, world.getRGB(x, 230), "round the pole, column " + x);
+    }
   }
 
   @Test

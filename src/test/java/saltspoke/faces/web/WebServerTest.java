@@ -29,13 +29,20 @@ class WebServerTest {
   static void start() throws Exception {
     server =
         new WebServer(
-            0,
+            ServerSettings.local(0),
+            ServerLimits.USUAL,
             Map.of(
                 "/ok", new ResourceHandler(Set.of("GET"), ask -> Reply.json(Json.object())),
                 "/echo",
                     new ResourceHandler(
                         Set.of("POST"),
                         ask -> Reply.json(Json.object().put("length", ask.body().length()))),
+                "/fault",
+                    new ResourceHandler(
+                        Set.of("GET"),
+                        ask -> {
+                          throw new IllegalStateException("secret of the inside");
+                        }),
                 "/range",
                     new ResourceHandler(
                         Set.of("GET"),
@@ -48,7 +55,8 @@ class WebServerTest {
                         ask -> {
                           throw Refusal.dataDamaged("damaged", "a.tif", "", "fetch it again");
                         }),
-                "/*", new ResourceHandler(Set.of("GET"), new StaticFiles()::serve)));
+                "/*", new ResourceHandler(Set.of("GET"), new StaticFiles()::serve)),
+            () -> true);
     base = server.start();
   }
 
@@ -129,10 +137,46 @@ class WebServerTest {
   }
 
   @Test
+  void aBodyThatIsNotUtf8IsRefused() throws Exception {
+    HttpResponse<String> response =
+        CLIENT.send(
+            HttpRequest.newBuilder(URI.create(base + "echo"))
+                .POST(HttpRequest.BodyPublishers.ofByteArray(new byte[] {'"', (byte) 0xFF, '"'}))
+                .build(),
+            HttpResponse.BodyHandlers.ofString());
+    assertEquals(400, response.statusCode());
+    assertTrue(response.body().contains("unreadable-body"), response.body());
+  }
+
+  @Test
   void aMethodThatAResourceLacksIsRefusedWithTheOnesItHas() throws Exception {
     HttpResponse<String> response = post("ok", "{}");
     assertEquals(405, response.statusCode());
     assertEquals("GET", response.headers().firstValue("Allow").orElse(""));
+  }
+
+  @Test
+  void aFaultTellsNothingOfTheInsideAndNothingIsReflected() throws Exception {
+    HttpResponse<String> response = get("fault?q=%3Cscript%3Ealert(1)%3C/script%3E");
+    assertEquals(500, response.statusCode());
+    assertFalse(response.body().contains("secret"), response.body());
+    for (String path :
+        new String[] {
+          "%3Cscript%3Ealert(1)%3C/script%3E", "ok/%3Cscript%3E", "no.js?%3Cscript%3E"
+        }) {
+      HttpResponse<String> missing = get(path);
+      assertEquals(404, missing.statusCode(), path);
+      assertFalse(missing.body().contains("script"), missing.body());
+      assertTrue(
+          missing.headers().firstValue("Content-Type").orElse("").startsWith("application/json"));
+    }
+  }
+
+  @Test
+  void noFolderIsListed() throws Exception {
+    for (String path : new String[] {"css/", "js/", "css", "vendor/leaflet/", "texts/en/"}) {
+      assertEquals(404, get(path).statusCode(), path);
+    }
   }
 
   @Test

@@ -1,4 +1,4 @@
-package saltspoke.faces.web;
+package saltspoke.faces.picture;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;

@@ -1,4 +1,4 @@
-package saltspoke.faces.web;
+package saltspoke.faces.picture;
 
 import com.fasterxml.jackson.databind.node.ArrayNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;

@@ -13,10 +13,15 @@ import java.util.function.BiConsumer;
 /**
  * Streams the features of a GeoJSON collection of polygons: their properties and their polygons.
  */
-final class Admin1Json {
-  private Admin1Json() {}
+public final class GeoJsonFeatures {
+  private GeoJsonFeatures() {}
 
-  static void forEach(InputStream in, BiConsumer<Map<String, String>, List<List<double[]>>> action)
+  /**
+   * Calls back with each feature's scalar properties and its polygons: per polygon its rings, each
+   * as longitude and latitude in turn.
+   */
+  public static void forEach(
+      InputStream in, BiConsumer<Map<String, String>, List<List<double[]>>> action)
       throws IOException {
     try (JsonParser parser = new JsonFactory().createParser(in)) {
       parser.nextToken();

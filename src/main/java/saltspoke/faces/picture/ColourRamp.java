@@ -1,4 +1,4 @@
-package saltspoke.faces.web;
+package saltspoke.faces.picture;
 
 /**
  * A sequence of colours from little to much. Anchors are set in OKLCH (Ottosson 2020) with falling
