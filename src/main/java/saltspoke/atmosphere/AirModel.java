@@ -135,7 +135,10 @@ public final class AirModel {
             so2.depositionMgPerM2Day().median(),
             SeaSalt.annual(monthly, saltSpread).median()),
         new InputSpread(
-            temperatureSpreadK(moved, place), humiditySpreadPct(moved, place), so2.lnSpread(), saltSpread));
+            temperatureSpreadK(moved, place),
+            humiditySpreadPct(moved, place),
+            so2.lnSpread(),
+            saltSpread));
   }
 
   /** The climate of {@link #at}, January to December, alone. */

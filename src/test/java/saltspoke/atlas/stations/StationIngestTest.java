@@ -172,8 +172,7 @@ class StationIngestTest {
             .read(
                 "x.csv",
                 () ->
-                    new ByteArrayInputStream(
-                        (head + a + b + a).getBytes(StandardCharsets.UTF_8)));
+                    new ByteArrayInputStream((head + a + b + a).getBytes(StandardCharsets.UTF_8)));
     Refusal refusal = outcome.refusal().orElseThrow();
     assertEquals("scattered-rows", refusal.error());
     assertEquals("x.csv:4 station", refusal.field());
