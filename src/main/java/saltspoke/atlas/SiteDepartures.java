@@ -12,9 +12,11 @@ import saltspoke.atmosphere.AirOverrides;
 import saltspoke.atmosphere.CorrectedQuantity;
 import saltspoke.atmosphere.CorrectionSpot;
 import saltspoke.atmosphere.HourlyCount;
+import saltspoke.atmosphere.MonthClimate;
 import saltspoke.atmosphere.MonthMeans;
 import saltspoke.atmosphere.MonthlyClimate;
 import saltspoke.atmosphere.SiteCorrection;
+import saltspoke.atmosphere.WetHours;
 import saltspoke.places.Place;
 import saltspoke.places.PlaceDirectory;
 import saltspoke.places.PlaceOverrides;
@@ -70,6 +72,85 @@ public record SiteDepartures(List<SiteCorrection> rows, List<Refusal> refused) {
           climate);
     }
     return gather.departures();
+  }
+
+  /**
+   * A station's hours, counted month by month; NaN in a month that does not count.
+   *
+   * @param wetHours by definition; NaN as well where only days are known
+   */
+  public record Counted(
+      String site,
+      CorrectionSpot spot,
+      double[] temperatureC,
+      double[] relativeHumidityPct,
+      double[] wetHours) {}
+
+  /** Monthly temperature, humidity and wet hours of counted stations. */
+  public static SiteDepartures counted(MonthlyClimate climate, List<Counted> stations) {
+    Gather gather = new Gather();
+    for (Counted station : stations) {
+      MonthMeans modelled = modelled(climate, station.spot());
+      MonthMeans own =
+          new MonthMeans(
+              filled(station.temperatureC(), modelled.temperatureC()),
+              filled(station.relativeHumidityPct(), modelled.relativeHumidityPct()),
+              modelled.diurnalRangeC(),
+              modelled.rainMm(),
+              modelled.windMPerS());
+      List<MonthClimate> fromOwn = own.climate(station.spot().latitudeDeg());
+      List<SiteCorrection> ofSite =
+          months(
+              station.site(),
+              station.spot(),
+              station.temperatureC(),
+              station.relativeHumidityPct(),
+              modelled);
+      for (int m = 0; m < fromOwn.size(); m++) {
+        double measured = station.wetHours()[m];
+        if (!Double.isNaN(measured)) {
+          double factor = WetHours.quotient(measured, fromOwn.get(m).wetHours());
+          ofSite.add(
+              row(station.site(), station.spot(), CorrectedQuantity.WET_HOURS, m + 1, factor, 1));
+        }
+      }
+      gather.addSite(ofSite);
+    }
+    return gather.departures();
+  }
+
+  private static double[] filled(double[] measured, double[] modelled) {
+    double[] filled = modelled.clone();
+    for (int m = 0; m < filled.length; m++) {
+      filled[m] = Double.isNaN(measured[m]) ? filled[m] : measured[m];
+    }
+    return filled;
+  }
+
+  private static MonthMeans modelled(MonthlyClimate climate, CorrectionSpot spot) {
+    return climate.means(
+        spot.latitudeDeg(), spot.longitudeDeg(), spot.elevationM(), spot.seaDistanceKm());
+  }
+
+  private static List<SiteCorrection> months(
+      String site,
+      CorrectionSpot spot,
+      double[] temperatureC,
+      double[] humidityPct,
+      MonthMeans modelled) {
+    List<SiteCorrection> rows = new ArrayList<>();
+    for (CorrectedQuantity quantity :
+        List.of(CorrectedQuantity.TEMPERATURE, CorrectedQuantity.RELATIVE_HUMIDITY)) {
+      boolean warmth = quantity == CorrectedQuantity.TEMPERATURE;
+      double[] measured = warmth ? temperatureC : humidityPct;
+      double[] estimated = warmth ? modelled.temperatureC() : modelled.relativeHumidityPct();
+      for (int m = 0; m < measured.length; m++) {
+        if (!Double.isNaN(measured[m])) {
+          rows.add(row(site, spot, quantity, m + 1, measured[m], estimated[m]));
+        }
+      }
+    }
+    return rows;
   }
 
   /**
@@ -163,20 +244,7 @@ public record SiteDepartures(List<SiteCorrection> rows, List<Refusal> refused) {
         double[] temperatureC,
         double[] humidityPct,
         MonthlyClimate climate) {
-      MonthMeans modelled =
-          climate.means(
-              spot.latitudeDeg(), spot.longitudeDeg(), spot.elevationM(), spot.seaDistanceKm());
-      List<SiteCorrection> ofSite = new ArrayList<>();
-      for (CorrectedQuantity quantity :
-          List.of(CorrectedQuantity.TEMPERATURE, CorrectedQuantity.RELATIVE_HUMIDITY)) {
-        boolean warmth = quantity == CorrectedQuantity.TEMPERATURE;
-        double[] measured = warmth ? temperatureC : humidityPct;
-        double[] estimated = warmth ? modelled.temperatureC() : modelled.relativeHumidityPct();
-        for (int m = 0; m < measured.length; m++) {
-          ofSite.add(row(site, spot, quantity, m + 1, measured[m], estimated[m]));
-        }
-      }
-      addSite(ofSite);
+      addSite(months(site, spot, temperatureC, humidityPct, modelled(climate, spot)));
     }
 
     void addSite(List<SiteCorrection> ofSite) {

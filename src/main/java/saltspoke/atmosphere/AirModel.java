@@ -56,16 +56,16 @@ public final class AirModel {
     Optional<CountryAir.Country> country = countries.find(place.countryCode());
     Setting setting = overrides.setting().orElseGet(() -> Settings.guess(place.surroundings()));
 
-    Climate moved = climate(place, flags);
-    List<MonthClimate> months = moved.means().climate(place.latitudeDeg());
+    MovedClimate moved = climate(place, flags);
+    List<MonthClimate> months = moved.months();
     Salt salt = salt(place, setting, months, overrides, flags);
     Sulfur sulfur = sulfur(setting, country, overrides, flags);
     AnnualAir annual = annual(salt.months());
     Exposure exposure = exposure(annual, sulfur, salt, overrides, flags);
     InputSpread spread =
         new InputSpread(
-            overrides.temperatureC().isPresent() ? 0 : moved.temperatureSpreadK(),
-            overrides.relativeHumidityPct().isPresent() ? 0 : moved.humiditySpreadPct(),
+            overrides.temperatureC().isPresent() ? 0 : temperatureSpreadK(moved, place),
+            overrides.relativeHumidityPct().isPresent() ? 0 : humiditySpreadPct(moved, place),
             sulfur.lnSpread(),
             salt.lnSpread());
     List<MetalCorrosivity> corrosivity = Corrosion.assess(exposure, spread);
@@ -89,29 +89,23 @@ public final class AirModel {
         List.copyOf(flags));
   }
 
-  private record Climate(MonthMeans means, double temperatureSpreadK, double humiditySpreadPct) {}
-
-  private Climate climate(Place place, Set<Note> flags) {
-    SiteMove warmer = moved(CorrectedQuantity.TEMPERATURE, place, flags);
-    SiteMove moister = moved(CorrectedQuantity.RELATIVE_HUMIDITY, place, flags);
-    MonthMeans means = climate.means(place);
-    if (!warmer.isNone() || !moister.isNone()) {
-      means = means.moved(warmer.departure(), moister.departure());
+  /** The climate at a place as local measurements move it, said in the flags where they do. */
+  private MovedClimate climate(Place place, Set<Note> flags) {
+    MovedClimate moved =
+        MovedClimate.of(climate.means(place), corrections, CorrectionSpot.of(place));
+    flags.addAll(moved.notes());
+    if (moved.isMoved()) {
+      flags.addAll(corrections.provenance());
     }
-    double elevationM = place.elevationM();
-    return new Climate(
-        means,
-        warmer.spreadFactor() * ClimateSpread.annualTemperatureK(elevationM),
-        moister.spreadFactor() * ClimateSpread.annualHumidityPct(elevationM));
+    return moved;
   }
 
-  /** How far local measurements move a quantity, said in the flags where they do. */
-  private SiteMove moved(CorrectedQuantity quantity, Place place, Set<Note> flags) {
-    SiteMove move = corrections.at(quantity, CorrectionSpot.of(place));
-    if (!move.isNone()) {
-      flags.add(move.note(quantity));
-    }
-    return move;
+  private static double temperatureSpreadK(MovedClimate moved, Place place) {
+    return moved.temperatureSpreadFactor() * ClimateSpread.annualTemperatureK(place.elevationM());
+  }
+
+  private static double humiditySpreadPct(MovedClimate moved, Place place) {
+    return moved.humiditySpreadFactor() * ClimateSpread.annualHumidityPct(place.elevationM());
   }
 
   /**
@@ -121,7 +115,7 @@ public final class AirModel {
   public AirGlance glance(Place place) {
     Set<Note> flags = new LinkedHashSet<>();
     Setting setting = Settings.guess(place.surroundings());
-    Climate moved = climate(place, flags);
+    MovedClimate moved = climate(place, flags);
     MonthMeans means = moved.means();
     double temperatureC = 0;
     double humidityPct = 0;
@@ -141,12 +135,15 @@ public final class AirModel {
             so2.depositionMgPerM2Day().median(),
             SeaSalt.annual(monthly, saltSpread).median()),
         new InputSpread(
-            moved.temperatureSpreadK(), moved.humiditySpreadPct(), so2.lnSpread(), saltSpread));
+            temperatureSpreadK(moved, place),
+            humiditySpreadPct(moved, place),
+            so2.lnSpread(),
+            saltSpread));
   }
 
   /** The climate of {@link #at}, January to December, alone. */
   public List<MonthClimate> months(Place place) {
-    return climate(place, new LinkedHashSet<>()).means().climate(place.latitudeDeg());
+    return climate(place, new LinkedHashSet<>()).months();
   }
 
   private SeaSalt seaSalt(Place place, Setting setting, double rainMmPerYear) {
@@ -168,7 +165,10 @@ public final class AirModel {
 
   /** Moves salt by local measurements; gives what is left of its spread, 0..1 and a little more. */
   private double moveSalt(List<Double> monthly, Place place, Set<Note> flags) {
-    SiteMove saltier = moved(CorrectedQuantity.CHLORIDE, place, flags);
+    SiteMove saltier = corrections.at(CorrectedQuantity.CHLORIDE, CorrectionSpot.of(place));
+    if (!saltier.isNone()) {
+      flags.add(saltier.note(CorrectedQuantity.CHLORIDE));
+    }
     for (int m = 0; m < monthly.size(); m++) {
       monthly.set(m, monthly.get(m) * Math.exp(saltier.departure()[m]));
     }

@@ -37,7 +37,25 @@ public enum CorrectedQuantity {
       3,
       1e-4,
       1e4,
-      new CorrectionReach(0.5, 10, 150, 1500, 0.1, 5));
+      new CorrectionReach(0.5, 10, 150, 1500, 0.1, 5)),
+
+  /**
+   * Wet hours a month, factor on what follows from the month's own temperature and humidity. Half
+   * of the model's error with exact means is taken as the month's, so its spread is larger than
+   * that of a year ({@link ClimateSpread#WET_HOURS_LN}). ASSUMPTION: reaches as humidity, whose
+   * days the factor describes; spread a factor 2.
+   */
+  WET_HOURS(
+      "wet-hours",
+      "multiply",
+      0.18,
+      0.06,
+      2,
+      1e-3,
+      1e3,
+      new CorrectionReach(0.2, 30, 1500, 4000, 10, 5));
+
+  private static final String FACTOR = "multiply";
 
   private final String id;
   private final String kind;
@@ -77,6 +95,11 @@ public enum CorrectedQuantity {
     return kind;
   }
 
+  /** Whether amounts multiply. */
+  boolean isFactor() {
+    return kind.equals(FACTOR);
+  }
+
   /** Spread of the uncorrected model, one standard deviation; of the logarithm for a factor. */
   double priorSpread() {
     return priorSpread;
@@ -84,7 +107,7 @@ public enum CorrectedQuantity {
 
   /**
    * ASSUMPTION: spread of a measurement that says nothing of it (instrument, short record): 0.3 K,
-   * 2 points, 0.3 of ln chloride; a factor 2 either way.
+   * 2 points, 0.3 of ln chloride, 0.06 of ln wet hours; a factor 2 either way.
    */
   public double usualSpread() {
     return usualSpread;
@@ -108,11 +131,11 @@ public enum CorrectedQuantity {
 
   /** The departure that sites are blended by: the amount, or its logarithm for a factor. */
   double departure(double amount) {
-    return this == CHLORIDE ? Math.log(amount) : amount;
+    return isFactor() ? Math.log(amount) : amount;
   }
 
   /** The amount that takes an estimate to a measurement. */
   public double amount(double measured, double estimated) {
-    return this == CHLORIDE ? measured / estimated : measured - estimated;
+    return isFactor() ? measured / estimated : measured - estimated;
   }
 }

@@ -33,7 +33,8 @@ public final class CorrectionFile {
               + " moved with air, advise, sensitivity or serve --corrections FILE.",
           "sea_distance_km: distance to the nearest sea.",
           "quantity and kind: temperature add (K); relative-humidity add (points);"
-              + " chloride multiply (factor).",
+              + " chloride multiply (factor); wet-hours multiply (factor on a month's wet hours as they"
+              + " follow from its temperature and humidity).",
           "month: 1..12, or empty for every month of the year.",
           "spread: one standard deviation of the corrected value at the site, in the unit of the"
               + " amount, of its natural logarithm for a factor; 0 to meet it exactly.");

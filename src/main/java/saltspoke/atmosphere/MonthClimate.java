@@ -41,6 +41,26 @@ public record MonthClimate(
     dayTypes = List.copyOf(dayTypes);
   }
 
+  /** This month with other wet hours, as measured near by. */
+  MonthClimate withWetHours(double otherWetHours) {
+    return new MonthClimate(
+        month,
+        temperatureC,
+        relativeHumidityPct,
+        vapourPressureHpa,
+        diurnalRangeC,
+        otherWetHours,
+        hoursAbove33Pct,
+        hoursAbove75Pct,
+        hoursBelow0C,
+        rainMm,
+        wetDays,
+        windMPerS,
+        nearFreezingDays,
+        frostDays,
+        dayTypes);
+  }
+
   /** This month with its salt. */
   public MonthAir withChloride(double chlorideDepositionMgPerM2Day) {
     return new MonthAir(

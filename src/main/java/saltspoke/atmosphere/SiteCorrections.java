@@ -7,6 +7,7 @@ import java.util.EnumMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import saltspoke.values.Note;
 
 /**
  * Local measurements that move the model's answers near them: the rows of a correction file, by
@@ -26,10 +27,22 @@ public final class SiteCorrections {
 
   private final Map<CorrectedQuantity, List<Station>> stations;
   private final int siteCount;
+  private final List<Note> provenance;
 
-  private SiteCorrections(Map<CorrectedQuantity, List<Station>> stations, int siteCount) {
+  private SiteCorrections(
+      Map<CorrectedQuantity, List<Station>> stations, int siteCount, List<Note> provenance) {
     this.stations = stations;
     this.siteCount = siteCount;
+    this.provenance = List.copyOf(provenance);
+  }
+
+  /** The same with what is to be said of its source wherever it moves the climate. */
+  public SiteCorrections from(List<Note> notes) {
+    return new SiteCorrections(stations, siteCount, notes);
+  }
+
+  List<Note> provenance() {
+    return provenance;
   }
 
   /**
@@ -69,7 +82,7 @@ public final class SiteCorrections {
             .flatMap(sitesOfOne -> sitesOfOne.keySet().stream())
             .distinct()
             .count();
-    return new SiteCorrections(stations, (int) sites);
+    return new SiteCorrections(stations, (int) sites, List.of());
   }
 
   private static Station blank(Key key) {

@@ -41,7 +41,7 @@ record SiteMove(double[] departure, double[] varianceLeft, List<Mover> movers) {
             .map(m -> String.format(Locale.ROOT, "%s (%.0f km)", m.site(), m.km()))
             .collect(Collectors.joining(", "));
     double moved =
-        quantity == CorrectedQuantity.CHLORIDE
+        quantity.isFactor()
             ? Math.round(100 * Math.exp(mean)) / 100.0
             : Math.round(10 * mean) / 10.0;
     return new Note(

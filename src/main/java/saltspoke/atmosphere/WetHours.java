@@ -19,7 +19,20 @@ public final class WetHours {
   /** ASSUMPTION: width in temperature of what one kind of day stands for, K. Part of the fit. */
   private static final double TEMPERATURE_WIDTH_K = 2;
 
+  /** Added before wet hours of a month are compared by their quotient, so that none is 0/0, h. */
+  private static final double QUOTIENT_FLOOR_H = 1;
+
   private WetHours() {}
+
+  /** Measured over modelled wet hours of a month, both at least 0. */
+  public static double quotient(double measuredH, double modelledH) {
+    return (measuredH + QUOTIENT_FLOOR_H) / (modelledH + QUOTIENT_FLOOR_H);
+  }
+
+  /** The hours that {@link #quotient} over {@code modelledH} says, from 0 to {@code mostH}. */
+  static double times(double quotient, double modelledH, double mostH) {
+    return Site.hold(quotient * (modelledH + QUOTIENT_FLOOR_H) - QUOTIENT_FLOOR_H, 0, mostH);
+  }
 
   /**
    * Share of hours, 0..1, with relative humidity over water above {@code relativeHumidityPct} and

@@ -8,6 +8,7 @@ import java.io.InputStream;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
+import saltspoke.atlas.stations.StationDataSet;
 import saltspoke.atmosphere.CorrectionFile;
 import saltspoke.atmosphere.SiteCorrection;
 import saltspoke.atmosphere.SiteCorrections;
@@ -16,9 +17,9 @@ import saltspoke.sources.CsvTable;
 import saltspoke.values.Refusal;
 
 /**
- * The correction file that answers are moved by.
+ * The correction file or station data set that answers are moved by.
  *
- * @param fileName empty when there is none
+ * @param fileName its name; empty when there is none
  * @param rows number of its rows
  */
 public record LocalCorrections(String fileName, int rows, SiteCorrections sites) {
@@ -40,6 +41,20 @@ public record LocalCorrections(String fileName, int rows, SiteCorrections sites)
     } catch (IOException e) {
       throw unreadable(file);
     }
+  }
+
+  /**
+   * Takes a station data set.
+   *
+   * @throws Refusal when the folder holds none, or it is damaged
+   */
+  public static LocalCorrections stations(Path folder) {
+    StationDataSet stations = StationDataSet.open(folder);
+    List<SiteCorrection> rows = stations.corrections();
+    return new LocalCorrections(
+        stations.name(),
+        rows.size(),
+        SiteCorrections.of(rows).from(List.of(stations.provenance())));
   }
 
   /** What {@code about} says of it; null when there is none. */

@@ -118,14 +118,19 @@ class SiteCorrectionsTest {
     Place kiel = places.at(54.32, 10.13, PlaceOverrides.NONE);
     CorrectionSpot there = CorrectionSpot.of(kiel);
     AirModel plain = AirModel.from(data);
-    AirModel moved =
-        AirModel.from(
-            data,
-            SiteCorrections.of(
-                List.of(
-                    row("mast", there, CorrectedQuantity.TEMPERATURE, 0, 1.5, 0),
-                    row("mast", there, CorrectedQuantity.RELATIVE_HUMIDITY, 0, -6, 0),
-                    row("candle", there, CorrectedQuantity.CHLORIDE, 0, 3, 0))));
+    List<SiteCorrection> rows =
+        new ArrayList<>(
+            List.of(
+                row("mast", there, CorrectedQuantity.TEMPERATURE, 0, 1.5, 0),
+                row("mast", there, CorrectedQuantity.RELATIVE_HUMIDITY, 0, -6, 0),
+                row("candle", there, CorrectedQuantity.CHLORIDE, 0, 3, 0)));
+    double wetHoursOfMeans =
+        AirModel.from(data, SiteCorrections.of(rows))
+            .at(kiel, AirOverrides.NONE)
+            .annual()
+            .wetHours();
+    rows.add(row("mast", there, CorrectedQuantity.WET_HOURS, 0, 0.9, 0));
+    AirModel moved = AirModel.from(data, SiteCorrections.of(rows));
     Place madrid = places.at(40.42, -3.70, PlaceOverrides.NONE);
     assertEquals(
         plain.at(madrid, AirOverrides.NONE), moved.at(madrid, AirOverrides.NONE), "far away");
@@ -134,7 +139,8 @@ class SiteCorrectionsTest {
     assertEquals(before.annual().temperatureC() + 1.5, after.annual().temperatureC(), 1e-4);
     assertEquals(
         before.annual().relativeHumidityPct() - 6, after.annual().relativeHumidityPct(), 1e-4);
-    assertTrue(after.annual().wetHours() < before.annual().wetHours(), "wet hours follow");
+    assertTrue(wetHoursOfMeans < before.annual().wetHours(), "wet hours follow");
+    assertEquals(0.9 * (wetHoursOfMeans + 12), after.annual().wetHours() + 12, 0.1);
     double factor =
         after.chlorideDepositionMgPerM2Day().median()
             / before.chlorideDepositionMgPerM2Day().median();

@@ -21,8 +21,8 @@ import saltspoke.sources.PlaceBuilders;
 /** {@code ingest}: builds data that answers are computed from. */
 @Command(
     name = "ingest",
-    description = "Build climate data from source packages.",
-    subcommands = IngestCommand.Default.class,
+    description = "Build climate data from source packages, or take in your own.",
+    subcommands = {IngestCommand.Default.class, IngestStationsCommand.class},
     mixinStandardHelpOptions = true)
 final class IngestCommand implements Runnable {
   @Spec private CommandSpec spec;

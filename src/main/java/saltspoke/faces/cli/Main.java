@@ -26,6 +26,7 @@ import saltspoke.values.Refusal;
       AtlasCommand.class,
       ServeCommand.class,
       IngestCommand.class,
+      DatasetsCommand.class,
       AboutCommand.class,
       HelpCommand.class
     },
@@ -91,7 +92,7 @@ public final class Main implements Runnable {
     return ExitCode.BUG;
   }
 
-  private static String sentence(Refusal refusal) {
+  static String sentence(Refusal refusal) {
     String was = refusal.was().isEmpty() ? "" : " (found: " + refusal.was() + ")";
     return refusal.field()
         + ": "
