@@ -44,8 +44,8 @@ import saltspoke.values.Refusal;
 @Command(
     name = "atlas",
     description = {
-      "Rasters of any layer for a box or the world. Every cell holds the answer of the point in",
-      "its middle. The name of --out says the form: .tif (cloud-optimised GeoTIFF), .png (picture",
+      "Rasters of any layer for a box or the world.",
+      "Every cell holds the answer of the point in its middle. The name of --out says the form: .tif (cloud-optimised GeoTIFF), .png (picture",
       "with legend), .geojson (by region); give --out more than once for several. A run that was",
       "killed goes on where it stopped when the same command is given again.",
       ""

@@ -28,9 +28,9 @@ import saltspoke.wheel.RidingProfile;
 @Command(
     name = "region",
     description = {
-      "Classes and, with a profile, pairings for the people of a region: shares of its towns by",
-      "population. A region is a state, province or department by any of its names, a larger unit,",
-      "or a country; or a polygon of your own.",
+      "Classes and, with a profile, pairings for the people of a region.",
+      "Shares of its towns by population. A region is a state, province or department by any of its",
+      "names, a larger unit, or a country; or a polygon of your own.",
       ""
     },
     footer = {
