@@ -4,6 +4,7 @@ import java.time.Duration;
 import java.util.Map;
 import java.util.concurrent.ConcurrentHashMap;
 import java.util.concurrent.TimeUnit;
+import java.util.concurrent.TimeoutException;
 import org.eclipse.jetty.io.Connection;
 import org.eclipse.jetty.io.ssl.SslConnection;
 import org.eclipse.jetty.util.component.AbstractLifeCycle;
@@ -70,9 +71,11 @@ final class SlowClients extends AbstractLifeCycle implements Connection.Listener
     boolean atRest = now.messagesIn() == now.messagesOut() && now.bytesIn() == before.bytesIn();
     if (movedOn || atRest) {
       seen.replace(connection, before, now);
+    } else if (now.atNanos() - before.atNanos() > 2 * longest.toNanos()) {
+      connection.getEndPoint().close(new TimeoutException("an exchange that did not end"));
     } else if (now.atNanos() - before.atNanos() > longest.toNanos()) {
       // Closing it from here leaves a request now and then that never ends; the server's own way
-      // out for silent connections ends both.
+      // out for silent connections ends both, but misses one whose bytes come close together.
       connection.getEndPoint().setIdleTimeout(CUT_MS);
     }
   }
